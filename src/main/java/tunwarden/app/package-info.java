@@ -1,0 +1,2 @@
+/** Commands, wiring, start and stop order, exit codes. */
+package tunwarden.app;

@@ -1,0 +1,2 @@
+/** Cellar file and device profiles, read into validated records. */
+package tunwarden.config;

@@ -1,0 +1,2 @@
+/** Sending word: command hook, e-mail, webhook. */
+package tunwarden.notice;

@@ -1,0 +1,2 @@
+/** Gases and their blends: molar masses, virial coefficients, fugacity. */
+package tunwarden.physics.gas;

@@ -1,0 +1,2 @@
+/** Simulated vessels in place of instruments. */
+package tunwarden.rehearse;

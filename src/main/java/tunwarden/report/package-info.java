@@ -1,0 +1,2 @@
+/** The incident report: HTML with plots, JSON, series. */
+package tunwarden.report;

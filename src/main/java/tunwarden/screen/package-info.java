@@ -1,0 +1,2 @@
+/** The dashboard: model, view and terminal. */
+package tunwarden.screen;

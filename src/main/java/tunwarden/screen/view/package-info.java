@@ -1,0 +1,2 @@
+/** Drawing as pure functions from model to cells. */
+package tunwarden.screen.view;

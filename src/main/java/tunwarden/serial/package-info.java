@@ -1,0 +1,2 @@
+/** Serial ports: opening, reconnecting, pacing. The only place that knows the serial library. */
+package tunwarden.serial;

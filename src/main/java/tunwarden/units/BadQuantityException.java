@@ -1,0 +1,8 @@
+package tunwarden.units;
+
+/** A text that is not the quantity asked for; the message is one sentence fit for the user. */
+public final class BadQuantityException extends IllegalArgumentException {
+  public BadQuantityException(String message) {
+    super(message);
+  }
+}
