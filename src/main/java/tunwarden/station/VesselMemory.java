@@ -1,0 +1,34 @@
+package tunwarden.station;
+
+import java.time.Instant;
+import tunwarden.estimate.State;
+
+/** All that the station remembers of one vessel; immutable, so that it can be kept and restored. */
+record VesselMemory(
+    State state,
+    LatestReading pressure,
+    LatestReading temperature,
+    PacedOutlook outlook,
+    Instant assessedAt) {
+
+  static VesselMemory fresh(State state) {
+    return new VesselMemory(
+        state, LatestReading.NONE, LatestReading.NONE, PacedOutlook.NEVER, Instant.MIN);
+  }
+
+  VesselMemory withState(State next) {
+    return new VesselMemory(next, pressure, temperature, outlook, assessedAt);
+  }
+
+  VesselMemory withPressure(LatestReading next) {
+    return new VesselMemory(state, next, temperature, outlook, assessedAt);
+  }
+
+  VesselMemory withTemperature(LatestReading next) {
+    return new VesselMemory(state, pressure, next, outlook, assessedAt);
+  }
+
+  VesselMemory assessed(PacedOutlook next, Instant at) {
+    return new VesselMemory(state, pressure, temperature, next, at);
+  }
+}
