@@ -70,6 +70,19 @@ class ArchitectureTest {
   }
 
   @Test
+  void theDevelopersPageShowsTheSameHouse() throws IOException {
+    Pattern row = Pattern.compile("\\| (?:pure|middle|edge|top) \\| `(\\w+)` \\|.*");
+    List<String> documented = new ArrayList<>();
+    for (String line : Files.readAllLines(Path.of("DEVELOPERS.md"))) {
+      Matcher matcher = row.matcher(line);
+      if (matcher.matches()) {
+        documented.add(matcher.group(1));
+      }
+    }
+    assertEquals(FLOORS, documented);
+  }
+
+  @Test
   void noPackageUsesOneBelowIt() {
     for (int i = 0; i < FLOORS.size(); i++) {
       for (String lower : FLOORS.subList(i + 1, FLOORS.size())) {
