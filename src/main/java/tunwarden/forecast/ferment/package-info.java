@@ -1,0 +1,2 @@
+/** Gas made by fermentation: how much is still to come and how fast. */
+package tunwarden.forecast.ferment;

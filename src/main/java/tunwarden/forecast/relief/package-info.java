@@ -1,0 +1,2 @@
+/** Relief valves: the levels around a setting, rated flow, and what can demand it. */
+package tunwarden.forecast.relief;
