@@ -1,6 +1,7 @@
 package tunwarden.vessel;
 
 import java.util.Optional;
+import tunwarden.units.BadInputException;
 import tunwarden.units.Constants;
 
 /**
@@ -17,4 +18,32 @@ public record Site(double ambientPaAbsolute, double ambientU95Pa, Optional<Room>
   /** Sea level, weather unknown. */
   public static final Site SEA_LEVEL =
       new Site(Constants.STANDARD_ATMOSPHERE_PA, WEATHER_U95_PA, Optional.empty());
+
+  /** Lowest and highest altitude the formula below is used for, m. */
+  public static final double LOWEST_M = -500;
+
+  public static final double HIGHEST_M = 5000;
+
+  private static final double LAPSE_K_PER_M = 0.0065;
+  private static final double SEA_LEVEL_K = 288.15;
+  private static final double EXPONENT = 5.25588;
+
+  /**
+   * The standard atmosphere at an altitude, weather unknown (ISO 2533:1975, troposphere).
+   *
+   * @param altitudeM geopotential altitude, m, {@link #LOWEST_M} to {@link #HIGHEST_M}
+   */
+  public static Site atAltitude(double altitudeM) {
+    if (!(altitudeM >= LOWEST_M && altitudeM <= HIGHEST_M)) {
+      throw new BadInputException(
+          "an altitude of " + altitudeM + " m is outside -500 to 5000 m; give the air pressure");
+    }
+    double ratio = Math.pow(1 - LAPSE_K_PER_M * altitudeM / SEA_LEVEL_K, EXPONENT);
+    return new Site(Constants.STANDARD_ATMOSPHERE_PA * ratio, WEATHER_U95_PA, Optional.empty());
+  }
+
+  /** The same place with the room described. */
+  public Site withRoom(Room described) {
+    return new Site(ambientPaAbsolute, ambientU95Pa, Optional.of(described));
+  }
 }

@@ -1,0 +1,112 @@
+package tunwarden.app;
+
+import java.io.PrintWriter;
+import java.util.List;
+import picocli.CommandLine;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Help;
+import picocli.CommandLine.IVersionProvider;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Spec;
+
+/**
+ * The program's entry. It only finds the command that was asked for, runs it, and turns what went
+ * wrong into one sentence and an exit code: 0 success, 1 the answer is "no" or the work failed, 2 a
+ * usage or input error.
+ */
+@Command(
+    name = Main.NAME,
+    description = {
+      "Watches drink kept under pressure: how much gas it holds, where the pressure is heading,",
+      "what comes out if it is vented, how far it is from the relief setting.",
+      "Advice beside the instruments, never a safety function."
+    },
+    mixinStandardHelpOptions = true,
+    versionProvider = Main.Version.class,
+    sortOptions = false,
+    commandListHeading = "%nCommands:%n",
+    footerHeading = "%nExamples:%n",
+    footer = {
+      "  tunwarden reckon dissolved --pressure '1.0 bar' --temperature '4 C' --liquid beer",
+      "  tunwarden reckon warm --help",
+      "  tunwarden cellar check cellar.toml",
+      "",
+      "Exit codes: 0 done, 1 the answer is no or the work failed, 2 wrong usage or input."
+    })
+public final class Main implements Runnable {
+  static final String NAME = "tunwarden";
+
+  /** Every command, in the order the help lists them; add a class here to add a command. */
+  private static final List<Class<?>> COMMANDS = List.of();
+
+  private static final int HELP_WIDTH = 90;
+
+  @Spec private CommandSpec spec;
+
+  /** Runs the program and ends the process with its exit code. */
+  public static void main(String[] args) {
+    int code;
+    try (PrintWriter out = Streams.standardOut();
+        PrintWriter err = Streams.standardErr()) {
+      code = run(out, err, args);
+    }
+    System.exit(code);
+  }
+
+  /** Runs the program in process, writing to the given streams; returns the exit code. */
+  public static int run(PrintWriter out, PrintWriter err, String... args) {
+    CommandLine line = commandLine(args);
+    line.setOut(out);
+    line.setErr(err);
+    int code = line.execute(args);
+    out.flush();
+    err.flush();
+    return code;
+  }
+
+  /** The parser with every command, as completion and manual page need it. */
+  public static CommandLine commandLine() {
+    return commandLine(new String[0]);
+  }
+
+  /**
+   * The parser for these arguments. Only the command that is named is built: reading the options of
+   * all of them costs more than most answers do.
+   */
+  private static CommandLine commandLine(String... args) {
+    CommandLine line = new CommandLine(new Main());
+    boolean found = false;
+    for (Class<?> command : COMMANDS) {
+      if (args.length > 0 && nameOf(command).equals(args[0])) {
+        line.addSubcommand(command);
+        found = true;
+      }
+    }
+    if (!found) {
+      COMMANDS.forEach(line::addSubcommand);
+    }
+    return line.setColorScheme(Help.defaultColorScheme(Help.Ansi.OFF))
+        .setUsageHelpWidth(HELP_WIDTH)
+        .setExpandAtFiles(false)
+        .setParameterExceptionHandler(Faults::usage)
+        .setExecutionExceptionHandler(Faults::execution);
+  }
+
+  private static String nameOf(Class<?> command) {
+    return command.getAnnotation(Command.class).name();
+  }
+
+  @Override
+  public void run() {
+    spec.commandLine().usage(spec.commandLine().getOut());
+  }
+
+  /** The version that the build wrote into the jar. */
+  static final class Version implements IVersionProvider {
+    @Override
+    public String[] getVersion() {
+      String version = Main.class.getPackage().getImplementationVersion();
+      return new String[] {NAME + " " + (version == null ? "(not packaged)" : version)};
+    }
+  }
+}
