@@ -14,6 +14,9 @@ import java.util.Optional;
  * @param shelvedUntil end of shelving, if shelved
  * @param text what is the case, one sentence with its numbers
  * @param action what the person should do, one sentence
+ * @param remark the word given when it was acknowledged, shelved or taken out of service; may be
+ *     empty
+ * @param chattering whether it comes and goes more often than a person can follow
  */
 public record Alarm(
     AlarmKind kind,
@@ -23,7 +26,9 @@ public record Alarm(
     Instant changed,
     Optional<Instant> shelvedUntil,
     String text,
-    String action) {
+    String action,
+    String remark,
+    boolean chattering) {
   public Priority priority() {
     return kind.priority();
   }
