@@ -1,0 +1,51 @@
+package tunwarden.station;
+
+import java.util.List;
+import java.util.function.Consumer;
+import java.util.function.Function;
+import tunwarden.alarm.AlarmBook;
+import tunwarden.alarm.Transition;
+import tunwarden.assess.Assessment;
+
+/**
+ * Keeps the alarm book of a station: folds every assessment into it and hands on what changed.
+ * Written on the station's thread only; the book itself is immutable and may be read anywhere.
+ */
+public final class AlarmKeeper implements Sink {
+  private final List<Consumer<Transition>> listeners;
+  private volatile AlarmBook book;
+
+  /**
+   * Starts from a book, empty or restored.
+   *
+   * @param listeners told of every transition, in order, on the station's thread
+   */
+  public AlarmKeeper(AlarmBook book, List<Consumer<Transition>> listeners) {
+    this.book = book;
+    this.listeners = List.copyOf(listeners);
+  }
+
+  @Override
+  public void assessed(Assessment assessment) {
+    change(current -> current.fold(assessment));
+  }
+
+  /** Applies what a person or the station itself does to the alarms; on the station's thread. */
+  public void change(Function<AlarmBook, AlarmBook.Folded> deed) {
+    AlarmBook.Folded folded = deed.apply(book);
+    book = folded.book();
+    for (Transition transition : folded.transitions()) {
+      listeners.forEach(listener -> listener.accept(transition));
+    }
+  }
+
+  /** Goes back to a book kept earlier, as a replay does. */
+  public void restore(AlarmBook kept) {
+    book = kept;
+  }
+
+  /** The present book; safe from any thread. */
+  public AlarmBook book() {
+    return book;
+  }
+}
