@@ -1,0 +1,115 @@
+package tunwarden.serial;
+
+import com.fazecast.jSerialComm.SerialPort;
+import com.fazecast.jSerialComm.SerialPortInvalidPortException;
+import java.util.Locale;
+import tunwarden.wire.profile.LineSettings;
+
+/**
+ * Serial ports of this machine through jSerialComm. No listeners of that library are used: after an
+ * unplug they spin, and one that throws ends the port's thread unseen.
+ */
+public final class SerialLinks implements ByteLinkFactory {
+  private static final int LISTEN_MS = 100;
+
+  static {
+    // Keeps the unpacked native library apart from that of other programs.
+    if (System.getProperty("fazecast.jSerialComm.appid") == null) {
+      System.setProperty("fazecast.jSerialComm.appid", "tunwarden");
+    }
+  }
+
+  @Override
+  public ByteLink open(String port, LineSettings settings, Use use) throws PortException {
+    SerialPort serial;
+    try {
+      serial = SerialPort.getCommPort(port);
+    } catch (SerialPortInvalidPortException e) {
+      throw new PortException(
+          PortException.Reason.ABSENT,
+          "there is no serial port " + port + "; see 'instruments ports' for those there are");
+    }
+    prepare(serial, settings, use);
+    if (!serial.openPort(0)) {
+      throw refused(port, serial.getLastErrorCode());
+    }
+    return new SerialLink(port, serial, use);
+  }
+
+  private static void prepare(SerialPort serial, LineSettings settings, Use use) {
+    serial.setComPortParameters(
+        settings.baud(),
+        settings.dataBits(),
+        settings.stopBits() == 2 ? SerialPort.TWO_STOP_BITS : SerialPort.ONE_STOP_BIT,
+        parity(settings),
+        settings.wires().rs485() == LineSettings.Rs485.ON);
+    serial.setFlowControl(flow(settings));
+    if (settings.wires().rs485() == LineSettings.Rs485.LEAVE) {
+      serial.disableRs485ModeControl();
+    }
+    if (!settings.wires().dtr()) {
+      serial.clearDTR();
+      serial.clearRTS();
+    }
+    if (use == Use.LISTEN) {
+      serial.setComPortTimeouts(SerialPort.TIMEOUT_READ_SEMI_BLOCKING, LISTEN_MS, 0);
+    } else {
+      serial.setComPortTimeouts(SerialPort.TIMEOUT_NONBLOCKING, 0, 0);
+    }
+  }
+
+  private static int parity(LineSettings settings) {
+    return switch (settings.parity()) {
+      case NONE -> SerialPort.NO_PARITY;
+      case EVEN -> SerialPort.EVEN_PARITY;
+      case ODD -> SerialPort.ODD_PARITY;
+    };
+  }
+
+  private static int flow(LineSettings settings) {
+    return switch (settings.flow()) {
+      case NONE -> SerialPort.FLOW_CONTROL_DISABLED;
+      case RTS_CTS -> SerialPort.FLOW_CONTROL_RTS_ENABLED | SerialPort.FLOW_CONTROL_CTS_ENABLED;
+      case XON_XOFF ->
+          SerialPort.FLOW_CONTROL_XONXOFF_IN_ENABLED | SerialPort.FLOW_CONTROL_XONXOFF_OUT_ENABLED;
+    };
+  }
+
+  /** The sentence for an error code of the operating system met while opening. */
+  static PortException refused(String port, int code) {
+    boolean windows = System.getProperty("os.name").toLowerCase(Locale.ROOT).startsWith("windows");
+    PortException.Reason reason = windows ? windowsReason(code) : unixReason(code);
+    String sentence =
+        switch (reason) {
+          case ABSENT ->
+              "there is no serial port " + port + "; see 'instruments ports' for those there are";
+          case DENIED ->
+              port
+                  + " may not be opened by this user; add the user to the group that owns it"
+                  + " (dialout or uucp) and log in again";
+          case BUSY -> port + " is held by another program; close that program";
+          default ->
+              port + " is not a usable serial port at these settings (system error " + code + ")";
+        };
+    return new PortException(reason, sentence);
+  }
+
+  /** Error numbers of Linux: ENOENT, ENXIO, ENODEV; EACCES, EPERM; EBUSY, EAGAIN (lock held). */
+  private static PortException.Reason unixReason(int code) {
+    return switch (code) {
+      case 2, 6, 19 -> PortException.Reason.ABSENT;
+      case 1, 13 -> PortException.Reason.DENIED;
+      case 11, 16 -> PortException.Reason.BUSY;
+      default -> PortException.Reason.REFUSED;
+    };
+  }
+
+  /** ERROR_FILE_NOT_FOUND, ERROR_PATH_NOT_FOUND; ERROR_ACCESS_DENIED is what a held port gives. */
+  private static PortException.Reason windowsReason(int code) {
+    return switch (code) {
+      case 2, 3 -> PortException.Reason.ABSENT;
+      case 5, 32 -> PortException.Reason.BUSY;
+      default -> PortException.Reason.REFUSED;
+    };
+  }
+}
