@@ -82,7 +82,9 @@ public final class LineReader {
       }
       int join = part.indexOf(framing.joinedBy());
       if (join > 0) {
-        cells.put(part.substring(0, join).strip(), part.substring(join + 1).strip());
+        String unit = i + 1 < parts.length && Spelling.isUnit(parts[i + 1]) ? parts[i + 1] : "";
+        String value = part.substring(join + 1).strip();
+        cells.put(part.substring(0, join).strip(), (value + " " + unit).strip());
       }
     }
     return cells;
@@ -100,7 +102,7 @@ public final class LineReader {
       return Decoded.bad(Quality.LOOP_FAULT, "the instrument says " + Printable.of(cell, DETAIL));
     }
     Matcher matcher = NUMBER.matcher(framing.decimalComma() ? cell.replace(',', '.') : cell);
-    if (!matcher.matches() || !matcher.group(2).strip().equals(field.number().suffix())) {
+    if (!matcher.matches() || !Spelling.isAllowed(matcher.group(2).strip(), field)) {
       return Decoded.bad(Quality.UNREADABLE, "'" + Printable.of(cell, DETAIL) + "'");
     }
     return Measure.judge(Double.parseDouble(matcher.group(1).replaceAll("\\s", "")), field);

@@ -1,0 +1,2 @@
+/** Device profiles: finding them, and reading their JSON into validated records. */
+package tunwarden.config.profile;

@@ -1,0 +1,2 @@
+/** Pseudo-terminal pairs for tests that need a real serial port. */
+package tunwarden.pty;
