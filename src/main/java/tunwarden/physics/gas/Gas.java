@@ -1,5 +1,6 @@
 package tunwarden.physics.gas;
 
+import java.util.List;
 import java.util.Optional;
 
 /** The gases a headspace can hold. Molar masses from the IUPAC standard atomic weights. */
@@ -19,12 +20,19 @@ public enum Gas {
   C2H6("C2H6", 0.030069),
   SF6("SF6", 0.1460554);
 
+  private static final List<Gas> ALL = List.of(values());
+
   private final String symbol;
   private final double molarMass;
 
   Gas(String symbol, double molarMass) {
     this.symbol = symbol;
     this.molarMass = molarMass;
+  }
+
+  /** Every gas, without the copy that {@code values()} makes. */
+  public static List<Gas> all() {
+    return ALL;
   }
 
   public String symbol() {
@@ -38,7 +46,7 @@ public enum Gas {
 
   /** The gas with that symbol, if known. */
   public static Optional<Gas> ofSymbol(String symbol) {
-    for (Gas gas : values()) {
+    for (Gas gas : ALL) {
       if (gas.symbol.equals(symbol)) {
         return Optional.of(gas);
       }

@@ -1,0 +1,2 @@
+/** Gas through orifices and relief valves. */
+package tunwarden.physics.flow;

@@ -1,0 +1,2 @@
+/** Where a vessel stands: the atmosphere around it. */
+package tunwarden.physics.site;
