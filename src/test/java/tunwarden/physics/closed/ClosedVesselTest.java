@@ -1,8 +1,10 @@
 package tunwarden.physics.closed;
 
+import static org.junit.jupiter.api.Assertions.assertArrayEquals;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 
 import org.junit.jupiter.api.Test;
+import tunwarden.physics.gas.Gas;
 import tunwarden.physics.gas.GasMix;
 import tunwarden.physics.liquid.Liquid;
 import tunwarden.physics.liquid.LiquidKind;

@@ -1,5 +1,6 @@
 package tunwarden.physics.solubility;
 
+import static org.junit.jupiter.api.Assertions.assertEquals;
 import static tunwarden.physics.Reference.kelvin;
 import static tunwarden.physics.Reference.number;
 import static tunwarden.physics.Reference.rows;
