@@ -1,2 +1,5 @@
-/** Cellar file and device profiles, read into validated records. */
+/**
+ * The cellar file: TOML to validated records. Every fault names file, line and key, and several are
+ * told at once.
+ */
 package tunwarden.config;

@@ -24,6 +24,11 @@ public record Site(double ambientPaAbsolute, double ambientU95Pa, Optional<Room>
 
   public static final double HIGHEST_M = 5000;
 
+  /** What a measured barometer is worth when nobody says: common practice, no source. */
+  private static final double BAROMETER_U95_PA = 200;
+
+  private static final double LEAST_PA = 0.5e5;
+  private static final double MOST_PA = 1.1e5;
   private static final double LAPSE_K_PER_M = 0.0065;
   private static final double SEA_LEVEL_K = 288.15;
   private static final double EXPONENT = 5.25588;
@@ -40,6 +45,19 @@ public record Site(double ambientPaAbsolute, double ambientU95Pa, Optional<Room>
     }
     double ratio = Math.pow(1 - LAPSE_K_PER_M * altitudeM / SEA_LEVEL_K, EXPONENT);
     return new Site(Constants.STANDARD_ATMOSPHERE_PA * ratio, WEATHER_U95_PA, Optional.empty());
+  }
+
+  /**
+   * A place with a barometer.
+   *
+   * @param paAbsolute what it shows, Pa absolute, not reduced to sea level
+   */
+  public static Site measured(double paAbsolute) {
+    if (!(paAbsolute >= LEAST_PA && paAbsolute <= MOST_PA)) {
+      throw new BadInputException(
+          "no inhabited place has that air pressure; write 0.5 to 1.1 bar, absolute");
+    }
+    return new Site(paAbsolute, BAROMETER_U95_PA, Optional.empty());
   }
 
   /** The same place with the room described. */

@@ -1,170 +1,161 @@
 package tunwarden.app.options;
 
+import java.util.function.Function;
 import picocli.CommandLine.ITypeConverter;
+import tunwarden.config.StatedLimits;
+import tunwarden.config.Texts;
 import tunwarden.physics.gas.GasMix;
 import tunwarden.physics.liquid.BeerMethod;
 import tunwarden.physics.liquid.LiquidKind;
-import tunwarden.units.BadInputException;
 import tunwarden.units.Kind;
 import tunwarden.units.Pressure;
 import tunwarden.units.Quantities;
 import tunwarden.vessel.Closure;
+import tunwarden.vessel.Site;
 
-/** Texts of options to quantities in SI; a text that will not do is told in one sentence. */
-public final class Convert {
-  private Convert() {}
+/** Binds the texts of options to the parsers that cellar files use too. */
+public abstract class Convert<T> implements ITypeConverter<T> {
+  private final Function<String, T> parser;
+
+  Convert(Function<String, T> parser) {
+    this.parser = parser;
+  }
+
+  @Override
+  public T convert(String text) {
+    return parser.apply(text);
+  }
 
   /** Gauge unless its unit says absolute. */
-  public static final class ToPressure implements ITypeConverter<Pressure> {
-    @Override
-    public Pressure convert(String text) {
-      return Pressure.parse(text);
+  public static final class ToPressure extends Convert<Pressure> {
+    ToPressure() {
+      super(Pressure::parse);
     }
   }
 
   /** Absolute whatever its unit says, for quantities that have no gauge form: Pa. */
-  public static final class ToAbsolutePa implements ITypeConverter<Double> {
-    @Override
-    public Double convert(String text) {
-      return notNegative(text, Pressure.parse(text).pa());
+  public static final class ToAbsolutePa extends Convert<Double> {
+    ToAbsolutePa() {
+      super(Texts::absolutePa);
     }
   }
 
   /** A difference of two pressures: Pa. */
-  public static final class ToPressureDifferencePa implements ITypeConverter<Double> {
-    @Override
-    public Double convert(String text) {
-      Pressure pressure = Pressure.parse(text);
-      if (pressure.reference() == Pressure.Reference.ABSOLUTE) {
-        throw new BadInputException("'" + text + "' is a difference; write it without 'a'");
-      }
-      return notNegative(text, pressure.pa());
+  public static final class ToPressureDifferencePa extends Convert<Double> {
+    ToPressureDifferencePa() {
+      super(Texts::pressureDifferencePa);
+    }
+  }
+
+  /** How early a relief valve may open. */
+  public static final class ToTolerance extends Convert<StatedLimits.Tolerance> {
+    ToTolerance() {
+      super(StatedLimits.Tolerance::parse);
     }
   }
 
   /** Temperature: K. */
-  public static final class ToKelvin implements ITypeConverter<Double> {
-    @Override
-    public Double convert(String text) {
-      double kelvin = Quantities.parse(text, Kind.TEMPERATURE);
-      if (!(kelvin > 0)) {
-        throw new BadInputException("'" + text + "' is below absolute zero");
-      }
-      return kelvin;
+  public static final class ToKelvin extends Convert<Double> {
+    ToKelvin() {
+      super(Texts::kelvin);
     }
   }
 
   /** Temperature difference: K. */
-  public static final class ToKelvinDifference extends Plain {
-    public ToKelvinDifference() {
-      super(Kind.TEMPERATURE_DIFFERENCE);
+  public static final class ToKelvinDifference extends Convert<Double> {
+    ToKelvinDifference() {
+      super(Texts.of(Kind.TEMPERATURE_DIFFERENCE));
     }
   }
 
   /** Volume: m³. */
-  public static final class ToCubicMetres extends Plain {
-    public ToCubicMetres() {
-      super(Kind.VOLUME);
+  public static final class ToCubicMetres extends Convert<Double> {
+    ToCubicMetres() {
+      super(Texts.of(Kind.VOLUME));
     }
   }
 
   /** Length: m. */
-  public static final class ToMetres extends Plain {
-    public ToMetres() {
-      super(Kind.LENGTH);
+  public static final class ToMetres extends Convert<Double> {
+    ToMetres() {
+      super(Texts.of(Kind.LENGTH));
     }
   }
 
   /** Rate: 1/s. */
-  public static final class ToPerSecond extends Plain {
-    public ToPerSecond() {
-      super(Kind.RATE);
+  public static final class ToPerSecond extends Convert<Double> {
+    ToPerSecond() {
+      super(Texts.of(Kind.RATE));
     }
   }
 
   /** Gas or sugar content: kg/m³. */
-  public static final class ToContent extends Plain {
-    public ToContent() {
-      super(Kind.GAS_CONTENT);
+  public static final class ToContent extends Convert<Double> {
+    ToContent() {
+      super(Texts.of(Kind.GAS_CONTENT));
     }
   }
 
   /** Extract or gravity: degrees Plato. */
-  public static final class ToPlato extends Plain {
-    public ToPlato() {
-      super(Kind.EXTRACT);
+  public static final class ToPlato extends Convert<Double> {
+    ToPlato() {
+      super(Texts.of(Kind.EXTRACT));
     }
   }
 
   /** Share: 0..1. */
-  public static final class ToShare implements ITypeConverter<Double> {
-    @Override
-    public Double convert(String text) {
-      double share = notNegative(text, Quantities.parse(text, Kind.FRACTION));
-      if (share > 1) {
-        throw new BadInputException("'" + text + "' is more than the whole; write at most 100 %");
-      }
-      return share;
+  public static final class ToShare extends Convert<Double> {
+    ToShare() {
+      super(Texts::share);
+    }
+  }
+
+  /** A plain number above 0 and at most 1. */
+  public static final class ToCoefficient extends Convert<Double> {
+    ToCoefficient() {
+      super(Texts::coefficient);
     }
   }
 
   /** Dry gas by composition. */
-  public static final class ToGas implements ITypeConverter<GasMix> {
-    @Override
-    public GasMix convert(String text) {
-      return GasMix.parse(text);
+  public static final class ToGas extends Convert<GasMix> {
+    ToGas() {
+      super(GasMix::parse);
+    }
+  }
+
+  /** A place whose air pressure was measured. */
+  public static final class ToMeasuredSite extends Convert<Site> {
+    ToMeasuredSite() {
+      super(text -> Site.measured(Texts.absolutePa(text)));
+    }
+  }
+
+  /** A place by its altitude. */
+  public static final class ToSiteAtAltitude extends Convert<Site> {
+    ToSiteAtAltitude() {
+      super(text -> Site.atAltitude(Quantities.parse(text, Kind.LENGTH)));
     }
   }
 
   /** Kind of drink. */
-  public static final class ToLiquidKind implements ITypeConverter<LiquidKind> {
-    @Override
-    public LiquidKind convert(String text) {
-      return LiquidKind.ofWord(text)
-          .orElseThrow(() -> unknown(text, "a liquid", LiquidKind.words()));
+  public static final class ToLiquidKind extends Convert<LiquidKind> {
+    ToLiquidKind() {
+      super(Texts::liquidKind);
     }
   }
 
   /** Trade relation for beer. */
-  public static final class ToBeerMethod implements ITypeConverter<BeerMethod> {
-    @Override
-    public BeerMethod convert(String text) {
-      return BeerMethod.ofWord(text)
-          .orElseThrow(() -> unknown(text, "a method", "european, chart"));
+  public static final class ToBeerMethod extends Convert<BeerMethod> {
+    ToBeerMethod() {
+      super(Texts::beerMethod);
     }
   }
 
   /** How the headspace is connected. */
-  public static final class ToClosure implements ITypeConverter<Closure> {
-    @Override
-    public Closure convert(String text) {
-      return Closure.ofWord(text)
-          .orElseThrow(() -> unknown(text, "a closure", "sealed, supply, spunding, open, infer"));
+  public static final class ToClosure extends Convert<Closure> {
+    ToClosure() {
+      super(Texts::closure);
     }
-  }
-
-  /** A quantity of one kind that cannot be negative, in SI. */
-  abstract static class Plain implements ITypeConverter<Double> {
-    private final Kind kind;
-
-    Plain(Kind kind) {
-      this.kind = kind;
-    }
-
-    @Override
-    public Double convert(String text) {
-      return notNegative(text, Quantities.parse(text, kind));
-    }
-  }
-
-  private static double notNegative(String text, double value) {
-    if (!(value >= 0)) {
-      throw new BadInputException("'" + text + "' is negative; write zero or more");
-    }
-    return value;
-  }
-
-  private static BadInputException unknown(String text, String what, String known) {
-    return new BadInputException("'" + text + "' is not " + what + "; write one of " + known);
   }
 }

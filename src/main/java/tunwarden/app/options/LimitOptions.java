@@ -1,15 +1,23 @@
 package tunwarden.app.options;
 
+import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import picocli.CommandLine.Option;
+import tunwarden.config.StatedLimits;
 import tunwarden.units.BadInputException;
 import tunwarden.units.Pressure;
 import tunwarden.vessel.Limits;
-import tunwarden.vessel.ReliefSetting;
 
 /** The pressures that must not be passed. */
 public final class LimitOptions {
+  private static final Map<String, String> OPTIONS =
+      Map.of(
+          "relief", "--relief",
+          "tolerance", "--tolerance",
+          "vessel", "--limit",
+          "vacuum", "--vacuum-limit");
+
   @Option(
       names = "--relief",
       paramLabel = "PRESSURE",
@@ -20,12 +28,12 @@ public final class LimitOptions {
   @Option(
       names = "--tolerance",
       paramLabel = "DIFFERENCE",
-      converter = Convert.ToPressureDifferencePa.class,
+      converter = Convert.ToTolerance.class,
       description = {
-        "How far below its setting the valve may open. Default: ISO 4126-1, 3 %% of the",
-        "setting, at least 0.1 bar."
+        "How far below its setting the valve may open, or ISO (4126-1) or ASME (VIII-1).",
+        "Default: ISO."
       })
-  private Double tolerancePa;
+  private StatedLimits.Tolerance tolerance;
 
   @Option(
       names = "--limit",
@@ -43,7 +51,7 @@ public final class LimitOptions {
 
   /** Whether any of these options was given. */
   public boolean areGiven() {
-    return relief != null || tolerancePa != null || vessel != null || vacuum != null;
+    return relief != null || tolerance != null || vessel != null || vacuum != null;
   }
 
   /**
@@ -53,38 +61,17 @@ public final class LimitOptions {
    * @throws BadInputException when they contradict each other
    */
   public Limits limits(double ambientPaAbsolute) {
-    OptionalDouble rated = gauge(vessel, ambientPaAbsolute);
-    OptionalDouble lowest = gauge(vacuum, ambientPaAbsolute);
-    if (lowest.isPresent() && lowest.getAsDouble() > 0) {
-      throw new BadInputException("--vacuum-limit: write zero or a negative gauge pressure");
+    StatedLimits stated =
+        new StatedLimits(
+            gauge(relief, ambientPaAbsolute),
+            Optional.ofNullable(tolerance),
+            gauge(vessel, ambientPaAbsolute),
+            gauge(vacuum, ambientPaAbsolute));
+    try {
+      return stated.check();
+    } catch (StatedLimits.Contradiction fault) {
+      throw new BadInputException(OPTIONS.get(fault.key()) + ": " + fault.getMessage(), fault);
     }
-    Optional<ReliefSetting> setting = setting(ambientPaAbsolute);
-    if (setting.isPresent()
-        && rated.isPresent()
-        && setting.get().setPaGauge() > rated.getAsDouble()) {
-      throw new BadInputException("--relief: the setting is above the vessel limit (--limit)");
-    }
-    return new Limits(setting, rated, lowest);
-  }
-
-  private Optional<ReliefSetting> setting(double ambientPaAbsolute) {
-    if (relief == null) {
-      if (tolerancePa != null) {
-        throw new BadInputException("--tolerance: give the setting it belongs to with --relief");
-      }
-      return Optional.empty();
-    }
-    double set = relief.gaugePa(ambientPaAbsolute);
-    if (!(set > 0)) {
-      throw new BadInputException("--relief: write a setting above zero gauge");
-    }
-    if (tolerancePa == null) {
-      return Optional.of(ReliefSetting.iso4126(set));
-    }
-    if (tolerancePa >= set) {
-      throw new BadInputException("--tolerance: it is as wide as the setting; check both");
-    }
-    return Optional.of(ReliefSetting.stated(set, tolerancePa));
   }
 
   private static OptionalDouble gauge(Pressure pressure, double ambientPaAbsolute) {

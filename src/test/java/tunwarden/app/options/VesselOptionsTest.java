@@ -81,17 +81,15 @@ class VesselOptionsTest {
         "--volume=1m3 | --fill is missing; write it as '--fill 900L'",
         "--volume=1m3 --fill=2m3 | --fill: the fill is larger than the volume; check both",
         "--volume=1m3 --fill=900L --relief=3bar --limit=2bar"
-            + " | --relief: the setting is above the vessel limit (--limit)",
+            + " | --relief: the setting is above what the vessel is rated for; check both",
         "--volume=1m3 --fill=900L --relief=1bar --tolerance=1bar"
             + " | --tolerance: it is as wide as the setting; check both",
         "--volume=1m3 --fill=900L --tolerance=1bar"
-            + " | --tolerance: give the setting it belongs to with --relief",
+            + " | --tolerance: give the relief setting it belongs to",
         "--volume=1m3 --fill=900L --vacuum-limit=0.1bar"
             + " | --vacuum-limit: write zero or a negative gauge pressure",
         "--volume=1m3 --fill=900L --altitude=10m --ambient=1bar"
             + " | give --ambient or --altitude, not both",
-        "--volume=1m3 --fill=900L --ambient=10bar | --ambient: no inhabited place has that air"
-            + " pressure; write 0.5 to 1.1 bar, absolute",
       })
   void whatCannotBeIsRefused(String args, String sentence) {
     VesselOptions options = parse(args.trim().split(" "));
@@ -105,9 +103,10 @@ class VesselOptionsTest {
       value = {
         "--volume=900 | '900' has no unit; for a volume use one of m3, L, hL, mL",
         "--fill=-1L | '-1L' is negative; write zero or more",
-        "--liquid=bier | 'bier' is not a liquid; write one of water, beer, wine, sparkling-wine,"
+        "--liquid=mead | 'mead' is not a liquid; write one of water, beer, wine, sparkling-wine,"
             + " cider, soft-drink, mineral-water, kombucha",
         "--abv=105% | '105%' is more than the whole; write at most 100 %",
+        "--ambient=10bar | no inhabited place has that air pressure; write 0.5 to 1.1 bar, absolute",
         "--tolerance=0.1bara | '0.1bara' is a difference; write it without 'a'",
       })
   void aTextThatIsNoQuantityIsRefused(String arg, String sentence) {
