@@ -247,7 +247,7 @@ final class ForeignSamples {
         "20260302T080100Z,0.880,5.40");
     add(
         "spreadsheet days",
-        "days since 1899",
+        "gauge",
         NONE.withColumns("time=day/days"),
         "day,P (bar),T (C)",
         "46083.3333333333,0.873,5.25",
