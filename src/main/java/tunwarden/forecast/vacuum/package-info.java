@@ -1,0 +1,2 @@
+/** How a sealed vessel comes under vacuum, and how a full one comes under pressure. */
+package tunwarden.forecast.vacuum;
