@@ -1,0 +1,161 @@
+package tunwarden.forecast;
+
+import java.time.Duration;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+import java.util.OptionalDouble;
+import java.util.function.DoublePredicate;
+import tunwarden.estimate.Estimate.Spread;
+import tunwarden.estimate.Mode;
+import tunwarden.units.Constants;
+import tunwarden.vessel.ReliefSetting;
+
+/** Everything that is forecast for every vessel all the time. Pure. */
+public final class Forecaster {
+  private static final double COLD_K = Constants.ZERO_CELSIUS_K;
+  private static final double HOTTEST_K = 60 + Constants.ZERO_CELSIUS_K;
+  private static final double COLDEST_K = -3 + Constants.ZERO_CELSIUS_K;
+  private static final double CLOSE_K = 0.005;
+  private static final double WORTH_CHILLING_K = 2;
+  private static final double WORTH_VENTING_PA = 0.05e5;
+  private static final Duration LATER = Duration.ofHours(8);
+
+  private static final int REST = 0;
+  private static final int HOLD = 1;
+  private static final int REBOUND = 2;
+  private static final int CHILL = 3;
+  private static final int WARM = 4;
+
+  private Forecaster() {}
+
+  /** The futures of a vessel; {@link Outlook#NONE} where its state makes no sense to the model. */
+  public static Outlook outlook(Present present) {
+    if (!(present.pressurePaAbsolute() > 0) || present.vessel().fillM3() <= 0) {
+      return Outlook.NONE;
+    }
+    Ensemble ensemble = Ensemble.of(present);
+    double warmK = present.vessel().warmToK().orElse(present.temperatureK());
+    Spread[] at = ensemble.ranges(world -> futures(world, warmK));
+    Drift drift = Drift.of(ensemble, at[REST]);
+    Cautions cautions = new Cautions(present);
+    List<Projection> projections = new ArrayList<>();
+    projections.add(trend(drift));
+    addWarm(projections, cautions, ensemble, at[WARM]);
+    addChill(projections, cautions, present, at[CHILL]);
+    if (present.pressurePaGauge() > WORTH_VENTING_PA) {
+      projections.add(projection(Scenario.REBOUND, "vented to 0, shut", at[REBOUND]));
+    }
+    if (present.activity().mode() != Mode.SEALED) {
+      projections.add(projection(Scenario.HOLD, "keeps the gas as it is", at[HOLD]));
+    }
+    Optional<ReliefSetting> relief = present.vessel().limits().relief();
+    Optional<TimeRange> toLift = relief.flatMap(r -> drift.until(r.earliestLiftPaGauge()));
+    cautions.soonest(toLift, relief.flatMap(r -> drift.soonest(r.earliestLiftPaGauge())));
+    OptionalDouble full = liquidFullK(ensemble.middle());
+    cautions.liquidFull(full);
+    cautions.supersaturation(ensemble.middle());
+    return new Outlook(
+        projections,
+        toLift,
+        Drift.HORIZON,
+        relief.map(r -> liftK(ensemble.middle(), r)).orElse(OptionalDouble.empty()),
+        full,
+        drift.points(),
+        cautions.list());
+  }
+
+  private static double[] futures(World world, double warmK) {
+    return new double[] {
+      world.restPaGauge(world.temperatureK()),
+      world.holdPaGauge(),
+      world.vented(0).restPaGauge(world.temperatureK()),
+      world.restPaGauge(COLD_K),
+      world.restPaGauge(warmK)
+    };
+  }
+
+  private static Projection trend(Drift drift) {
+    Spread later = drift.at(LATER);
+    TimeRange when = new TimeRange(LATER, LATER, Optional.of(LATER));
+    return new Projection(
+        Scenario.TREND,
+        "in " + LATER.toHours() + " h",
+        later.middle(),
+        later.low(),
+        later.high(),
+        Optional.of(when));
+  }
+
+  private static void addWarm(
+      List<Projection> projections, Cautions cautions, Ensemble ensemble, Spread paGauge) {
+    Present present = ensemble.present();
+    if (present.vessel().warmToK().isEmpty()) {
+      return;
+    }
+    double toK = present.vessel().warmToK().getAsDouble();
+    if (toK <= present.temperatureK()) {
+      return;
+    }
+    projections.add(projection(Scenario.WARM, "warmed to " + celsius(toK), paGauge));
+    double unmixed = ensemble.middle().unmixedPaGauge(toK);
+    cautions.warm(
+        toK,
+        paGauge,
+        Double.isFinite(unmixed) ? OptionalDouble.of(unmixed) : OptionalDouble.empty());
+  }
+
+  private static void addChill(
+      List<Projection> projections, Cautions cautions, Present present, Spread paGauge) {
+    if (present.temperatureK() < COLD_K + WORTH_CHILLING_K) {
+      return;
+    }
+    projections.add(projection(Scenario.CHILL, "cooled to " + celsius(COLD_K), paGauge));
+    cautions.chill(COLD_K, paGauge);
+  }
+
+  private static Projection projection(Scenario scenario, String words, Spread paGauge) {
+    return new Projection(
+        scenario, words, paGauge.middle(), paGauge.low(), paGauge.high(), Optional.empty());
+  }
+
+  private static String celsius(double kelvin) {
+    return String.format(Locale.ROOT, "%.0f °C", kelvin - Constants.ZERO_CELSIUS_K);
+  }
+
+  /**
+   * Temperature at which the closed vessel, at rest, reaches the valve's earliest opening, K; below
+   * the present one if it stands above it already, −3 °C at least; empty if not below 60 °C.
+   */
+  public static OptionalDouble liftK(World world, ReliefSetting relief) {
+    double lift = relief.earliestLiftPaGauge();
+    return rising(k -> world.isFullAt(k) || world.restPaGauge(k) >= lift);
+  }
+
+  /** Temperature at which the liquid takes the whole vessel, K; empty if not below 60 °C. */
+  public static OptionalDouble liquidFullK(World world) {
+    return rising(world::isFullAt);
+  }
+
+  /** Where a condition that holds from some temperature on begins to hold. */
+  private static OptionalDouble rising(DoublePredicate holds) {
+    double low = COLDEST_K;
+    double high = HOTTEST_K;
+    if (!holds.test(high)) {
+      return OptionalDouble.empty();
+    }
+    if (holds.test(low)) {
+      return OptionalDouble.of(low);
+    }
+    while (high - low > CLOSE_K) {
+      double middle = (low + high) / 2;
+      if (holds.test(middle)) {
+        high = middle;
+      } else {
+        low = middle;
+      }
+    }
+    return OptionalDouble.of(high);
+  }
+}
