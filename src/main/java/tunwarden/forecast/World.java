@@ -2,6 +2,7 @@ package tunwarden.forecast;
 
 import tunwarden.physics.closed.ClosedSolver;
 import tunwarden.physics.closed.ClosedVessel;
+import tunwarden.physics.gas.DryBlend;
 import tunwarden.physics.gas.Gas;
 import tunwarden.physics.gas.GasMix;
 
@@ -70,7 +71,7 @@ public final class World {
     double[] head = new double[GASES];
     double[] all = new double[GASES];
     vessel.partials(paAbsolute, setting.temperatureK, gas, airPa, partial);
-    vessel.headspaceMol(partial, setting.temperatureK, head);
+    headspaceMol(vessel, partial, setting.temperatureK, head);
     vessel.solver().inventoryAt(partial, paAbsolute, setting.temperatureK, all);
     for (int i = 0; i < GASES; i++) {
       all[i] -= head[i];
@@ -90,6 +91,14 @@ public final class World {
         setting.fillM3 + more,
         present.fillTemperatureK(),
         present.vessel().liquid());
+  }
+
+  private static void headspaceMol(
+      ClosedVessel vessel, double[] partialPa, double temperatureK, double[] out) {
+    double perPa = new DryBlend().prepareAt(temperatureK, partialPa).molPerM3Pa(partialPa);
+    for (int i = 0; i < GASES; i++) {
+      out[i] = partialPa[i] * perPa * vessel.headspaceM3(temperatureK);
+    }
   }
 
   /** The same with another amount of CO2 in the liquid, kg/m³. */
@@ -252,7 +261,7 @@ public final class World {
     for (int i = 0; i < GASES; i++) {
       partial[i] = partialPa[i] * to / from;
     }
-    vessel.headspaceMol(partial, setting.temperatureK, head);
+    headspaceMol(vessel, partial, setting.temperatureK, head);
     for (int i = 0; i < GASES; i++) {
       double left = headMol[i] > 0 ? head[i] / headMol[i] : 0;
       head[i] = headMol[i] * Math.pow(left, 1 / (1 + ADIABATIC * setting.ventCooling));
