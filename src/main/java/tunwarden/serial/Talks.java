@@ -7,7 +7,8 @@ final class Talks {
   static Talk of(PortPlan plan, Desk desk) {
     return switch (plan.speaks()) {
       case TEXT_LINES -> new StreamTalk(plan, desk);
-      case TEXT_QUERY, MODBUS_RTU -> new AskTalk(plan, desk);
+      case TEXT_QUERY, MODBUS_RTU ->
+          throw new UnsupportedOperationException(plan.speaks().word() + " is not spoken yet");
     };
   }
 }

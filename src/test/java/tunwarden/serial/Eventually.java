@@ -11,12 +11,10 @@ final class Eventually {
 
   static void within(Duration limit, String what, BooleanSupplier holds) {
     long end = System.nanoTime() + limit.toNanos();
-    boolean held = holds.getAsBoolean();
-    while (!held && System.nanoTime() < end) {
+    while (!holds.getAsBoolean() && System.nanoTime() < end) {
       sleep(5);
-      held = holds.getAsBoolean();
     }
-    assertTrue(held, () -> "not within " + limit + ": " + what);
+    assertTrue(holds.getAsBoolean(), () -> "not within " + limit + ": " + what);
   }
 
   static void sleep(long ms) {

@@ -1,0 +1,59 @@
+package tunwarden.journal;
+
+import java.io.BufferedReader;
+import java.io.IOException;
+import java.io.InputStreamReader;
+import java.nio.charset.StandardCharsets;
+import java.nio.file.Path;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.function.Predicate;
+import tunwarden.journal.disk.Disk;
+
+/** Reads the journal back, also while it is being written. */
+public final class JournalReader {
+  private final Disk disk;
+  private final Path directory;
+
+  /** A reader of {@code DATA/journal}. */
+  public JournalReader(Disk disk, Path directory) {
+    this.disk = disk;
+    this.directory = directory;
+  }
+
+  /**
+   * The entries that pass, oldest first.
+   *
+   * @param wanted which
+   * @param most how many at most
+   * @throws IOException when a file cannot be read; a file deleted meanwhile is none of those
+   */
+  public List<JournalLines.Numbered> find(Predicate<JournalLines.Numbered> wanted, int most)
+      throws IOException {
+    List<JournalLines.Numbered> found = new ArrayList<>();
+    for (Path month : disk.list(directory)) {
+      if (month.toString().endsWith(".jsonl") && disk.exists(month)) {
+        read(month, wanted, most, found);
+      }
+    }
+    return found;
+  }
+
+  private void read(
+      Path month,
+      Predicate<JournalLines.Numbered> wanted,
+      int most,
+      List<JournalLines.Numbered> found)
+      throws IOException {
+    try (BufferedReader lines =
+        new BufferedReader(new InputStreamReader(disk.read(month), StandardCharsets.UTF_8))) {
+      String line = lines.readLine();
+      while (line != null && found.size() < most) {
+        Optional<JournalLines.Numbered> entry = JournalLines.read(line);
+        entry.filter(wanted).ifPresent(found::add);
+        line = lines.readLine();
+      }
+    }
+  }
+}

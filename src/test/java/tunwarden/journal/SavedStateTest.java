@@ -1,0 +1,60 @@
+package tunwarden.journal;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertThrows;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.util.Map;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import tunwarden.alarm.AlarmBook;
+import tunwarden.alarm.AlarmKind;
+import tunwarden.alarm.AlarmSettings;
+import tunwarden.alarm.Assessments;
+import tunwarden.estimate.EventKind;
+import tunwarden.journal.disk.AtomicFile;
+import tunwarden.journal.disk.RealDisk;
+import tunwarden.reading.Quality;
+
+/** What a restart begins with. */
+class SavedStateTest {
+  @TempDir private Path folder;
+
+  @Test
+  void alarmsShelvesAndRemarksComeBack() throws IOException {
+    AlarmBook book = AlarmBook.empty(AlarmSettings.DEFAULT);
+    var at = Assessments.START;
+    book = book.fold(Assessments.of("FV2").pressure(Quality.PORT_GONE).build()).book();
+    book = book.fold(Assessments.of("FV2").event(EventKind.LIFT, -5, true).build()).book();
+    book = book.acknowledge(AlarmKind.LIFT_SEEN, "FV2", "\u00e4ye \"so\"", at).book();
+    book = book.shelve(AlarmKind.LEAK, "FV2", "known", at.plusSeconds(900), at).book();
+    book = book.outOfService(AlarmKind.VACUUM, "BT1", "broken", at).book();
+    SavedState.Memory memory = new SavedState.Memory("2000 L", "{\"a\": 1}");
+    Path file = folder.resolve("state.json");
+    AtomicFile.write(new RealDisk(), file, new SavedState(at, book, Map.of("FV2", memory)).bytes());
+    SavedState back = SavedState.read(new RealDisk(), file, AlarmSettings.DEFAULT).orElseThrow();
+    assertEquals(book.alarms(), back.book().alarms());
+    assertEquals(book.memories(), back.book().memories());
+    assertEquals(book.counts(), back.book().counts());
+    assertEquals(Map.of("FV2", memory), back.vessels());
+    assertEquals(4, back.book().alarms().size());
+  }
+
+  @Test
+  void aFileThatIsNotOursIsRefusedInWords() throws IOException {
+    Path file = folder.resolve("state.json");
+    assertTrue(SavedState.read(new RealDisk(), file, AlarmSettings.DEFAULT).isEmpty());
+    for (String content : new String[] {"", "{", "[1]", "{\"format\": 9}", "[".repeat(5000)}) {
+      Files.writeString(file, content);
+      String words =
+          assertThrows(
+                  IOException.class,
+                  () -> SavedState.read(new RealDisk(), file, AlarmSettings.DEFAULT))
+              .getMessage();
+      assertTrue(words.startsWith("state.json"), words);
+    }
+  }
+}
