@@ -23,6 +23,11 @@ public record Look(Display units, Theme theme, Glyphs glyphs) {
     return new Look(units, theme.next(), glyphs);
   }
 
+  /** The next drawing characters. */
+  public Look nextGlyphs() {
+    return withGlyphs(Glyphs.values()[(glyphs.ordinal() + 1) % Glyphs.values().length]);
+  }
+
   /** The same with other glyphs. */
   public Look withGlyphs(Glyphs other) {
     return new Look(units, theme, other);

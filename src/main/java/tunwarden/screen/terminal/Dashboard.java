@@ -1,5 +1,9 @@
 package tunwarden.screen.terminal;
 
+import com.googlecode.lanterna.terminal.Terminal;
+import java.io.IOException;
+import java.io.PrintStream;
+import java.nio.charset.StandardCharsets;
 import java.util.function.Supplier;
 import tunwarden.screen.model.Board;
 import tunwarden.screen.model.Desk;
@@ -10,7 +14,7 @@ public final class Dashboard {
 
   /**
    * Shows the board until the person quits, the input ends or the thread is interrupted. The
-   * terminal is restored on every way out.
+   * terminal is restored on every way out, an exception and SIGTERM among them.
    *
    * @param latest gives the newest board; asked several times a second from the drawing thread, so
    *     it must return at once
@@ -19,6 +23,74 @@ public final class Dashboard {
    * @throws NoTerminalException when standard input or output is no terminal
    */
   public static void run(Supplier<Board> latest, Desk desk, DashboardOptions options) {
-    throw new NoTerminalException("this build has no terminal yet");
+    PrintStream out = System.out;
+    PrintStream err = System.err;
+    Terminal terminal = Terminals.open(options.window());
+    // Anything printed while the screen is up would tear it.
+    PrintStream stray = new PrintStream(options.strayOutput(), true, StandardCharsets.UTF_8);
+    System.setOut(stray);
+    System.setErr(stray);
+    try {
+      runOn(terminal, latest, desk, options);
+    } finally {
+      System.setOut(out);
+      System.setErr(err);
+    }
+  }
+
+  /** The same on a terminal already open, which is closed at the end. */
+  static void runOn(
+      Terminal terminal, Supplier<Board> latest, Desk desk, DashboardOptions options) {
+    Thread hook = null;
+    try {
+      Session session = new Session(terminal, latest, desk, options);
+      if (terminal instanceof Console console) {
+        console.beforeLeaving(session::stopDrawing);
+      } else {
+        hook = hookFor(session, terminal);
+        Runtime.getRuntime().addShutdownHook(hook);
+      }
+      try {
+        session.run();
+      } finally {
+        giveBack(session, terminal);
+      }
+    } catch (IOException terminalGone) {
+      throw new NoTerminalException("the terminal went away: " + terminalGone.getMessage());
+    } finally {
+      forget(hook);
+    }
+  }
+
+  /** The Unix console brings its own hook; the others need one. */
+  private static Thread hookFor(Session session, Terminal terminal) {
+    return new Thread(() -> Patience.within("leaving", () -> giveBack(session, terminal)), "leave");
+  }
+
+  private static void giveBack(Session session, Terminal terminal) throws IOException {
+    try {
+      session.leave();
+    } finally {
+      close(terminal);
+    }
+  }
+
+  private static void close(Terminal terminal) throws IOException {
+    try {
+      terminal.close();
+    } catch (IllegalStateException ignored) {
+      // Already on the way down: the terminal library's own hook has restored it.
+    }
+  }
+
+  private static void forget(Thread hook) {
+    if (hook == null) {
+      return;
+    }
+    try {
+      Runtime.getRuntime().removeShutdownHook(hook);
+    } catch (IllegalStateException ignored) {
+      // Already on the way down: the hook is doing its work.
+    }
   }
 }

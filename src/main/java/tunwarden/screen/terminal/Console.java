@@ -1,0 +1,56 @@
+package tunwarden.screen.terminal;
+
+import com.googlecode.lanterna.TerminalSize;
+import com.googlecode.lanterna.terminal.ansi.UnixTerminal;
+import java.io.IOException;
+import java.io.InputStream;
+import java.io.OutputStream;
+import java.nio.charset.StandardCharsets;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
+
+/**
+ * A Unix terminal set up for the dashboard: Control-C, Control-Z, Control-backslash and Control-S
+ * are plain keys, the size is asked of the driver instead of the far end, and leaving waits for the
+ * drawing to stop but never for a terminal that takes no more output.
+ */
+final class Console extends UnixTerminal {
+  private static final Pattern ROWS_AND_COLUMNS = Pattern.compile("(\\d+)\\s+(\\d+)\\s*");
+
+  private volatile Runnable beforeLeaving = () -> {};
+
+  Console(InputStream in, OutputStream out) throws IOException {
+    super(in, out, StandardCharsets.UTF_8, CtrlCBehaviour.TRAP);
+    // Without these, Control-Z would leave a shell inside our screen, and Control-S would stop it.
+    runSTTYCommand("susp", "undef");
+    runSTTYCommand("quit", "undef");
+    runSTTYCommand("-ixon");
+  }
+
+  /** What must have stopped before the terminal is given back. */
+  void beforeLeaving(Runnable action) {
+    beforeLeaving = action;
+  }
+
+  @Override
+  protected TerminalSize findTerminalSize() throws IOException {
+    Matcher size = ROWS_AND_COLUMNS.matcher(runSTTYCommand("size"));
+    if (!size.matches()) {
+      return super.findTerminalSize();
+    }
+    int rows = Integer.parseInt(size.group(1));
+    int columns = Integer.parseInt(size.group(2));
+    return rows > 0 && columns > 0 ? new TerminalSize(columns, rows) : new TerminalSize(80, 24);
+  }
+
+  @Override
+  public void exitPrivateMode() {
+    beforeLeaving.run();
+    Patience.within("leaving the screen", () -> super.exitPrivateMode());
+  }
+
+  @Override
+  protected void restoreTerminalSettings() {
+    Patience.within("restoring the terminal", () -> super.restoreTerminalSettings());
+  }
+}

@@ -1,0 +1,203 @@
+package tunwarden.screen.terminal;
+
+import com.googlecode.lanterna.TerminalSize;
+import com.googlecode.lanterna.input.KeyStroke;
+import com.googlecode.lanterna.input.KeyType;
+import com.googlecode.lanterna.screen.Screen;
+import com.googlecode.lanterna.screen.TerminalScreen;
+import com.googlecode.lanterna.terminal.Terminal;
+import java.io.IOException;
+import java.util.concurrent.atomic.AtomicReference;
+import java.util.function.Supplier;
+import tunwarden.screen.model.Board;
+import tunwarden.screen.model.Desk;
+import tunwarden.screen.model.Key;
+import tunwarden.screen.model.Model;
+import tunwarden.screen.model.Request;
+import tunwarden.screen.model.Size;
+import tunwarden.screen.model.Turn;
+import tunwarden.screen.model.Update;
+import tunwarden.screen.view.Canvas;
+import tunwarden.screen.view.ScreenView;
+
+/**
+ * One run of the dashboard on a terminal. The caller's thread reads keys and updates the model; a
+ * thread of its own draws. The model goes from one to the other through one reference.
+ */
+final class Session {
+  private static final long DRAW_EVERY_MS = 200;
+  private static final long KEY_POLL_MS = 20;
+  private static final long JOIN_MS = 2_000;
+
+  private final Terminal terminal;
+  private final TerminalScreen screen;
+  private final Supplier<Board> latest;
+  private final Desk desk;
+  private final boolean bell;
+  private final AtomicReference<Model> model;
+  private final Object wake = new Object();
+  private final Thread drawing = new Thread(this::drawUntilOver, "screen");
+  private volatile boolean repaint;
+  private volatile boolean over;
+  private volatile RuntimeException failure;
+  private boolean woken;
+
+  Session(Terminal terminal, Supplier<Board> latest, Desk desk, DashboardOptions options)
+      throws IOException {
+    this.terminal = terminal;
+    this.screen = new TerminalScreen(terminal);
+    this.latest = latest;
+    this.desk = desk;
+    this.bell = options.bell();
+    Size size = size(screen.getTerminalSize());
+    this.model = new AtomicReference<>(Model.start(latest.get(), options.look(), size));
+    drawing.setDaemon(true);
+  }
+
+  /** Runs until the person leaves, input ends, the thread is interrupted or drawing fails. */
+  void run() throws IOException {
+    screen.startScreen();
+    screen.setCursorPosition(null);
+    drawing.start();
+    try {
+      readKeys();
+    } finally {
+      stopDrawing();
+    }
+    if (failure != null) {
+      throw failure;
+    }
+  }
+
+  /** Gives the terminal back; called once, on whatever way out. */
+  void leave() throws IOException {
+    stopDrawing();
+    screen.stopScreen(false);
+  }
+
+  /** Stops the drawing thread and waits for its last frame, but not for a stalled terminal. */
+  void stopDrawing() {
+    over = true;
+    wake();
+    if (Thread.currentThread() == drawing) {
+      return;
+    }
+    try {
+      drawing.join(JOIN_MS);
+    } catch (InterruptedException e) {
+      Thread.currentThread().interrupt();
+    }
+  }
+
+  private void readKeys() throws IOException {
+    try {
+      while (!over) {
+        KeyStroke stroke = screen.pollInput();
+        if (stroke == null) {
+          Thread.sleep(KEY_POLL_MS);
+        } else if (stroke.getKeyType() == KeyType.EOF) {
+          over = true;
+        } else {
+          press(Keys.of(stroke));
+        }
+      }
+    } catch (InterruptedException e) {
+      Thread.currentThread().interrupt();
+    }
+  }
+
+  private void press(Key key) {
+    if (key.is(Key.Kind.REPAINT)) {
+      repaint = true;
+    }
+    Turn turn = Update.key(model.get().withBoard(latest.get()), key);
+    Model next = turn.model();
+    for (Request request : turn.requests()) {
+      String said = request.of(desk);
+      next = said.isEmpty() ? next : next.withSaid(said);
+    }
+    model.set(next);
+    over |= next.over();
+    wake();
+  }
+
+  private void wake() {
+    synchronized (wake) {
+      woken = true;
+      wake.notifyAll();
+    }
+  }
+
+  private void drawUntilOver() {
+    Frames frames = new Frames(screen);
+    Chime chime = new Chime();
+    try {
+      while (!over) {
+        Board board = latest.get();
+        if (bell && chime.isDue(board)) {
+          terminal.bell();
+        }
+        draw(frames, board);
+        pause();
+      }
+    } catch (IOException terminalGone) {
+      over = true;
+    } catch (RuntimeException e) {
+      failure = e;
+      over = true;
+    }
+  }
+
+  private void draw(Frames frames, Board board) throws IOException {
+    TerminalSize resized = screen.doResizeIfNecessary();
+    boolean whole = resized != null || repaint;
+    repaint = false;
+    Size size = size(screen.getTerminalSize());
+    Model now = model.get().withBoard(board).withSize(size);
+    frames.show(now, whole);
+  }
+
+  /** Waits for the next beat or a key, whichever comes first. */
+  private void pause() {
+    synchronized (wake) {
+      try {
+        if (!woken) {
+          wake.wait(DRAW_EVERY_MS);
+        }
+        woken = false;
+      } catch (InterruptedException e) {
+        over = true;
+      }
+    }
+  }
+
+  private static Size size(TerminalSize size) {
+    return new Size(size.getColumns(), size.getRows());
+  }
+
+  /** Draws a model unless it would look as the last one did. */
+  private static final class Frames {
+    private final Screen screen;
+    private final Painter painter;
+    private Model shown;
+
+    Frames(Screen screen) {
+      this.screen = screen;
+      this.painter = new Painter(screen);
+    }
+
+    void show(Model model, boolean whole) throws IOException {
+      if (!whole && shown != null && SameLook.of(shown, model)) {
+        return;
+      }
+      Canvas canvas = ScreenView.draw(model);
+      if (whole) {
+        painter.forget();
+      }
+      if (painter.paint(canvas, model.look().theme())) {
+        screen.refresh(whole ? Screen.RefreshType.COMPLETE : Screen.RefreshType.DELTA);
+      }
+      shown = model;
+    }
+  }
+}
