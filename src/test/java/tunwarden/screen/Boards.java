@@ -149,7 +149,9 @@ public final class Boards {
         now.minusSeconds(60),
         Optional.empty(),
         "0.06 bar left to the earliest lift, 4 % of the setting.",
-        "Cool the vessel or vent it; do not touch the relief valve.");
+        "Cool the vessel or vent it; do not touch the relief valve.",
+        "",
+        false);
   }
 
   /** A vessel with a relief setting of 1.5 bar. */
