@@ -37,7 +37,7 @@ public final class Main implements Runnable {
   static final String NAME = "tunwarden";
 
   /** Every command, in the order the help lists them; add a class here to add a command. */
-  private static final List<Class<?>> COMMANDS = List.of();
+  private static final List<Class<?>> COMMANDS = List.of(RehearseCommand.class);
 
   private static final int HELP_WIDTH = 90;
 

@@ -1,7 +1,11 @@
 package tunwarden.replay;
 
+import tunwarden.units.BadInputException;
+
 /** A log that cannot be used; the message is one sentence that names file, line and field. */
-public final class BadLogException extends RuntimeException {
+public final class BadLogException extends BadInputException {
+  private static final long serialVersionUID = 1;
+
   private final String file;
   private final long line;
   private final String field;
