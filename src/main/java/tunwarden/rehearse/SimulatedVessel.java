@@ -24,7 +24,7 @@ public final class SimulatedVessel {
   /**
    * Gas cools while it expands: ideal gas, reversible, k of CO2 (see {@link IsentropicOrifice}).
    */
-  private static final double EXPANSION = 0.3 / 1.3;
+  private static final double EXPANSION = 0.3;
 
   private static final double REGULATOR_SHARE_PER_PA_S = 1e-6;
 
