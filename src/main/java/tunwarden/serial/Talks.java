@@ -7,8 +7,7 @@ final class Talks {
   static Talk of(PortPlan plan, Desk desk) {
     return switch (plan.speaks()) {
       case TEXT_LINES -> new StreamTalk(plan, desk);
-      case TEXT_QUERY, MODBUS_RTU ->
-          throw new UnsupportedOperationException(plan.speaks().word() + " is not spoken yet");
+      case TEXT_QUERY, MODBUS_RTU -> new AskTalk(plan, desk);
     };
   }
 }

@@ -11,10 +11,12 @@ final class Eventually {
 
   static void within(Duration limit, String what, BooleanSupplier holds) {
     long end = System.nanoTime() + limit.toNanos();
-    while (!holds.getAsBoolean() && System.nanoTime() < end) {
+    boolean held = holds.getAsBoolean();
+    while (!held && System.nanoTime() < end) {
       sleep(5);
+      held = holds.getAsBoolean();
     }
-    assertTrue(holds.getAsBoolean(), () -> "not within " + limit + ": " + what);
+    assertTrue(held, () -> "not within " + limit + ": " + what);
   }
 
   static void sleep(long ms) {

@@ -18,7 +18,17 @@ import tunwarden.wire.profile.Profile;
  */
 public final class Profiles {
   /** Names of the profiles that come with the program. */
-  public static final List<String> SHIPPED = List.of("text-line");
+  public static final List<String> SHIPPED =
+      List.of(
+          "text-line",
+          "text-query",
+          "text-query-addressed",
+          "modbus-rtu-float",
+          "modbus-rtu-scaled",
+          "current-loop",
+          "pt100",
+          "checksummed-line",
+          "checksummed-line-crc");
 
   private static final String FOLDER = "devices";
   private static final String ENDING = ".json";

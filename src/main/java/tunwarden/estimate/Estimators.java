@@ -1,0 +1,11 @@
+package tunwarden.estimate;
+
+/** Where callers get their estimator from. */
+public final class Estimators {
+  private Estimators() {}
+
+  /** The estimator the program uses; stateless and safe to share. */
+  public static Estimator standard() {
+    return new PlainEstimator();
+  }
+}

@@ -1,0 +1,60 @@
+package tunwarden.estimate.bank;
+
+/**
+ * The bank at one time: the filters, packed, and their weights. Immutable by agreement: nobody
+ * writes to the arrays after construction.
+ */
+public final class Bank {
+  final double[] filters;
+  final double[] weights;
+  final Setting setting;
+
+  /**
+   * Circumstances the filters refer to.
+   *
+   * @param kelvin liquid temperature
+   * @param paAbsolute total pressure, for the slopes of gas and solubility
+   * @param fillKelvin temperature at which the fill was stated
+   * @param unmixedS time since the modes last exchanged weight, s
+   */
+  public record Setting(double kelvin, double paAbsolute, double fillKelvin, double unmixedS) {}
+
+  Bank(double[] filters, double[] weights, Setting setting) {
+    this.filters = filters;
+    this.weights = weights;
+    this.setting = setting;
+  }
+
+  public Setting setting() {
+    return setting;
+  }
+
+  double mean(int filter, int state) {
+    return filters[filter * Gaussian.STRIDE + state];
+  }
+
+  double variance(int filter, int state) {
+    int packed = Gaussian.STATES + state * (state + 3) / 2;
+    return filters[filter * Gaussian.STRIDE + packed];
+  }
+
+  /** Total weight of one way of connection, 0..1. */
+  public double modeWeight(int mode) {
+    double sum = 0;
+    for (int f = mode; f < Grid.FILTERS; f += Grid.MODES) {
+      sum += weights[f];
+    }
+    return sum;
+  }
+
+  static double[] normalized(double[] weights) {
+    double sum = 0;
+    for (double weight : weights) {
+      sum += weight;
+    }
+    for (int i = 0; i < weights.length; i++) {
+      weights[i] /= sum;
+    }
+    return weights;
+  }
+}

@@ -1,0 +1,155 @@
+package tunwarden.estimate.bank;
+
+/**
+ * Working copy of one filter: mean and covariance over the eight hidden quantities. Masses are kg
+ * per m3 of liquid; air is counted as the mass of CO2 with the same number of molecules.
+ */
+final class Gaussian {
+  /** CO2 in the headspace. */
+  static final int GAS = 0;
+
+  /** CO2 in the liquid. */
+  static final int LIQUID = 1;
+
+  /**
+   * CO2 being made in the liquid (positive) or leaking from the headspace (negative), per second.
+   */
+  static final int SOURCE = 2;
+
+  /** Logarithm of true over described headspace. */
+  static final int FILL = 3;
+
+  /** Logarithm of true over assumed solubility. */
+  static final int RELATION = 4;
+
+  /** Constant error of gauge and barometer together, Pa. */
+  static final int BIAS = 5;
+
+  /** Headspace gas temperature over liquid temperature, minus one. */
+  static final int HEAT = 6;
+
+  /** Air and other gas that does not dissolve. */
+  static final int AIR = 7;
+
+  static final int STATES = 8;
+
+  /** Doubles a packed filter takes: means, then the lower triangle. */
+  static final int STRIDE = STATES + STATES * (STATES + 1) / 2;
+
+  final double[] mean = new double[STATES];
+  final double[] cov = new double[STATES * STATES];
+  private final double[] first = new double[STATES];
+  private final double[] second = new double[STATES];
+
+  void load(double[] from, int offset) {
+    System.arraycopy(from, offset, mean, 0, STATES);
+    int k = offset + STATES;
+    for (int i = 0; i < STATES; i++) {
+      for (int j = 0; j <= i; j++) {
+        double value = from[k++];
+        cov[i * STATES + j] = value;
+        cov[j * STATES + i] = value;
+      }
+    }
+  }
+
+  void store(double[] to, int offset) {
+    System.arraycopy(mean, 0, to, offset, STATES);
+    int k = offset + STATES;
+    for (int i = 0; i < STATES; i++) {
+      for (int j = 0; j <= i; j++) {
+        to[k++] = cov[i * STATES + j];
+      }
+    }
+  }
+
+  void clear() {
+    java.util.Arrays.fill(mean, 0);
+    java.util.Arrays.fill(cov, 0);
+  }
+
+  double variance(int i) {
+    return cov[i * STATES + i];
+  }
+
+  void addVariance(int i, double value) {
+    cov[i * STATES + i] += value;
+  }
+
+  /** Multiplies the spread of one quantity; the mean is left alone. */
+  void scaleSpread(int i, double factor) {
+    for (int j = 0; j < STATES; j++) {
+      cov[i * STATES + j] *= factor;
+    }
+    for (int j = 0; j < STATES; j++) {
+      cov[j * STATES + i] *= factor;
+    }
+  }
+
+  /** Fixes one quantity at a value. */
+  void pin(int i, double value) {
+    mean[i] = value;
+    scaleSpread(i, 0);
+  }
+
+  /** Replaces the spreads of gas and liquid by those of two linear combinations of everything. */
+  void mixRows(double[] gasRow, double[] liquidRow) {
+    for (int j = 0; j < STATES; j++) {
+      double u = 0;
+      double v = 0;
+      for (int z = 0; z < STATES; z++) {
+        double p = cov[z * STATES + j];
+        u += gasRow[z] * p;
+        v += liquidRow[z] * p;
+      }
+      first[j] = u;
+      second[j] = v;
+    }
+    double gg = 0;
+    double gl = 0;
+    double ll = 0;
+    for (int z = 0; z < STATES; z++) {
+      gg += gasRow[z] * first[z];
+      gl += liquidRow[z] * first[z];
+      ll += liquidRow[z] * second[z];
+    }
+    for (int j = LIQUID + 1; j < STATES; j++) {
+      cov[j] = first[j];
+      cov[j * STATES] = first[j];
+      cov[STATES + j] = second[j];
+      cov[j * STATES + LIQUID] = second[j];
+    }
+    cov[0] = gg;
+    cov[1] = gl;
+    cov[STATES] = gl;
+    cov[STATES + 1] = ll;
+  }
+
+  /** Variance of a linear combination. */
+  double varianceOf(double[] row) {
+    double sum = 0;
+    for (int i = 0; i < STATES; i++) {
+      double u = 0;
+      for (int j = 0; j < STATES; j++) {
+        u += cov[i * STATES + j] * row[j];
+      }
+      first[i] = u;
+      sum += u * row[i];
+    }
+    return sum;
+  }
+
+  /** Conditions on a measurement of a linear combination; {@code total} is its whole variance. */
+  void condition(double[] row, double innovation, double total) {
+    varianceOf(row);
+    for (int i = 0; i < STATES; i++) {
+      double gain = first[i] / total;
+      mean[i] += gain * innovation;
+      for (int j = 0; j <= i; j++) {
+        double value = cov[i * STATES + j] - gain * first[j];
+        cov[i * STATES + j] = value;
+        cov[j * STATES + i] = value;
+      }
+    }
+  }
+}

@@ -1,0 +1,2 @@
+/** Gates every reading passes before it may move a belief; each is written "accept if at most". */
+package tunwarden.estimate.gate;
