@@ -1,11 +1,14 @@
 package tunwarden.forecast;
 
 import java.util.ArrayList;
+import java.util.EnumSet;
 import java.util.List;
+import java.util.Set;
 import java.util.function.Function;
 import java.util.function.ToDoubleFunction;
 import tunwarden.estimate.Estimate.Spread;
 import tunwarden.physics.gas.Gas;
+import tunwarden.physics.liquid.LiquidKind;
 import tunwarden.physics.solubility.LiquidSolubility;
 import tunwarden.vessel.Accuracy;
 
@@ -21,6 +24,13 @@ import tunwarden.vessel.Accuracy;
  */
 public final class Ensemble {
   private static final double TILT_SHARE = 0.5;
+
+  /** A trade relation is linear in pressure, the gas itself is not: 0.7 % per bar apart. */
+  private static final double CURVE_PER_PA = 0.007 / 1e5;
+
+  private static final Set<LiquidKind> BY_TRADE_RELATION =
+      EnumSet.of(LiquidKind.BEER, LiquidKind.WINE, LiquidKind.SPARKLING_WINE, LiquidKind.CIDER);
+
   private static final double FULLEST = 0.999;
   private static final List<Unknown> IMPLYING =
       List.of(
@@ -96,6 +106,8 @@ public final class Ensemble {
     u95[Unknown.AIR.ordinal()] = present.airPaAbsolute().u95();
     u95[Unknown.RELATION.ordinal()] = relation;
     u95[Unknown.RELATION_SLOPE.ordinal()] = TILT_SHARE * relation;
+    boolean trade = BY_TRADE_RELATION.contains(present.vessel().liquid().kind());
+    u95[Unknown.RELATION_CURVE.ordinal()] = trade ? CURVE_PER_PA : 0;
     u95[Unknown.VENT_COOLING.ordinal()] = 1;
     return u95;
   }
@@ -112,6 +124,7 @@ public final class Ensemble {
             present.vessel().site().ambientPaAbsolute() + (moved == Unknown.ATMOSPHERE ? by : 0),
             1 + (moved == Unknown.RELATION ? by : 0),
             moved == Unknown.RELATION_SLOPE ? by : 0,
+            moved == Unknown.RELATION_CURVE ? by : 0,
             moved == Unknown.VENT_COOLING ? Math.max(0, by) : 0);
     double gauge = present.pressurePaGauge() + (moved == Unknown.GAUGE ? by : 0);
     double air = present.airPaAbsolute().value() + (moved == Unknown.AIR ? by : 0);

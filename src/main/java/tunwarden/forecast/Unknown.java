@@ -16,6 +16,8 @@ enum Unknown {
   RELATION,
   /** How the relation changes with temperature, relative per 20 K. */
   RELATION_SLOPE,
+  /** How the relation changes with pressure, relative per pascal. */
+  RELATION_CURVE,
   /** Dissolved gas, or its distance from equilibrium, kg/m³. */
   DISSOLVED,
   /** Cooling of the headspace gas while it is let out: 0 isothermal, 1 adiabatic. */

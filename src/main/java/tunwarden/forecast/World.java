@@ -5,6 +5,7 @@ import tunwarden.physics.closed.ClosedVessel;
 import tunwarden.physics.gas.DryBlend;
 import tunwarden.physics.gas.Gas;
 import tunwarden.physics.gas.GasMix;
+import tunwarden.physics.solubility.GasLine;
 
 /**
  * One vessel with a definite value for everything that is uncertain: moles of each gas in headspace
@@ -24,6 +25,7 @@ public final class World {
   private final Setting setting;
   private final ClosedVessel vessel;
   private final ClosedSolver solver;
+  private final GasLine co2;
   private final double[] partialPa;
   private final double[] headMol;
   private final double[] liquidMol;
@@ -37,6 +39,7 @@ public final class World {
    * @param ambientPa atmosphere, Pa absolute
    * @param relation true solubility over the relation's
    * @param tilt how that factor changes over {@link #TILT_SPAN_K}
+   * @param curve how it changes with pressure, 1/Pa
    * @param ventCooling 0 isothermal, 1 adiabatic
    */
   record Setting(
@@ -46,6 +49,7 @@ public final class World {
       double ambientPa,
       double relation,
       double tilt,
+      double curve,
       double ventCooling) {}
 
   private World(
@@ -53,6 +57,7 @@ public final class World {
     this.setting = setting;
     this.vessel = vessel;
     this.solver = vessel.solver();
+    this.co2 = vessel.solubility().line(Gas.CO2).prepareAt(setting.temperatureK);
     this.partialPa = partialPa;
     this.headMol = headMol;
     this.liquidMol = liquid;
@@ -118,6 +123,11 @@ public final class World {
     return vessel.headspaceM3(setting.temperatureK);
   }
 
+  /** Cooling of gas that is let out: 0 isothermal, 1 adiabatic. */
+  public double ventCooling() {
+    return setting.ventCooling;
+  }
+
   /** Temperature now, K. */
   public double temperatureK() {
     return setting.temperatureK;
@@ -133,9 +143,9 @@ public final class World {
     return liquidMol[CO2] * Gas.CO2.molarMass() / liquidM3();
   }
 
-  /** Headspace gas by species, mol, in the order of {@link Gas}; a copy. */
-  public double[] headspaceMol() {
-    return headMol.clone();
+  /** Gas of one kind in the headspace, mol. */
+  public double headspaceMol(Gas gas) {
+    return headMol[gas.ordinal()];
   }
 
   /** Composition of the headspace, dry. */
@@ -210,8 +220,8 @@ public final class World {
 
   private double equilibriumKgPerM3(double paAbsolute, double co2Share) {
     double partial = Math.max(0, paAbsolute - vapourPa(setting.temperatureK)) * co2Share;
-    return setting.relation
-        * vessel.solubility().dissolvedKgPerM3(Gas.CO2, partial, paAbsolute, setting.temperatureK);
+    double bent = 1 + setting.curve * (paAbsolute - setting.present.pressurePaAbsolute());
+    return setting.relation * bent * co2.dissolvedKgPerM3(partial, paAbsolute);
   }
 
   /** Share of CO2 in the dry headspace, mol/mol. */
@@ -236,13 +246,12 @@ public final class World {
    * @return Pa gauge
    */
   public double holdPaGauge(double kgPerM3, double temperatureK) {
-    double vapour = vapourPa(temperatureK);
+    GasLine line = vessel.solubility().line(Gas.CO2).prepareAt(temperatureK);
+    double wanted = kgPerM3 / relationAt(temperatureK);
     double share = co2Share();
     double total = setting.ambientPa;
     for (int i = 0; i < MOST_STEPS; i++) {
-      double wanted = kgPerM3 / relationAt(temperatureK);
-      double partial = vessel.solubility().partialPa(Gas.CO2, wanted, total, temperatureK);
-      double next = partial / share + vapour;
+      double next = line.partialPa(wanted, total) / share + line.vapourPa();
       if (Math.abs(next - total) <= CLOSE_PA) {
         return next - setting.ambientPa;
       }
