@@ -5,6 +5,7 @@ import tunwarden.physics.gas.DryBlend;
 import tunwarden.physics.gas.Gas;
 import tunwarden.physics.liquid.Kell1975;
 import tunwarden.physics.solubility.GasLine;
+import tunwarden.physics.solubility.PureWater;
 
 /**
  * Solves a closed vessel again and again in one workspace: no allocation after the first use of
@@ -18,21 +19,25 @@ import tunwarden.physics.solubility.GasLine;
 public final class ClosedSolver {
   private static final int GASES = Gas.all().size();
   private static final int MOST_STEPS = 80;
-  private static final double CLOSE_ENOUGH = 1e-12;
+  private static final double CLOSE_ENOUGH = 1e-10;
   private static final double START_PA = 2e5;
+  private static final double[] MOLAR_MASS =
+      Gas.all().stream().mapToDouble(Gas::molarMass).toArray();
 
   private final ClosedVessel vessel;
   private final GasLine[] lines = new GasLine[GASES];
+  private final PureWater water = new PureWater();
   private final DryBlend blend = new DryBlend();
   private final int[] present = new int[GASES];
   private final double[] partial = new double[GASES];
-  private final double[] perPa = new double[GASES];
   private int count;
   private double temperature = Double.NaN;
+  private int prepared;
   private double vapour;
   private double liquid;
   private double headspace;
   private double total;
+  private double moved;
   private int steps;
 
   ClosedSolver(ClosedVessel vessel) {
@@ -46,18 +51,18 @@ public final class ClosedSolver {
     double before = Double.NaN;
     double stepBefore = Double.NaN;
     for (steps = 1; steps <= MOST_STEPS; steps++) {
-      double plain = pass(mol, trial);
-      double step = plain - trial;
-      if (Math.abs(step) <= CLOSE_ENOUGH * plain) {
+      pass(mol, trial);
+      double step = total - trial;
+      if (moved <= CLOSE_ENOUGH * total) {
         break;
       }
       double next = trial - step * (trial - before) / (step - stepBefore);
+      boolean sound = Math.abs(next - total) < Math.abs(step) / 2 && next > vapour;
       before = trial;
       stepBefore = step;
-      boolean sound = Math.abs(next - plain) < Math.abs(step) / 2 && next > vapour;
-      trial = sound ? next : plain;
+      trial = sound ? next : total;
+      scale((trial - vapour) / (total - vapour));
     }
-    total = trial;
     if (headspace <= 0 && liquid > 0) {
       double squeeze = (liquid - vessel.volumeM3()) / liquid;
       total += squeeze / Kell1975.compressibilityPerPa(temperatureK);
@@ -128,28 +133,32 @@ public final class ClosedSolver {
   }
 
   private void prepare(double[] amount, double temperatureK) {
-    boolean moved = temperatureK != temperature;
+    if (temperatureK != temperature) {
+      temperature = temperatureK;
+      prepared = 0;
+      vapour = water.prepareAt(temperatureK).vapourPa();
+      liquid = vessel.liquidM3(temperatureK);
+      headspace = Math.max(0, vessel.volumeM3() - liquid);
+    }
     count = 0;
     for (int i = 0; i < GASES; i++) {
       partial[i] = 0;
       if (amount[i] > 0) {
         present[count++] = i;
-        boolean made = lines[i] == null;
-        if (made) {
-          lines[i] = vessel.solubility().line(Gas.all().get(i));
-        }
-        if (made || lines[i].temperatureK() != temperatureK) {
-          lines[i].prepareAt(temperatureK);
-        }
+        prepareLine(i);
       }
     }
-    if (moved) {
-      temperature = temperatureK;
-      vapour = vessel.solubility().vapourPressurePa(temperatureK);
-      liquid = vessel.liquidM3(temperatureK);
-      headspace = Math.max(0, vessel.volumeM3() - liquid);
-    }
     blend.prepareAt(temperatureK, amount);
+  }
+
+  private void prepareLine(int i) {
+    if ((prepared & 1 << i) == 0) {
+      prepared |= 1 << i;
+      if (lines[i] == null) {
+        lines[i] = vessel.solubility().line(Gas.all().get(i));
+      }
+      lines[i].prepareAt(water);
+    }
   }
 
   private double firstTrial(double[] mol) {
@@ -157,29 +166,37 @@ public final class ClosedSolver {
     double gasPhase = headspace * blend.molPerM3Pa(partial);
     for (int k = 0; k < count; k++) {
       int i = present[k];
-      perPa[i] = dissolvedMol(i, START_PA / 2, START_PA) / (START_PA / 2);
-      partial[i] = mol[i] / (gasPhase + liquid * perPa[i]);
+      double perPa = dissolvedMol(i, START_PA / 2, START_PA) / (START_PA / 2);
+      partial[i] = mol[i] / (gasPhase + liquid * perPa);
       sum += partial[i];
     }
     return sum;
   }
 
-  private double pass(double[] mol, double trial) {
+  /** Every gas's balance at a trial pressure; leaves the total and how far the shares moved. */
+  private void pass(double[] mol, double trial) {
     double sum = vapour;
+    double change = 0;
     double gasPhase = headspace * blend.molPerM3Pa(partial);
     for (int k = 0; k < count; k++) {
       int i = present[k];
-      perPa[i] = dissolvedMol(i, partial[i], trial) / partial[i];
-    }
-    for (int k = 0; k < count; k++) {
-      int i = present[k];
-      partial[i] = mol[i] / (gasPhase + liquid * perPa[i]);
+      double old = partial[i];
+      double perPa = gasPhase + liquid * dissolvedMol(i, old, trial) / old;
+      partial[i] = mol[i] / perPa;
       sum += partial[i];
+      change += Math.abs(partial[i] - old);
     }
-    return sum;
+    total = sum;
+    moved = change;
+  }
+
+  private void scale(double factor) {
+    for (int k = 0; k < count; k++) {
+      partial[present[k]] *= factor;
+    }
   }
 
   private double dissolvedMol(int i, double partialPa, double totalPa) {
-    return lines[i].dissolvedKgPerM3(partialPa, totalPa) / Gas.all().get(i).molarMass();
+    return lines[i].dissolvedKgPerM3(partialPa, totalPa) / MOLAR_MASS[i];
   }
 }

@@ -2,6 +2,7 @@ package tunwarden.physics.closed;
 
 import tunwarden.physics.gas.Gas;
 import tunwarden.physics.gas.GasMix;
+import tunwarden.physics.gas.HeadspaceShares;
 import tunwarden.physics.liquid.Liquid;
 import tunwarden.physics.liquid.LiquidDensity;
 import tunwarden.physics.solubility.LiquidSolubility;
@@ -40,6 +41,19 @@ public final class ClosedVessel {
     this.density = LiquidDensity.of(liquid);
     this.fillDensity = density.kgPerM3(fillTemperatureK);
     this.solubility = LiquidSolubility.of(liquid);
+  }
+
+  private ClosedVessel(ClosedVessel other, LiquidSolubility solubility) {
+    this.volumeM3 = other.volumeM3;
+    this.fillM3 = other.fillM3;
+    this.density = other.density;
+    this.fillDensity = other.fillDensity;
+    this.solubility = solubility;
+  }
+
+  /** The same vessel with another solubility, to try what an error of the relation would do. */
+  public ClosedVessel withSolubility(LiquidSolubility other) {
+    return new ClosedVessel(this, other);
   }
 
   /** Gross volume, m³. */
@@ -95,11 +109,9 @@ public final class ClosedVessel {
   /** Partial pressures, Pa, of the dry gases in a headspace as {@link #inventoryAt} splits it. */
   public void partials(
       double totalPaAbsolute, double temperatureK, GasMix gas, double airPaAbsolute, double[] out) {
-    double dry = Math.max(0, totalPaAbsolute - solubility.vapourPressurePa(temperatureK));
-    double air = Math.max(0, Math.min(dry, airPaAbsolute));
+    double dry = totalPaAbsolute - solubility.vapourPressurePa(temperatureK);
     for (int i = 0; i < out.length; i++) {
-      Gas each = Gas.all().get(i);
-      out[i] = (dry - air) * gas.fraction(each) + air * GasMix.AIR.fraction(each);
+      out[i] = HeadspaceShares.partialPa(Gas.all().get(i), gas, dry, airPaAbsolute);
     }
   }
 }

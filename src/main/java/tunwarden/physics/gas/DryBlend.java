@@ -12,7 +12,9 @@ public final class DryBlend {
   private static final int CO2 = Gas.CO2.ordinal();
 
   private final double[] second = new double[GASES];
-  private final double[] excess = new double[GASES];
+  private final double[] pair = new double[GASES];
+  private final int[] present = new int[GASES];
+  private int count;
   private double rt;
   private double third;
   private double preparedK = Double.NaN;
@@ -26,34 +28,44 @@ public final class DryBlend {
       rt = Constants.GAS_CONSTANT * temperatureK;
       third = Weiss1974Virial.third(temperatureK);
     }
+    count = 0;
     for (int i = 0; i < GASES; i++) {
-      if (amount[i] > 0 && (preparedGases & 1 << i) == 0) {
-        Gas gas = Gas.all().get(i);
-        second[i] = RealGas.second(gas, temperatureK);
-        excess[i] = RealGas.excessWithCo2(gas, temperatureK);
-        preparedGases |= 1 << i;
+      if (amount[i] > 0) {
+        present[count++] = i;
+        prepareGas(i);
       }
     }
     return this;
   }
 
-  /** Compressibility at these partial pressures, Pa. */
+  private void prepareGas(int i) {
+    if ((preparedGases & 1 << i) == 0) {
+      Gas gas = Gas.all().get(i);
+      second[i] = RealGas.second(gas, preparedK);
+      pair[i] = 2 * RealGas.excessWithCo2(gas, preparedK);
+      preparedGases |= 1 << i;
+    }
+  }
+
+  /** Compressibility at these partial pressures, Pa, of the gases prepared for. */
   public double z(double[] partialPa) {
     double dry = 0;
     double own = 0;
     double pairs = 0;
-    for (int i = 0; i < GASES; i++) {
+    for (int k = 0; k < count; k++) {
+      int i = present[k];
       double p = partialPa[i];
       dry += p;
       own += p * second[i];
-      pairs += p * excess[i];
+      pairs += p * pair[i];
     }
     if (dry <= 0) {
       return 1;
     }
-    double co2 = partialPa[CO2] / dry;
+    double perDry = 1 / dry;
+    double co2 = partialPa[CO2] * perDry;
     double density = Math.min(dry, RealGas.SERIES_LIMIT_PA) / rt;
-    double blend = (own + 2 * co2 * pairs) / dry;
+    double blend = (own + co2 * pairs) * perDry;
     return 1 + density * (blend + density * co2 * co2 * co2 * third);
   }
 

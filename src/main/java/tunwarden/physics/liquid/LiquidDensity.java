@@ -8,12 +8,15 @@ import tunwarden.physics.Correlation;
  * and pressure are left out (0.005 %/bar); salts are not counted. Immutable, does not allocate.
  */
 public final class LiquidDensity {
-  private final double ethanolMassFraction;
-  private final double plato;
+  private final boolean alcoholic;
+  private final double[] ethanolWater;
+  private final SugarWater sugarWater;
 
   private LiquidDensity(Makeup makeup) {
-    this.ethanolMassFraction = OimlR22.massFraction(makeup.alcoholByVolume());
-    this.plato = makeup.solidsPlato();
+    double ethanol = OimlR22.massFraction(makeup.alcoholByVolume());
+    this.alcoholic = ethanol > 0;
+    this.ethanolWater = OimlR22.mixture(ethanol);
+    this.sugarWater = SugarWater.ofPlato(makeup.solidsPlato());
   }
 
   /** The density of a liquid, with the standard drink of its kind where nothing is stated. */
@@ -23,18 +26,15 @@ public final class LiquidDensity {
 
   /** kg/m³ at one atmosphere. */
   public double kgPerM3(double temperatureK) {
-    double sugarWater = SugarWater.kgPerM3(plato, temperatureK);
-    if (ethanolMassFraction == 0) {
-      return sugarWater;
-    }
-    double ethanolWater = OimlR22.kgPerM3(ethanolMassFraction, temperatureK);
-    return ethanolWater * sugarWater / Kell1975.kgPerM3(temperatureK);
+    double water = Kell1975.kgPerM3(temperatureK);
+    double overWater = sugarWater.overWater(water, temperatureK);
+    return overWater * (alcoholic ? OimlR22.kgPerM3(ethanolWater, temperatureK) : water);
   }
 
   /** The correlations behind it. */
   public List<Correlation> correlations() {
-    return ethanolMassFraction == 0
-        ? List.of(Kell1975.ABOUT, SugarWater.ABOUT)
-        : List.of(Kell1975.ABOUT, SugarWater.ABOUT, OimlR22.ABOUT);
+    return alcoholic
+        ? List.of(Kell1975.ABOUT, SugarWater.ABOUT, OimlR22.ABOUT)
+        : List.of(Kell1975.ABOUT, SugarWater.ABOUT);
   }
 }

@@ -19,6 +19,7 @@ public final class OimlR22 {
   public static final double REFERENCE_K = 20 + Constants.ZERO_CELSIUS_K;
 
   private static final double MOST_K = 40 + Constants.ZERO_CELSIUS_K;
+  private static final double WATER_AT_MOST = Kell1975.kgPerM3(MOST_K);
   private static final double PURE_ETHANOL = 789.239;
 
   private static final double[] A = {
@@ -79,18 +80,29 @@ public final class OimlR22 {
 
   /** kg/m³ of a mixture with the given mass fraction of ethanol. */
   public static double kgPerM3(double massFraction, double temperatureK) {
-    if (temperatureK > MOST_K) {
-      double water = Kell1975.kgPerM3(temperatureK) / Kell1975.kgPerM3(MOST_K);
-      return kgPerM3(massFraction, MOST_K) * water;
+    return kgPerM3(mixture(massFraction), temperatureK);
+  }
+
+  /**
+   * The formula gathered for one mixture as a polynomial in the temperature above 20 °C, for code
+   * that evaluates often.
+   */
+  static double[] mixture(double massFraction) {
+    double[] gathered = B.clone();
+    gathered[0] = polynomial(A, massFraction);
+    for (int i = 0; i < C.length; i++) {
+      gathered[i + 1] += polynomial(C[i], massFraction);
     }
-    double t = temperatureK - REFERENCE_K;
-    double sum = polynomial(A, massFraction) + polynomial(B, t);
-    double power = 1;
-    for (double[] row : C) {
-      power *= t;
-      sum += power * polynomial(row, massFraction);
+    return gathered;
+  }
+
+  /** kg/m³ of a gathered mixture. */
+  static double kgPerM3(double[] mixture, double temperatureK) {
+    if (temperatureK <= MOST_K) {
+      return polynomial(mixture, temperatureK - REFERENCE_K);
     }
-    return sum;
+    double atMost = polynomial(mixture, MOST_K - REFERENCE_K);
+    return atMost * Kell1975.kgPerM3(temperatureK) / WATER_AT_MOST;
   }
 
   /** Mass fraction of ethanol of a mixture with the given share by volume at 20 °C. */

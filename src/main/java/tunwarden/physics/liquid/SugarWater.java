@@ -25,19 +25,30 @@ public final class SugarWater {
   private static final double SUGAR_EXPANSION_M3_PER_KG_K = 3.4e-7;
   private static final double LEAST_PLATO = 1e-9;
 
-  private SugarWater() {}
+  private final double share;
+  private final double m3PerKgAt20C;
 
-  /** kg/m³ of sugar water of the given strength, at one atmosphere. */
-  public static double kgPerM3(double plato, double temperatureK) {
-    double water = Kell1975.kgPerM3(temperatureK);
-    if (plato < LEAST_PLATO) {
-      return water;
-    }
-    double share = plato / 100;
+  private SugarWater(double plato) {
+    share = Math.max(0, plato) / 100;
     double at20 = WATER_AT_20C * gravityAt20C(plato);
-    double sugarAt20 = (1 / at20 - (1 - share) / WATER_AT_20C) / share;
-    double sugar = sugarAt20 + SUGAR_EXPANSION_M3_PER_KG_K * (temperatureK - REFERENCE_K);
-    return 1 / ((1 - share) / water + share * sugar);
+    m3PerKgAt20C = plato < LEAST_PLATO ? 0 : (1 / at20 - (1 - share) / WATER_AT_20C) / share;
+  }
+
+  /** Sugar water of the given strength. */
+  public static SugarWater ofPlato(double plato) {
+    return new SugarWater(plato);
+  }
+
+  /** kg/m³ at one atmosphere. */
+  public double kgPerM3(double temperatureK) {
+    double water = Kell1975.kgPerM3(temperatureK);
+    return water * overWater(water, temperatureK);
+  }
+
+  /** Density over that of water, given water's at the same temperature, kg/m³. */
+  double overWater(double waterKgPerM3, double temperatureK) {
+    double sugar = m3PerKgAt20C + SUGAR_EXPANSION_M3_PER_KG_K * (temperatureK - REFERENCE_K);
+    return 1 / (1 - share + share * sugar * waterKgPerM3);
   }
 
   /** Specific gravity 20/20 °C. */

@@ -23,7 +23,7 @@ final class Drink {
   private final boolean composed;
   private final Map<String, Double> salts;
   private final TradeRelation relation;
-  private final double[] sugarFactor = new double[Gas.all().size()];
+  private final double[] constantFactor = new double[Gas.all().size()];
 
   private Drink(Liquid liquid, TradeRelation relation) {
     this.kind = liquid.kind();
@@ -33,11 +33,26 @@ final class Drink {
     this.relation = relation;
     for (Gas gas : Gas.all()) {
       boolean inRelation = gas == Gas.CO2 && relation != null;
-      sugarFactor[gas.ordinal()] = inRelation ? 1 : Composition.sugar(gas, makeup.sugarKgPerM3());
+      constantFactor[gas.ordinal()] =
+          inRelation ? 1 : Composition.sugar(gas, makeup.sugarKgPerM3());
     }
     if (!salts.isEmpty()) {
       WeisenbergerSchumpe1996.factor(Gas.CO2, salts, REFERENCE_K); // refuses an unknown salt
     }
+  }
+
+  private Drink(Drink other, double co2Factor) {
+    this.kind = other.kind;
+    this.makeup = other.makeup;
+    this.composed = other.composed;
+    this.salts = other.salts;
+    this.relation = other.relation;
+    System.arraycopy(other.constantFactor, 0, constantFactor, 0, constantFactor.length);
+    constantFactor[Gas.CO2.ordinal()] *= co2Factor;
+  }
+
+  Drink scaled(double co2Factor) {
+    return new Drink(this, co2Factor);
   }
 
   static Drink of(Liquid liquid) {
@@ -61,7 +76,7 @@ final class Drink {
 
   /** What multiplies water's value, or the relation's. */
   double factor(Gas gas, double temperatureK) {
-    double factor = sugarFactor[gas.ordinal()];
+    double factor = constantFactor[gas.ordinal()];
     if (kind == LiquidKind.BEER && gas == Gas.CO2 && composed) {
       factor *= Composition.beerOverStandard(makeup, temperatureK);
     }

@@ -14,8 +14,6 @@ import tunwarden.physics.gas.Gas;
  * the edge.
  */
 public final class GasLine {
-  private static final double LEAST_K = 243.15;
-  private static final double MOST_K = 423.15;
   private static final int MOST_STEPS = 60;
   private static final double CLOSE_ENOUGH = 1e-13;
 
@@ -23,9 +21,14 @@ public final class GasLine {
   private final Gas gas;
   private final TradeRelation relation;
   private final WaterLine here;
-  private final WaterLine edge;
+  private final WaterLine beyond;
+  private PureWater ownWater;
+  private PureWater edgeWater;
+  private PureWater water;
+  private WaterLine edge;
   private double factor;
   private double slope;
+  private double offset;
   private double leastPartial;
   private double mostPartial;
 
@@ -34,21 +37,43 @@ public final class GasLine {
     this.gas = gas;
     this.relation = gas == Gas.CO2 ? drink.relation() : null;
     this.here = new WaterLine(gas);
-    this.edge = relation == null ? null : new WaterLine(gas);
+    this.beyond = relation == null ? null : new WaterLine(gas);
   }
 
   /** Prepares for a temperature; outside −30..150 °C it is held at that edge. */
   public GasLine prepareAt(double temperatureK) {
-    here.prepareAt(clamp(temperatureK, LEAST_K, MOST_K));
-    factor = drink.factor(gas, here.temperatureK());
+    if (ownWater == null) {
+      ownWater = new PureWater();
+    }
+    return prepareAt(ownWater.prepareAt(temperatureK));
+  }
+
+  /** Prepares for the temperature of water that is shared with other lines. */
+  public GasLine prepareAt(PureWater shared) {
+    water = shared;
+    here.prepareAt(shared);
+    factor = drink.factor(gas, shared.temperatureK());
     if (relation != null) {
-      Validity held = relation.heldBeyond();
-      edge.prepareAt(clamp(here.temperatureK(), held.leastK(), held.mostK()));
-      slope = relation.slope(edge.temperatureK());
-      leastPartial = held.leastPaAbsolute() - edge.vapourPa();
-      mostPartial = held.mostPaAbsolute() - edge.vapourPa();
+      prepareRelation();
     }
     return this;
+  }
+
+  private void prepareRelation() {
+    Validity held = relation.heldBeyond();
+    double temperature = clamp(water.temperatureK(), held.leastK(), held.mostK());
+    if (temperature == water.temperatureK()) {
+      edge = here;
+    } else {
+      if (edgeWater == null) {
+        edgeWater = new PureWater();
+      }
+      edge = beyond.prepareAt(edgeWater.prepareAt(temperature));
+    }
+    slope = relation.slope(temperature);
+    offset = relation.offset();
+    leastPartial = held.leastPaAbsolute() - edge.vapourPa();
+    mostPartial = held.mostPaAbsolute() - edge.vapourPa();
   }
 
   /** The gas this line is for. */
@@ -58,12 +83,12 @@ public final class GasLine {
 
   /** Temperature it was last prepared for, K. */
   public double temperatureK() {
-    return here.temperatureK();
+    return water.temperatureK();
   }
 
   /** Water vapour pressure over the liquid, Pa. */
   public double vapourPa() {
-    return here.vapourPa();
+    return water.vapourPa();
   }
 
   /**
@@ -77,13 +102,13 @@ public final class GasLine {
       return 0;
     }
     double inWater = factor * here.dissolved(partialPa, totalPaAbsolute);
-    if (relation == null) {
-      return inWater;
-    }
+    return relation == null ? inWater : inWater * relationOverWater(partialPa);
+  }
+
+  private double relationOverWater(double partialPa) {
     double within = clamp(partialPa, leastPartial, mostPartial);
     double effective = within + edge.vapourPa();
-    double ratio = (slope * effective + relation.offset()) / edge.dissolved(within, effective);
-    return inWater * ratio;
+    return (slope * effective + offset) / edge.dissolved(within, effective);
   }
 
   /**

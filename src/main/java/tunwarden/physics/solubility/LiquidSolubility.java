@@ -14,6 +14,9 @@ import tunwarden.physics.liquid.WagnerPruss1993;
  * range.
  */
 public final class LiquidSolubility {
+  private static final double HENRY_AT_PA = 1e5;
+  private static final LiquidSolubility WATER = of(Liquid.WATER);
+
   private final Drink drink;
 
   private LiquidSolubility(Drink drink) {
@@ -23,6 +26,11 @@ public final class LiquidSolubility {
   /** The solubility relations that fit a liquid. */
   public static LiquidSolubility of(Liquid liquid) {
     return new LiquidSolubility(Drink.of(liquid));
+  }
+
+  /** The same with CO2's solubility multiplied, to try what an error of the relation would do. */
+  public LiquidSolubility scaled(double co2Factor) {
+    return new LiquidSolubility(drink.scaled(co2Factor));
   }
 
   /** A line for one gas, to be prepared at a temperature and evaluated often. */
@@ -62,6 +70,19 @@ public final class LiquidSolubility {
    */
   public double vapourPressurePa(double temperatureK) {
     return WagnerPruss1993.pa(temperatureK);
+  }
+
+  /**
+   * Henry fugacity, Pa on the mole fraction, at low pressure: water's, over what the drink holds
+   * compared with water at a partial pressure of 1 bar.
+   */
+  public double henryPa(Gas gas, double temperatureK) {
+    GasLine line = line(gas).prepareAt(temperatureK);
+    double held = line.temperatureK();
+    double total = HENRY_AT_PA + line.vapourPa();
+    double water = WATER.line(gas).prepareAt(held).dissolvedKgPerM3(HENRY_AT_PA, total);
+    double ratio = line.dissolvedKgPerM3(HENRY_AT_PA, total) / water;
+    return Math.exp(WaterLine.lnHenryPa(gas, held)) / ratio;
   }
 
   /** Relative standard uncertainty (one sigma) of the dissolved amount at equilibrium. */

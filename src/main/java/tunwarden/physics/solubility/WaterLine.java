@@ -3,8 +3,6 @@ package tunwarden.physics.solubility;
 import tunwarden.physics.gas.Gas;
 import tunwarden.physics.gas.RealGas;
 import tunwarden.physics.gas.Weiss1974Virial;
-import tunwarden.physics.liquid.Kell1975;
-import tunwarden.physics.liquid.WagnerPruss1993;
 import tunwarden.units.Constants;
 
 /**
@@ -17,37 +15,30 @@ final class WaterLine {
   private static final double LN_WATER_MOLAR_MASS = Math.log(WATER_MOLAR_MASS);
 
   private final Gas gas;
-  private double temperature;
-  private double rt;
-  private double vapour;
+  private PureWater water;
   private double lnMolality;
   private double reference;
   private double volume;
   private double second;
   private double excess;
-  private double third;
-  private double density;
 
   WaterLine(Gas gas) {
     this.gas = gas;
   }
 
-  WaterLine prepareAt(double temperatureK) {
-    temperature = temperatureK;
-    rt = Constants.GAS_CONSTANT * temperatureK;
-    vapour = WagnerPruss1993.pa(temperatureK);
+  WaterLine prepareAt(PureWater prepared) {
+    double temperatureK = prepared.temperatureK();
+    water = prepared;
     volume = DissolvedVolume.m3PerMol(gas, temperatureK);
-    density = Kell1975.kgPerM3(temperatureK);
     second = RealGas.second(gas, temperatureK);
-    third = Weiss1974Virial.third(temperatureK);
+    excess = 2 * RealGas.excessWithCo2(gas, temperatureK);
     if (gas == Gas.CO2) {
       lnMolality = Weiss1974.lnMolalityPerPa(temperatureK);
       reference = Constants.STANDARD_ATMOSPHERE_PA;
       excess = 2 * Weiss1974Virial.excessWithAir(temperatureK);
     } else {
       lnMolality = -lnHenryPa(gas, temperatureK) - LN_WATER_MOLAR_MASS;
-      reference = vapour;
-      excess = 2 * RealGas.excessWithCo2(gas, temperatureK);
+      reference = prepared.vapourPa();
     }
     return this;
   }
@@ -61,31 +52,27 @@ final class WaterLine {
     };
   }
 
-  double temperatureK() {
-    return temperature;
-  }
-
   double vapourPa() {
-    return vapour;
+    return water.vapourPa();
   }
 
   /** Dissolved gas, kg per m³ of solution, by Henry's law on the mole fraction. */
   double dissolved(double partialPa, double totalPa) {
-    double dilute = partialPa * Math.exp(lnSlope(partialPa, totalPa)); // mol/kg, mole fraction / Mw
-    return dilute
-        * gas.molarMass()
-        * density
-        / (1 + dilute * (volume * density - WATER_MOLAR_MASS));
+    // mole fraction over the molar mass of water, mol/kg
+    double dilute = partialPa * Math.exp(lnSlope(partialPa, totalPa));
+    double density = water.density();
+    double swelling = dilute * (volume * density - WATER_MOLAR_MASS);
+    return dilute * gas.molarMass() * density / (1 + swelling);
   }
 
-  /** ln of mole fraction over water's molar mass and over partial pressure. */
+  /** ln of mole fraction over the molar mass of water and over partial pressure. */
   private double lnSlope(double partialPa, double totalPa) {
-    double held = Math.min(totalPa, RealGas.SERIES_LIMIT_PA);
-    double q = held / rt;
+    double rt = water.rt();
+    double q = Math.min(totalPa, RealGas.SERIES_LIMIT_PA) / rt;
     double rest = Math.max(0, 1 - partialPa / totalPa);
     double shape =
         gas == Gas.CO2 ? (1 - rest) * (1 - rest) * (1 + 2 * rest) : -2 * rest * rest * rest;
-    double lnPhi = q * (second + rest * rest * excess + q * third * shape / 2);
+    double lnPhi = q * (second + rest * rest * excess + q * water.third() * shape / 2);
     return lnMolality + lnPhi - volume * (totalPa - reference) / rt;
   }
 }

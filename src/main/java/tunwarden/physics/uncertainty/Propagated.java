@@ -1,0 +1,49 @@
+package tunwarden.physics.uncertainty;
+
+/** Results of a propagation: values, standard uncertainties, correlations, and who contributes. */
+public final class Propagated {
+  private final double[] value;
+  private final double[][] covariance;
+  private final double[][] share;
+
+  Propagated(double[] value, double[][] covariance, double[][] share) {
+    this.value = value;
+    this.covariance = covariance;
+    this.share = share;
+  }
+
+  /** The first result. */
+  public double value() {
+    return value(0);
+  }
+
+  /** Result number {@code k}. */
+  public double value(int k) {
+    return value[k];
+  }
+
+  /** Combined standard uncertainty of the first result. */
+  public double standard() {
+    return standard(0);
+  }
+
+  /** Combined standard uncertainty of result number {@code k}. */
+  public double standard(int k) {
+    return Math.sqrt(covariance[k][k]);
+  }
+
+  /** Expanded uncertainty of the first result, 95 %. */
+  public double u95() {
+    return LinearPropagation.COVERAGE_95 * standard();
+  }
+
+  /** Correlation coefficient between two results. */
+  public double correlation(int k, int l) {
+    return covariance[k][l] / (standard(k) * standard(l));
+  }
+
+  /** What one input alone would give the first result, signed, as a standard uncertainty. */
+  public double share(int input) {
+    return share[0][input];
+  }
+}
