@@ -8,6 +8,7 @@ import picocli.CommandLine.Help;
 import picocli.CommandLine.IVersionProvider;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Spec;
+import tunwarden.app.options.Commands;
 
 /**
  * The program's entry. It only finds the command that was asked for, runs it, and turns what went
@@ -69,31 +70,14 @@ public final class Main implements Runnable {
     return commandLine(new String[0]);
   }
 
-  /**
-   * The parser for these arguments. Only the command that is named is built: reading the options of
-   * all of them costs more than most answers do.
-   */
   private static CommandLine commandLine(String... args) {
     CommandLine line = new CommandLine(new Main());
-    boolean found = false;
-    for (Class<?> command : COMMANDS) {
-      if (args.length > 0 && nameOf(command).equals(args[0])) {
-        line.addSubcommand(command);
-        found = true;
-      }
-    }
-    if (!found) {
-      COMMANDS.forEach(line::addSubcommand);
-    }
+    Commands.add(line, COMMANDS, args, 0);
     return line.setColorScheme(Help.defaultColorScheme(Help.Ansi.OFF))
         .setUsageHelpWidth(HELP_WIDTH)
         .setExpandAtFiles(false)
         .setParameterExceptionHandler(Faults::usage)
         .setExecutionExceptionHandler(Faults::execution);
-  }
-
-  private static String nameOf(Class<?> command) {
-    return command.getAnnotation(Command.class).name();
   }
 
   @Override

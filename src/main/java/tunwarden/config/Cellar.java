@@ -4,6 +4,7 @@ import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
 import tunwarden.alarm.AlarmSettings;
+import tunwarden.journal.RecorderSettings;
 import tunwarden.vessel.Site;
 import tunwarden.vessel.Vessel;
 
@@ -15,13 +16,15 @@ import tunwarden.vessel.Vessel;
  * @param vessels in the order of the file, at least one
  * @param instruments where their quantities are read
  * @param alarms when alarms come and go, and the units texts are written in
+ * @param recording how readings are recorded and kept
  */
 public record Cellar(
     Path file,
     Site site,
     List<Vessel> vessels,
     List<Instrument> instruments,
-    AlarmSettings alarms) {
+    AlarmSettings alarms,
+    RecorderSettings recording) {
   /** Keeps its own copies. */
   public Cellar {
     vessels = List.copyOf(vessels);

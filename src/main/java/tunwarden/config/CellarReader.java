@@ -8,6 +8,7 @@ import java.util.Locale;
 import java.util.Map;
 import java.util.regex.Pattern;
 import tunwarden.alarm.AlarmSettings;
+import tunwarden.journal.RecorderSettings;
 import tunwarden.reading.Quantity;
 import tunwarden.units.Display;
 import tunwarden.vessel.Site;
@@ -38,8 +39,9 @@ final class CellarReader {
     siteSection.close();
     Display display = AlarmsReader.display(root.section("display"));
     AlarmSettings alarms = AlarmsReader.read(root.section("alarms"), display);
+    RecorderSettings recording = RecordingReader.read(root.section("recording"));
     root.close();
-    return new Cellar(file, site, vessels, instruments, alarms);
+    return new Cellar(file, site, vessels, instruments, alarms, recording);
   }
 
   private void vessels(Site site) {

@@ -7,6 +7,7 @@ import tunwarden.physics.liquid.BeerMethod;
 import tunwarden.physics.liquid.LiquidKind;
 import tunwarden.units.BadInputException;
 import tunwarden.units.BadQuantityException;
+import tunwarden.units.Display;
 import tunwarden.units.Kind;
 import tunwarden.units.Pressure;
 import tunwarden.units.Quantities;
@@ -47,6 +48,15 @@ public final class Texts {
     return text -> notNegative(text, Quantities.parse(text, kind));
   }
 
+  /** Diameter above zero, m. */
+  public static double diameterM(String text) {
+    double metres = Quantities.parse(text, Kind.LENGTH);
+    if (!(metres > 0)) {
+      throw new BadQuantityException("'" + text + "' is no opening; write a diameter above zero");
+    }
+    return metres;
+  }
+
   /** Share of a whole, 0..1. */
   public static double share(String text) {
     double share = notNegative(text, Quantities.parse(text, Kind.FRACTION));
@@ -84,6 +94,16 @@ public final class Texts {
   public static Closure closure(String text) {
     return Closure.ofWord(text)
         .orElseThrow(() -> unknown(text, "a closure", words(Closure.values(), Closure::word)));
+  }
+
+  /** A set of units to print in. */
+  public static Display display(String text) {
+    return switch (text) {
+      case "metric" -> Display.METRIC;
+      case "us" -> Display.US;
+      case "si" -> Display.SI;
+      default -> throw unknown(text, "a set of units", "metric, us, si");
+    };
   }
 
   private static double notNegative(String text, double value) {

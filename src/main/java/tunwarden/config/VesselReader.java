@@ -147,13 +147,10 @@ final class VesselReader {
       return Optional.empty();
     }
     Section valve = section.section("relief-valve");
-    OptionalDouble diameter = valve.quantity("orifice", Texts.of(Kind.LENGTH));
+    OptionalDouble diameter = valve.quantity("orifice", Texts::diameterM);
     OptionalDouble discharge = valve.quantity("kd", Texts::coefficient);
     valve.require("orifice", "\"15 mm\"");
     valve.require("kd", "\"0.6\"");
-    if (diameter.orElse(1) == 0) {
-      valve.problem("orifice", "an orifice has a diameter above zero");
-    }
     valve.close();
     return Optional.of(new ReliefOrifice(diameter.orElse(0), discharge.orElse(0)));
   }

@@ -62,6 +62,10 @@ public final class Quantities {
   }
 
   static BadQuantityException noSuchUnit(String text, Written written, Kind kind) {
+    if (written.unit().startsWith(",")) {
+      return new BadQuantityException(
+          "'" + text + "' has a comma in it; write the decimal point as '.'");
+    }
     String problem =
         written.unit().isEmpty() ? "has no unit" : "has the unit '" + written.unit() + "'";
     return new BadQuantityException(

@@ -1,6 +1,7 @@
 package tunwarden.vessel;
 
 import java.util.Optional;
+import tunwarden.physics.site.StandardAtmosphere;
 import tunwarden.units.BadInputException;
 import tunwarden.units.Constants;
 
@@ -29,12 +30,9 @@ public record Site(double ambientPaAbsolute, double ambientU95Pa, Optional<Room>
 
   private static final double LEAST_PA = 0.5e5;
   private static final double MOST_PA = 1.1e5;
-  private static final double LAPSE_K_PER_M = 0.0065;
-  private static final double SEA_LEVEL_K = 288.15;
-  private static final double EXPONENT = 5.25588;
 
   /**
-   * The standard atmosphere at an altitude, weather unknown (ISO 2533:1975, troposphere).
+   * The standard atmosphere at an altitude, weather unknown (ISO 2533).
    *
    * @param altitudeM geopotential altitude, m, {@link #LOWEST_M} to {@link #HIGHEST_M}
    */
@@ -43,8 +41,8 @@ public record Site(double ambientPaAbsolute, double ambientU95Pa, Optional<Room>
       throw new BadInputException(
           "an altitude of " + altitudeM + " m is outside -500 to 5000 m; give the air pressure");
     }
-    double ratio = Math.pow(1 - LAPSE_K_PER_M * altitudeM / SEA_LEVEL_K, EXPONENT);
-    return new Site(Constants.STANDARD_ATMOSPHERE_PA * ratio, WEATHER_U95_PA, Optional.empty());
+    double pa = StandardAtmosphere.pa(altitudeM);
+    return new Site(pa, WEATHER_U95_PA, Optional.empty());
   }
 
   /**

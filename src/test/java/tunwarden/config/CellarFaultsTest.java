@@ -76,7 +76,7 @@ class CellarFaultsTest {
         "[vessel.FV2]\\n | [alarms]\\nstale = \"0 s\"\\n[vessel.FV2]\\n | line 2, alarms.stale:"
             + " '0 s' is no time at all",
         "[vessel.FV2]\\n | [display]\\nunits = \"imperial\"\\n[vessel.FV2]\\n | line 2,"
-            + " display.units: 'imperial' is not a set of units; write one of metric, si, us",
+            + " display.units: 'imperial' is not a set of units; write one of metric, us, si",
         "[vessel.FV2]\\n | [sitte]\\n[vessel.FV2]\\n | line 1, sitte: there is no such key here; did"
             + " you mean 'site'?",
         "[vessel.FV2]\\n | [site]\\naltitude = \"9000 m\"\\n[vessel.FV2]\\n | line 2, site.altitude:"

@@ -13,6 +13,7 @@ import java.util.Optional;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import tunwarden.alarm.AlarmSettings;
+import tunwarden.journal.RecorderSettings;
 import tunwarden.physics.gas.Gas;
 import tunwarden.physics.liquid.BeerMethod;
 import tunwarden.physics.liquid.LiquidKind;
@@ -105,6 +106,26 @@ class CellarFileTest {
     assertEquals(AlarmSettings.DEFAULT.longestShelf(), cellar.alarms().longestShelf());
     assertEquals(Display.US, cellar.alarms().display());
     assertEquals(AlarmSettings.DEFAULT, Cellars.parse(Cellars.LEAST).alarms());
+  }
+
+  @Test
+  void recordingIsReadAndItsDefaultsStay() {
+    Cellar cellar =
+        Cellars.parse(
+            Cellars.LEAST
+                + """
+                [recording]
+                flush = "2 s"
+                keep-days = 90
+                keep-megabytes = 500
+                delete-oldest-for-room = false
+                """);
+    assertEquals(Duration.ofSeconds(2), cellar.recording().flush());
+    assertEquals(
+        new RecorderSettings.Keep(
+            90, 500L << 20, RecorderSettings.Keep.USUAL.leastFreeBytes(), false),
+        cellar.recording().keep());
+    assertEquals(RecorderSettings.USUAL, Cellars.parse(Cellars.LEAST).recording());
   }
 
   @Test

@@ -7,6 +7,7 @@ import tunwarden.config.Texts;
 import tunwarden.physics.gas.GasMix;
 import tunwarden.physics.liquid.BeerMethod;
 import tunwarden.physics.liquid.LiquidKind;
+import tunwarden.units.Display;
 import tunwarden.units.Kind;
 import tunwarden.units.Pressure;
 import tunwarden.units.Quantities;
@@ -47,6 +48,13 @@ public abstract class Convert<T> implements ITypeConverter<T> {
     }
   }
 
+  /** Units to print in. */
+  public static final class ToDisplay extends Convert<Display> {
+    ToDisplay() {
+      super(Texts::display);
+    }
+  }
+
   /** How early a relief valve may open. */
   public static final class ToTolerance extends Convert<StatedLimits.Tolerance> {
     ToTolerance() {
@@ -79,6 +87,13 @@ public abstract class Convert<T> implements ITypeConverter<T> {
   public static final class ToMetres extends Convert<Double> {
     ToMetres() {
       super(Texts.of(Kind.LENGTH));
+    }
+  }
+
+  /** Length above zero: m. */
+  public static final class ToDiameter extends Convert<Double> {
+    ToDiameter() {
+      super(Texts::diameterM);
     }
   }
 

@@ -29,10 +29,9 @@ public final class LimitOptions {
       names = "--tolerance",
       paramLabel = "DIFFERENCE",
       converter = Convert.ToTolerance.class,
-      description = {
-        "How far below its setting the valve may open, or ISO (4126-1) or ASME (VIII-1).",
-        "Default: ISO."
-      })
+      description =
+          "How far below its setting the valve may open, or ISO (4126-1) or ASME (VIII-1)."
+              + " Default: ISO.")
   private StatedLimits.Tolerance tolerance;
 
   @Option(

@@ -4,11 +4,12 @@ import java.util.LinkedHashMap;
 import java.util.Map;
 import java.util.OptionalDouble;
 import picocli.CommandLine.Option;
+import tunwarden.config.Texts;
 import tunwarden.physics.liquid.BeerMethod;
 import tunwarden.physics.liquid.Liquid;
 import tunwarden.physics.liquid.LiquidKind;
+import tunwarden.units.BadInputException;
 import tunwarden.units.Kind;
-import tunwarden.units.Quantities;
 
 /** The drink. */
 public final class LiquidOptions {
@@ -16,10 +17,9 @@ public final class LiquidOptions {
       names = "--liquid",
       paramLabel = "KIND",
       converter = Convert.ToLiquidKind.class,
-      description = {
-        "The drink: water, beer, wine, sparkling-wine, cider, soft-drink, mineral-water,",
-        "kombucha."
-      })
+      description =
+          "The drink: water, beer, wine, sparkling-wine, cider, soft-drink, mineral-water,"
+              + " kombucha.")
   private LiquidKind kind;
 
   @Option(
@@ -66,6 +66,23 @@ public final class LiquidOptions {
         || salts != null;
   }
 
+  /** Whether the drink is named. */
+  public boolean isNamed() {
+    return kind != null;
+  }
+
+  /**
+   * Refuses to go on without a named drink.
+   *
+   * @throws BadInputException when none is named
+   */
+  public void requireKind() {
+    if (kind == null) {
+      throw new BadInputException(
+          "--liquid is missing; name the drink, one of " + LiquidKind.words());
+    }
+  }
+
   /** The drink, water if none was named. */
   public Liquid liquid() {
     return new Liquid(
@@ -80,7 +97,7 @@ public final class LiquidOptions {
   private Map<String, Double> saltMolPerM3() {
     Map<String, Double> parsed = new LinkedHashMap<>();
     if (salts != null) {
-      salts.forEach((name, text) -> parsed.put(name, Quantities.parse(text, Kind.MOLARITY)));
+      salts.forEach((name, text) -> parsed.put(name, Texts.of(Kind.MOLARITY).apply(text)));
     }
     return parsed;
   }

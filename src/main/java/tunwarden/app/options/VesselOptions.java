@@ -92,6 +92,20 @@ public final class VesselOptions {
     return build(id, 1, NOMINAL_FILL, instruments.accuracy(1));
   }
 
+  /**
+   * Refuses to go on without a named drink.
+   *
+   * @throws BadInputException when none is named
+   */
+  public void requireLiquid() {
+    liquid.requireKind();
+  }
+
+  /** Whether the drink is named; if not, it is water. */
+  public boolean liquidIsNamed() {
+    return liquid.isNamed();
+  }
+
   /** A pressure in Pa gauge at the site described. */
   public double gaugePa(Pressure pressure) {
     return pressure.gaugePa(site.site().ambientPaAbsolute());
