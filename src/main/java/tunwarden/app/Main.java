@@ -8,6 +8,7 @@ import picocli.CommandLine.Help;
 import picocli.CommandLine.IVersionProvider;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Spec;
+import tunwarden.app.instruments.InstrumentsCommand;
 import tunwarden.app.options.Commands;
 
 /**
@@ -38,7 +39,8 @@ public final class Main implements Runnable {
   static final String NAME = "tunwarden";
 
   /** Every command, in the order the help lists them; add a class here to add a command. */
-  private static final List<Class<?>> COMMANDS = List.of(RehearseCommand.class);
+  private static final List<Class<?>> COMMANDS =
+      List.of(RehearseCommand.class, InstrumentsCommand.class);
 
   private static final int HELP_WIDTH = 90;
 

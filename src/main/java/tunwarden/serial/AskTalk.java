@@ -96,8 +96,8 @@ final class AskTalk implements Talk {
       } else if (result instanceof Result.Refusal refusal) {
         refused(unit, refusal);
         return;
-      } else {
-        failed(unit, (Result.Failure) result, link);
+      } else if (result instanceof Result.Failure failure) {
+        failed(unit, failure, link);
         return;
       }
     }

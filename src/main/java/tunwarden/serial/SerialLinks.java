@@ -2,6 +2,9 @@ package tunwarden.serial;
 
 import com.fazecast.jSerialComm.SerialPort;
 import com.fazecast.jSerialComm.SerialPortInvalidPortException;
+import java.io.IOException;
+import java.nio.file.InvalidPathException;
+import java.nio.file.Path;
 import java.util.Locale;
 import tunwarden.wire.profile.LineSettings;
 
@@ -29,11 +32,32 @@ public final class SerialLinks implements ByteLinkFactory {
           PortException.Reason.ABSENT,
           "there is no serial port " + port + "; see 'instruments ports' for those there are");
     }
-    prepare(serial, settings, use);
+    prepare(serial, isPseudoTerminal(port) ? plain(settings) : settings, use);
     if (!serial.openPort(0)) {
       throw refused(port, serial.getLastErrorCode());
     }
     return new SerialLink(port, serial, use);
+  }
+
+  /** Where a rehearsal speaks. It has no parity, and the C library calls asking for it an error. */
+  private static boolean isPseudoTerminal(String port) {
+    try {
+      return Path.of(port).toRealPath().startsWith("/dev/pts");
+    } catch (IOException | InvalidPathException e) {
+      return false;
+    }
+  }
+
+  private static LineSettings plain(LineSettings settings) {
+    LineSettings usual = LineSettings.USUAL;
+    return new LineSettings(
+        settings.baud(),
+        usual.dataBits(),
+        usual.parity(),
+        usual.stopBits(),
+        usual.flow(),
+        settings.wires(),
+        settings.settle());
   }
 
   private static void prepare(SerialPort serial, LineSettings settings, Use use) {

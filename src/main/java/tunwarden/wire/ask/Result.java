@@ -9,6 +9,9 @@ public sealed interface Result {
   /** The values asked for, by field name. */
   record Values(Map<String, Decoded> values) implements Result {}
 
+  /** The bare data of a block of registers, for a look at an unknown instrument. */
+  record Block(byte[] data) implements Result {}
+
   /**
    * The instrument answered that it will not, or cannot.
    *

@@ -15,7 +15,7 @@ import tunwarden.wire.signal.Decoded;
  * One block of registers of one instrument, and the fields that stand in it.
  *
  * @param request what is sent
- * @param fields the fields that lie wholly within the block
+ * @param fields the fields that lie wholly within the block; none to be given the bare data
  */
 public record RtuQuestion(RtuRequest request, List<Field> fields) implements Question {
   private static final int FRAME = 5;
@@ -40,8 +40,11 @@ public record RtuQuestion(RtuRequest request, List<Field> fields) implements Que
         if (found == null) {
           return null;
         }
-        return found.data() == null
-            ? Refusals.of(found.code(), request.unit())
+        if (found.data() == null) {
+          return Refusals.of(found.code(), request.unit());
+        }
+        return fields.isEmpty()
+            ? new Result.Block(found.data())
             : new Result.Values(values(found.data()));
       }
 
