@@ -40,7 +40,8 @@ public final class Main implements Runnable {
 
   /** Every command, in the order the help lists them; add a class here to add a command. */
   private static final List<Class<?>> COMMANDS =
-      List.of(RehearseCommand.class, InstrumentsCommand.class);
+      List.of(
+          WatchCommand.class, ReplayCommand.class, RehearseCommand.class, InstrumentsCommand.class);
 
   private static final int HELP_WIDTH = 90;
 

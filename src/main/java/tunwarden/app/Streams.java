@@ -32,6 +32,11 @@ final class Streams {
     return writer(FileDescriptor.err);
   }
 
+  /** Whether standard output goes to something that shows more than ASCII. */
+  static boolean isUnicode() {
+    return charset(System.getenv(), systemCharset()).newEncoder().canEncode('±');
+  }
+
   private static PrintWriter writer(FileDescriptor descriptor) {
     Charset charset = charset(System.getenv(), systemCharset());
     Writer bytes = new OutputStreamWriter(new FileOutputStream(descriptor), charset);

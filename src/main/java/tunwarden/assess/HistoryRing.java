@@ -34,6 +34,24 @@ final class HistoryRing {
     Arrays.fill(number, NONE);
   }
 
+  /** Forgets every bin that begins after that time. */
+  void forgetAfter(long second) {
+    long kept = Math.floorDiv(second, binS);
+    if (newest == NONE || newest <= kept) {
+      return;
+    }
+    if (oldest > kept) {
+      clear();
+      return;
+    }
+    for (int i = 0; i < number.length; i++) {
+      if (number[i] > kept) {
+        number[i] = NONE;
+      }
+    }
+    newest = kept;
+  }
+
   void put(long second, float value) {
     long bin = Math.floorDiv(second, binS);
     if (newest != NONE && bin <= newest - capacity) {

@@ -61,7 +61,7 @@ public final class ReplayDriver implements Closeable {
 
   /** Starts the thread, named {@code replay}. */
   public void start() {
-    clock = clock.movedTo(player.start(), nanos.getAsLong());
+    clock = clock.movedTo(player.at(), nanos.getAsLong());
     thread = new Thread(this::run, "replay");
     thread.setDaemon(true);
     thread.start();

@@ -8,13 +8,11 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.ConcurrentHashMap;
-import java.util.function.BiFunction;
 import java.util.function.Supplier;
 import tunwarden.alarm.AlarmBook;
 import tunwarden.assess.Assessment;
 import tunwarden.assess.History;
 import tunwarden.estimate.Step;
-import tunwarden.reading.Quantity;
 import tunwarden.reading.Sample;
 import tunwarden.screen.model.Board;
 import tunwarden.screen.model.JournalEntry;
@@ -53,20 +51,22 @@ public final class BoardKeeper implements Sink {
   private final List<Vessel> vessels;
   private final AlarmKeeper alarms;
   private final SignalTally signals;
-  private final JournalPages journal = new JournalPages();
+  private final JournalPages journal;
   private final Map<String, Assessment> latest = new ConcurrentHashMap<>();
   private final Map<String, History> histories = new ConcurrentHashMap<>();
 
   /** A board on which nothing has been seen yet. */
-  public BoardKeeper(
+  BoardKeeper(
       List<Vessel> vessels,
       Frame frame,
       AlarmKeeper alarms,
-      BiFunction<String, Quantity, SignalSource> sources) {
+      JournalPages journal,
+      SignalTally signals) {
     this.vessels = List.copyOf(vessels);
     this.frame = frame;
     this.alarms = alarms;
-    this.signals = new SignalTally(sources);
+    this.journal = journal;
+    this.signals = signals;
     vessels.forEach(vessel -> histories.put(vessel.id(), new History()));
   }
 
@@ -88,16 +88,10 @@ public final class BoardKeeper implements Sink {
     journal.add(entry);
   }
 
-  /** Forgets all readings, as when a replay goes back to its start. */
-  public void clear() {
-    histories.values().forEach(History::clear);
-    journal.clear();
-    latest.clear();
-  }
-
-  /** The newest assessment of one vessel, if there is one. */
-  public Optional<Assessment> assessment(String vessel) {
-    return Optional.ofNullable(latest.get(vessel));
+  /** Forgets what came after a time, as when a replay goes back. */
+  void backTo(Instant time) {
+    histories.values().forEach(history -> history.forgetAfter(time));
+    journal.forgetAfter(time);
   }
 
   /** The newest board; cheap and safe from any thread. */

@@ -1,8 +1,11 @@
 package tunwarden.app.board;
 
+import java.time.Instant;
 import java.util.ArrayDeque;
 import java.util.Deque;
 import java.util.List;
+import tunwarden.alarm.Alarm;
+import tunwarden.alarm.Transition;
 import tunwarden.assess.Assessment;
 import tunwarden.estimate.Event;
 import tunwarden.screen.model.JournalEntry;
@@ -24,6 +27,14 @@ final class JournalPages implements Sink {
     }
   }
 
+  void changed(Transition transition) {
+    Alarm alarm = transition.alarm();
+    String remark = transition.remark().isEmpty() ? "" : " (" + transition.remark() + ")";
+    String text =
+        alarm.kind().word() + " " + transition.change().word() + remark + ": " + alarm.text();
+    add(new JournalEntry(transition.at(), alarm.vessel(), "alarm", text));
+  }
+
   synchronized void add(JournalEntry entry) {
     entries.addLast(entry);
     if (entries.size() > KEPT) {
@@ -40,8 +51,8 @@ final class JournalPages implements Sink {
     return shown;
   }
 
-  synchronized void clear() {
-    entries.clear();
-    shown = List.of();
+  synchronized void forgetAfter(Instant time) {
+    entries.removeIf(entry -> entry.time().isAfter(time));
+    shown = null;
   }
 }

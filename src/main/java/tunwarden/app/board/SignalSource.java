@@ -9,4 +9,7 @@ import java.util.function.Supplier;
  * @param port port or file
  * @param words what a person should know of the line at this moment; may give an empty text
  */
-public record SignalSource(String device, String port, Supplier<String> words) {}
+public record SignalSource(String device, String port, Supplier<String> words) {
+  /** A value typed in by a person. */
+  public static final SignalSource BY_HAND = new SignalSource("typed in", "", () -> "");
+}

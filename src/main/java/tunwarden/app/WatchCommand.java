@@ -1,0 +1,43 @@
+package tunwarden.app;
+
+import java.io.IOException;
+import java.nio.file.Path;
+import java.time.InstantSource;
+import java.util.concurrent.Callable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Option;
+import tunwarden.app.board.LiveDashboard;
+import tunwarden.app.options.ScreenOptions;
+import tunwarden.config.Cellar;
+import tunwarden.config.CellarFile;
+import tunwarden.serial.SerialLinks;
+
+/** {@code watch}: the dashboard over the instruments of a cellar file. */
+@Command(
+    name = "watch",
+    description = "Shows the dashboard over the instruments of a cellar file.",
+    mixinStandardHelpOptions = true,
+    sortOptions = false,
+    footerHeading = "%nExamples:%n",
+    footer = {
+      "  tunwarden watch",
+      "  tunwarden watch --cellar lower-cellar.toml --theme monochrome --ascii"
+    })
+public final class WatchCommand implements Callable<Integer> {
+  @Option(
+      names = "--cellar",
+      paramLabel = "F",
+      description = "Cellar file (default: ${DEFAULT-VALUE}).",
+      defaultValue = CellarFile.USUAL_NAME)
+  private Path cellarFile;
+
+  @Mixin private ScreenOptions screen = new ScreenOptions();
+
+  @Override
+  public Integer call() throws IOException {
+    Cellar cellar = CellarFile.read(cellarFile);
+    LiveDashboard.run(cellar, Fronts.of(screen), new SerialLinks(), InstantSource.system());
+    return 0;
+  }
+}

@@ -1,0 +1,48 @@
+package tunwarden.app.board;
+
+import java.io.IOException;
+import java.time.Duration;
+import java.util.List;
+import java.util.Optional;
+import tunwarden.alarm.AlarmSettings;
+import tunwarden.replay.LogFile;
+import tunwarden.replay.LogRow;
+import tunwarden.replay.RowSource;
+import tunwarden.screen.model.Origin;
+import tunwarden.vessel.Vessel;
+
+/** The dashboard over a recorded log, with a survey of its events running behind. */
+public final class LogDashboard {
+  private LogDashboard() {}
+
+  /**
+   * Replays until the person quits.
+   *
+   * @param log whose head has been looked at
+   * @param vessels descriptions of the vessels in it that are to be shown
+   * @param alarms alarm settings
+   * @param pace data seconds per real second
+   */
+  public static void run(
+      LogFile log, List<Vessel> vessels, AlarmSettings alarms, double pace, Front front)
+      throws IOException {
+    try (RowSource rows = log.open()) {
+      LogRow first = rows.next();
+      try (Survey survey = new Survey(log, vessels, first.time())) {
+        survey.start();
+        Playback.Helpers helpers =
+            new Playback.Helpers(
+                () -> Optional.of(survey.last()),
+                survey::marks,
+                survey::progress,
+                survey::close,
+                vessel -> "to write a report: tunwarden report " + log.path().getFileName());
+        String name = log.path().getFileName().toString();
+        Playback.run(
+            new Playback.Show(name, Origin.REPLAY, vessels, log, pace, alarms, Duration.ZERO),
+            helpers,
+            front);
+      }
+    }
+  }
+}

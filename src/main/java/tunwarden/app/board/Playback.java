@@ -1,0 +1,132 @@
+package tunwarden.app.board;
+
+import java.io.IOException;
+import java.time.Duration;
+import java.time.Instant;
+import java.util.List;
+import java.util.Optional;
+import java.util.concurrent.atomic.AtomicReference;
+import java.util.function.Function;
+import java.util.function.Supplier;
+import tunwarden.alarm.AlarmSettings;
+import tunwarden.replay.ReplayDriver;
+import tunwarden.replay.ReplayPlayer;
+import tunwarden.replay.RowSource;
+import tunwarden.screen.model.Origin;
+import tunwarden.screen.model.Progress;
+import tunwarden.screen.model.ReplayStatus;
+import tunwarden.screen.model.ReplayStatus.TimeMark;
+import tunwarden.screen.terminal.Dashboard;
+import tunwarden.vessel.Vessel;
+
+/** The dashboard over rows that are played at a pace: a log, or a rehearsal. */
+final class Playback {
+  private static final Duration TICK = Duration.ofSeconds(10);
+
+  private final Show show;
+  private final Front front;
+  private final AtomicReference<ReplayDriver> driver = new AtomicReference<>();
+
+  /**
+   * What is played.
+   *
+   * @param name of the log or the scenario
+   * @param origin replay or rehearsal
+   * @param vessels their descriptions
+   * @param rows opened afresh whenever the replay goes back
+   * @param pace data seconds per real second
+   * @param alarms alarm settings
+   * @param skip data time played at once before the screen opens, so that charts are not empty
+   */
+  record Show(
+      String name,
+      Origin origin,
+      List<Vessel> vessels,
+      RowSource.Supplier rows,
+      double pace,
+      AlarmSettings alarms,
+      Duration skip) {}
+
+  /**
+   * What runs beside the playing.
+   *
+   * @param last last time of the log as far as known
+   * @param marks times at which something happened, as far as known
+   * @param progress long work under way
+   * @param stopWork stops it
+   * @param report writes a report of a vessel and says where
+   */
+  record Helpers(
+      Supplier<Optional<Instant>> last,
+      Supplier<List<TimeMark>> marks,
+      Supplier<Optional<Progress>> progress,
+      Runnable stopWork,
+      Function<String, String> report) {
+    static final Helpers NONE =
+        new Helpers(
+            Optional::empty,
+            List::of,
+            Optional::empty,
+            () -> {},
+            vessel -> "a report is made from a log: tunwarden report LOG");
+  }
+
+  private Playback(Show show, Front front) {
+    this.show = show;
+    this.front = front;
+  }
+
+  /** Plays until the person quits. */
+  static void run(Show show, Helpers helpers, Front front) throws IOException {
+    new Playback(show, front).run(helpers);
+  }
+
+  private void run(Helpers helpers) throws IOException {
+    Assembly assembly =
+        Assembly.of(
+            show.vessels(),
+            show.alarms(),
+            frame(helpers),
+            (vessel, quantity) -> new SignalSource(quantity.column(), show.name(), () -> ""),
+            List.of(),
+            List.of());
+    StationTarget target = new StationTarget(assembly);
+    ReplayPlayer player = new ReplayPlayer(show.rows(), target, TICK);
+    player.playTo(player.start().plus(show.skip()), Long.MAX_VALUE);
+    try (ReplayDriver running =
+        new ReplayDriver(player, show.pace(), System::nanoTime, ReplayDriver.Waiting.onMonitor())) {
+      driver.set(running);
+      running.start();
+      PlaybackDesk desk = new PlaybackDesk(assembly, target, running, helpers, front.looks()::keep);
+      Dashboard.run(assembly.board()::latest, desk, front.options());
+    }
+  }
+
+  private BoardKeeper.Frame frame(Helpers helpers) {
+    return new BoardKeeper.Frame(
+        show.origin(),
+        front.zone(),
+        show.alarms().stale(),
+        () -> driver.get().status().at(),
+        () -> status(helpers),
+        helpers.progress());
+  }
+
+  /** A rehearsal has no end to show on a time bar. */
+  private Optional<ReplayStatus> status(Helpers helpers) {
+    tunwarden.replay.ReplayStatus now = driver.get().status();
+    if (show.origin() != Origin.REPLAY) {
+      return Optional.empty();
+    }
+    Instant end = helpers.last().get().filter(now.at()::isBefore).orElse(now.at());
+    return Optional.of(
+        new ReplayStatus(
+            show.name(),
+            now.pace(),
+            now.paused(),
+            now.start(),
+            end,
+            now.at(),
+            helpers.marks().get()));
+  }
+}

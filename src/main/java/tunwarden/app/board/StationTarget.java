@@ -1,0 +1,54 @@
+package tunwarden.app.board;
+
+import java.time.Instant;
+import tunwarden.alarm.AlarmBook;
+import tunwarden.reading.Sample;
+import tunwarden.replay.ReplayTarget;
+import tunwarden.station.Station;
+
+/**
+ * Lets a replay feed a station. Whatever else changes the station goes through {@link #run}, so
+ * that there is still one writer at a time.
+ */
+final class StationTarget implements ReplayTarget {
+  private final Assembly assembly;
+
+  StationTarget(Assembly assembly) {
+    this.assembly = assembly;
+  }
+
+  private record Place(Station.Checkpoint station, AlarmBook alarms, Instant time) {}
+
+  private Instant reached = Instant.MIN;
+
+  @Override
+  public synchronized void accept(Sample sample) {
+    reached = sample.time();
+    assembly.station().accept(sample);
+  }
+
+  @Override
+  public synchronized void tick(Instant now) {
+    reached = now;
+    assembly.station().tick(now);
+  }
+
+  @Override
+  public synchronized Object checkpoint() {
+    return new Place(assembly.station().checkpoint(), assembly.alarms().book(), reached);
+  }
+
+  @Override
+  public synchronized void restore(Object checkpoint) {
+    Place place = (Place) checkpoint;
+    assembly.station().restore(place.station());
+    assembly.alarms().restore(place.alarms());
+    assembly.board().backTo(place.time());
+    reached = place.time();
+  }
+
+  /** Does something to the station between two samples. */
+  synchronized void run(Runnable deed) {
+    deed.run();
+  }
+}
