@@ -1,15 +1,21 @@
 package tunwarden.app;
 
+import java.io.IOException;
 import java.io.PrintWriter;
+import java.nio.file.Files;
+import java.nio.file.Path;
 import java.util.List;
+import java.util.concurrent.Callable;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Help;
 import picocli.CommandLine.IVersionProvider;
-import picocli.CommandLine.Model.CommandSpec;
-import picocli.CommandLine.Spec;
+import picocli.CommandLine.Mixin;
+import tunwarden.app.board.RehearsalDashboard;
 import tunwarden.app.instruments.InstrumentsCommand;
 import tunwarden.app.options.Commands;
+import tunwarden.app.options.ScreenOptions;
+import tunwarden.config.CellarFile;
 
 /**
  * The program's entry. It only finds the command that was asked for, runs it, and turns what went
@@ -35,7 +41,7 @@ import tunwarden.app.options.Commands;
       "",
       "Exit codes: 0 done, 1 the answer is no or the work failed, 2 wrong usage or input."
     })
-public final class Main implements Runnable {
+public final class Main implements Callable<Integer> {
   static final String NAME = "tunwarden";
 
   /** Every command, in the order the help lists them; add a class here to add a command. */
@@ -45,7 +51,7 @@ public final class Main implements Runnable {
 
   private static final int HELP_WIDTH = 90;
 
-  @Spec private CommandSpec spec;
+  @Mixin private ScreenOptions screen = new ScreenOptions();
 
   /** Runs the program and ends the process with its exit code. */
   public static void main(String[] args) {
@@ -83,9 +89,18 @@ public final class Main implements Runnable {
         .setExecutionExceptionHandler(Faults::execution);
   }
 
+  /**
+   * Without a command: the cellar file's instruments, or a rehearsal where there is no such file.
+   */
   @Override
-  public void run() {
-    spec.commandLine().usage(spec.commandLine().getOut());
+  public Integer call() throws IOException {
+    Path cellarFile = Path.of(CellarFile.USUAL_NAME);
+    if (Files.exists(cellarFile)) {
+      WatchCommand.watch(cellarFile, screen);
+    } else {
+      RehearsalDashboard.run(Fronts.of(screen));
+    }
+    return 0;
   }
 
   /** The version that the build wrote into the jar. */

@@ -36,8 +36,12 @@ public final class WatchCommand implements Callable<Integer> {
 
   @Override
   public Integer call() throws IOException {
+    watch(cellarFile, screen);
+    return 0;
+  }
+
+  static void watch(Path cellarFile, ScreenOptions screen) throws IOException {
     Cellar cellar = CellarFile.read(cellarFile);
     LiveDashboard.run(cellar, Fronts.of(screen), new SerialLinks(), InstantSource.system());
-    return 0;
   }
 }
