@@ -73,15 +73,20 @@ public final class World {
     ClosedVessel vessel = vessel(setting, setting.relation);
     GasMix gas = setting.present.vessel().gas();
     double[] partial = new double[GASES];
+    vessel.partials(paAbsolute, setting.temperatureK, gas, airPa, partial);
+    return rested(setting, vessel, partial, paAbsolute);
+  }
+
+  private static World rested(
+      Setting setting, ClosedVessel vessel, double[] partialPa, double paAbsolute) {
     double[] head = new double[GASES];
     double[] all = new double[GASES];
-    vessel.partials(paAbsolute, setting.temperatureK, gas, airPa, partial);
-    headspaceMol(vessel, partial, setting.temperatureK, head);
-    vessel.solver().inventoryAt(partial, paAbsolute, setting.temperatureK, all);
+    headspaceMol(vessel, partialPa, setting.temperatureK, head);
+    vessel.solver().inventoryAt(partialPa, paAbsolute, setting.temperatureK, all);
     for (int i = 0; i < GASES; i++) {
       all[i] -= head[i];
     }
-    return new World(setting, vessel, partial, head, all);
+    return new World(setting, vessel, partialPa, head, all);
   }
 
   /**
@@ -179,7 +184,12 @@ public final class World {
 
   /** Dissolved CO2 once closed and at rest at a temperature, kg/m³. */
   public double restDissolvedKgPerM3(double temperatureK) {
-    ClosedSolver used = settled(temperatureK, 0);
+    return restDissolvedKgPerM3(temperatureK, 0);
+  }
+
+  /** The same with more CO2 made, kg/m³ of liquid. */
+  public double restDissolvedKgPerM3(double temperatureK, double madeKgPerM3) {
+    ClosedSolver used = settled(temperatureK, madeKgPerM3);
     return used.dissolvedKgPerM3(Gas.CO2) * relationAt(temperatureK);
   }
 
@@ -276,6 +286,14 @@ public final class World {
       head[i] = headMol[i] * Math.pow(left, 1 / (1 + ADIABATIC * setting.ventCooling));
     }
     return new World(setting, vessel, partial, head, liquidMol);
+  }
+
+  /** The same vessel at rest at another pressure, Pa gauge, under CO2 alone: air swept out. */
+  public World restedUnderCo2(double paGauge) {
+    double total = paGauge + setting.ambientPa;
+    double[] partial = new double[GASES];
+    vessel.partials(total, setting.temperatureK, GasMix.CO2, 0, partial);
+    return rested(setting, vessel, partial, total);
   }
 
   /** Gas in the headspace less that of another world, all species, kg. */
