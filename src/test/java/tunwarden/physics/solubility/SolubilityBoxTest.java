@@ -10,7 +10,10 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.EnumSource;
 import tunwarden.physics.gas.Gas;
+import tunwarden.physics.gas.GasMix;
+import tunwarden.physics.gas.RealGas;
 import tunwarden.physics.liquid.BeerMethod;
+import tunwarden.physics.liquid.Kell1975;
 import tunwarden.physics.liquid.Liquid;
 import tunwarden.physics.liquid.LiquidKind;
 import tunwarden.units.BadQuantityException;
@@ -72,6 +75,40 @@ class SolubilityBoxTest {
           solubility.dissolvedKgPerM3(Gas.CO2, 2e5, 3e5, t),
           line.prepareAt(t).dissolvedKgPerM3(2e5, 3e5));
     }
+  }
+
+  /**
+   * In the gas phase a line takes the rest of the headspace as air, or as CO2 for any other gas;
+   * that must stay near the fugacity of the true blend.
+   */
+  @Test
+  void theGasPhaseOfALineIsNearThatOfTheTrueBlend() {
+    GasMix[] blends = {GasMix.CO2, GasMix.parse("70N2/30CO2"), GasMix.parse("10N2/5O2/85CO2")};
+    for (GasMix blend : blends) {
+      for (Gas gas : new Gas[] {Gas.CO2, Gas.N2, Gas.O2}) {
+        for (double bar = 1; bar <= 10 && blend.fraction(gas) > 0; bar++) {
+          double t = 277.15;
+          double pa = bar * 1e5;
+          double share = blend.fraction(gas);
+          double ratio = fugacityCoefficient(gas, share, pa, t);
+          double whole = RealGas.fugacityCoefficient(gas, blend, pa, t);
+          double within = gas == Gas.CO2 ? 0.0015 : 0.012;
+          assertEquals(whole, ratio, within, gas + " in " + blend + " at " + bar);
+        }
+      }
+    }
+  }
+
+  /** What the line uses, told from the dissolved amount with the liquid's terms taken out. */
+  private static double fugacityCoefficient(Gas gas, double share, double pa, double t) {
+    LiquidSolubility water = LiquidSolubility.of(Liquid.WATER);
+    double moles = water.dissolvedKgPerM3(gas, share * pa, pa, t) / gas.molarMass();
+    double volume = DissolvedVolume.m3PerMol(gas, t);
+    double waterMoles = Kell1975.kgPerM3(t) * (1 - moles * volume) / 0.018015268;
+    double fraction = moles / (moles + waterMoles);
+    double reference = gas == Gas.CO2 ? 101_325 : water.vapourPressurePa(t);
+    double squeeze = Math.exp(volume * (pa - reference) / (8.314462618 * t));
+    return fraction * Math.exp(WaterLine.lnHenryPa(gas, t)) * squeeze / (share * pa);
   }
 
   @Test
