@@ -1,5 +1,7 @@
 package tunwarden.alarm;
 
+import java.util.Locale;
+
 /** States of ISA-18.2; an alarm in state normal is not listed. */
 public enum AlarmState {
   NORMAL("normal"),
@@ -18,6 +20,11 @@ public enum AlarmState {
 
   public String word() {
     return word;
+  }
+
+  /** Name in files and metrics: {@code returned-unacknowledged}. */
+  public String id() {
+    return name().toLowerCase(Locale.ROOT).replace('_', '-');
   }
 
   /** Whether a person has yet to say that they have seen it. */

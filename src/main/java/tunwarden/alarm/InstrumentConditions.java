@@ -74,9 +74,9 @@ final class InstrumentConditions {
     String last = last(name, observed, display).map(value -> "; last " + value).orElse("");
     String age =
         observed.at().isPresent() && trouble(observed.quality()) == Trouble.SILENT
-            ? " for " + Words.duration(observed.age())
+            ? ", " + Words.duration(observed.age()) + " ago"
             : "";
-    return "The " + name + " reading: " + observed.quality().why() + age + last + ".";
+    return "The " + name + " reading: " + observed.quality().why() + last + age + ".";
   }
 
   private static Optional<String> last(String name, Observed observed, Display display) {
