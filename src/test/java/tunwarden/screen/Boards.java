@@ -86,6 +86,21 @@ public final class Boards {
         Optional.empty());
   }
 
+  /** The same board at another moment, nothing new having been read. */
+  public static Board at(Board board, Instant now) {
+    return new Board(
+        board.origin(),
+        now,
+        board.zone(),
+        board.staleAfter(),
+        board.vessels(),
+        board.stationAlarms(),
+        board.instruments(),
+        board.replay(),
+        board.journal(),
+        board.progress());
+  }
+
   private static ReplayStatus replay(Instant now) {
     return new ReplayStatus(
         "cooling-lost.csv",

@@ -11,12 +11,13 @@ import java.nio.file.Path;
  * Screens kept as text and compared cell by cell. After a change that was meant, run the tests with
  * {@code -Dscreens.record=true}, look at what changed in the files, and commit them.
  */
-final class GoldenFile {
+public final class GoldenFile {
   private static final Path FOLDER = Path.of("src/test/resources/screens");
 
   private GoldenFile() {}
 
-  static void check(String name, String actual) throws IOException {
+  /** Compares with the file of that name; {@code record} writes it first. */
+  public static void check(String name, String actual) throws IOException {
     Path file = FOLDER.resolve(name + ".txt");
     if (Boolean.getBoolean("screens.record")) {
       Files.createDirectories(FOLDER);

@@ -25,22 +25,8 @@ public final class Preview {
     Instant start = Instant.now().truncatedTo(ChronoUnit.SECONDS);
     Board board = Boards.three(origin, start);
     Dashboard.run(
-        () -> later(board),
+        () -> Boards.at(board, Instant.now()),
         new RecordingDesk(),
         new DashboardOptions(look, false, true, OutputStream.nullOutputStream()));
-  }
-
-  private static Board later(Board board) {
-    return new Board(
-        board.origin(),
-        Instant.now(),
-        board.zone(),
-        board.staleAfter(),
-        board.vessels(),
-        board.stationAlarms(),
-        board.instruments(),
-        board.replay(),
-        board.journal(),
-        board.progress());
   }
 }

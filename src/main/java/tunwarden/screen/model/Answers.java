@@ -136,8 +136,8 @@ final class Answers {
   }
 
   private static Turn seek(Model model, String text) {
-    ReplayStatus replay = model.board().replay().orElseThrow();
-    Instant to = SeekTime.parse(text, replay, model.board().zone());
+    need(model.board().replay().isPresent(), "only a replay can go to another time");
+    Instant to = SeekTime.parse(text, model.board().replay().get(), model.board().zone());
     return Turn.asking(model, desk -> desk.seek(to));
   }
 }

@@ -13,7 +13,10 @@ import tunwarden.screen.view.Ink;
 import tunwarden.screen.view.Palette;
 import tunwarden.screen.view.Role;
 
-/** Puts a canvas on the terminal library's screen, touching only cells that changed. */
+/**
+ * Puts a canvas on the terminal library's screen, touching only cells that changed. The second half
+ * of a two-column character is left alone, since setting it would blank the first.
+ */
 final class Painter {
   private static final int MOST_CACHED = 20_000;
 
@@ -43,7 +46,8 @@ final class Painter {
     boolean changed = whole;
     for (int y = 0; y < canvas.rows(); y++) {
       for (int x = 0; x < canvas.columns(); x++) {
-        if (whole || differs(canvas, x, y)) {
+        boolean secondHalf = canvas.glyph(x, y).isEmpty();
+        if (!secondHalf && (whole || differs(canvas, x, y))) {
           screen.setCharacter(x, y, character(canvas.glyph(x, y), canvas.role(x, y), theme));
           changed = true;
         }
@@ -74,10 +78,9 @@ final class Painter {
     if (ink.reverse()) {
       strokes.add(SGR.REVERSE);
     }
-    String glyph = cell.glyph().isEmpty() ? " " : cell.glyph();
     TextColor foreground = colour(ink.foreground());
     TextColor background = colour(ink.background());
-    TextCharacter[] made = TextCharacter.fromString(glyph, foreground, background, strokes);
+    TextCharacter[] made = TextCharacter.fromString(cell.glyph(), foreground, background, strokes);
     return made[0];
   }
 

@@ -4,7 +4,7 @@ import java.util.Arrays;
 
 /**
  * A grid of cells to draw on. Everything outside is cut off, so no view can draw past its edge. A
- * two-column character leaves its second cell empty; combining marks join the cell before them.
+ * two-column character leaves its second cell empty.
  */
 public final class Canvas {
   private static final String BLANK = " ";
@@ -89,13 +89,9 @@ public final class Canvas {
       if (at + wide > end) {
         break;
       }
-      if (wide == 0) {
-        join(at - 1, y, codePoint);
-      } else {
-        set(at, y, symbol(codePoint), as);
-        if (wide == 2) {
-          set(at + 1, y, "", as);
-        }
+      set(at, y, symbol(codePoint), as);
+      if (wide == 2) {
+        set(at + 1, y, "", as);
       }
       at += wide;
     }
@@ -122,12 +118,6 @@ public final class Canvas {
   public void fill(int x, int y, int width, String character, Role as) {
     for (int i = x; i < x + width; i++) {
       put(i, y, 1, character, as);
-    }
-  }
-
-  private void join(int x, int y, int mark) {
-    if (inside(x, y) && glyph[y * columns + x].length() == 1) {
-      glyph[y * columns + x] += Character.toString(mark);
     }
   }
 

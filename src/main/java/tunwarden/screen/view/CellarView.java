@@ -40,7 +40,7 @@ final class CellarView {
     if (listed.isEmpty()) {
       String none =
           model.listing().filter().isEmpty()
-              ? "No vessel is described yet."
+              ? "Nothing has been read yet."
               : "No vessel matches '" + model.listing().filter() + "'; Esc shows all.";
       canvas.put(area.x() + 3, area.y() + 2, none, Role.NORMAL);
       return;

@@ -4,7 +4,7 @@ import java.text.Normalizer;
 
 /**
  * How many columns text takes. East Asian wide and fullwidth characters and pictographs take two
- * (Unicode Standard Annex #11, ranges in outline), combining marks none.
+ * (Unicode Standard Annex #11, ranges in outline), every other drawable character one.
  */
 final class Cells {
   /** First and last code point of each stretch of two-column characters. */
@@ -26,23 +26,34 @@ final class Cells {
     {0x20000, 0x3FFFD},
   };
 
+  /** Stretches whose width the terminal library and terminals judge differently; not drawn. */
+  private static final int[][] DISPUTED = {
+    {0x1160, 0x11FF},
+    {0x2F00, 0x2FFB},
+    {0x303F, 0x303F},
+    {0x3105, 0x312F},
+    {0x3190, 0x31E3},
+    {0x3300, 0x33FF},
+    {0xA000, 0xA4C6},
+    {0xFFE0, 0xFFE6},
+  };
+
+  private static final int STAND_IN = '?';
+
   private Cells() {}
 
-  /** Columns of one code point: 0, 1 or 2. */
+  /** Columns of one drawable code point: 1 or 2. */
   static int width(int codePoint) {
-    if (codePoint < 0x300) {
-      return 1;
-    }
-    int type = Character.getType(codePoint);
-    if (type == Character.NON_SPACING_MARK || type == Character.ENCLOSING_MARK) {
-      return 0;
-    }
-    for (int[] stretch : WIDE) {
+    return isIn(WIDE, codePoint) ? 2 : 1;
+  }
+
+  private static boolean isIn(int[][] stretches, int codePoint) {
+    for (int[] stretch : stretches) {
       if (codePoint <= stretch[1]) {
-        return codePoint >= stretch[0] ? 2 : 1;
+        return codePoint >= stretch[0];
       }
     }
-    return 1;
+    return false;
   }
 
   /** Columns of a text. */
@@ -65,8 +76,10 @@ final class Cells {
   }
 
   /**
-   * Text safe to draw: composed where possible, with control and invisible formatting characters
-   * (escapes, direction overrides, joiners, variation selectors) and unpaired surrogates taken out.
+   * Text safe to draw, one character to the cell: letters composed with their marks where Unicode
+   * has the composed letter; other marks, control and invisible formatting characters (escapes,
+   * direction overrides, joiners, variation selectors) and unpaired surrogates taken out. The
+   * terminal library takes a letter with a loose mark for two columns, so none may reach it.
    */
   static String clean(String text) {
     if (isPlain(text)) {
@@ -76,13 +89,22 @@ final class Cells {
     Normalizer.normalize(text, Normalizer.Form.NFC)
         .codePoints()
         .filter(Cells::isDrawable)
+        .map(Cells::standIn)
         .forEach(kept::appendCodePoint);
     return kept.toString();
   }
 
+  /** Narrow characters beyond the basic plane are taken for wide by the terminal library. */
+  private static int standIn(int codePoint) {
+    boolean narrowBeyond = codePoint > Character.MAX_VALUE && width(codePoint) == 1;
+    return narrowBeyond || isIn(DISPUTED, codePoint) ? STAND_IN : codePoint;
+  }
+
   private static boolean isDrawable(int codePoint) {
     return switch (Character.getType(codePoint)) {
-      case Character.CONTROL,
+      case Character.NON_SPACING_MARK,
+          Character.ENCLOSING_MARK,
+          Character.CONTROL,
           Character.FORMAT,
           Character.SURROGATE,
           Character.PRIVATE_USE,

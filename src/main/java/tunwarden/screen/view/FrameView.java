@@ -21,7 +21,7 @@ final class FrameView {
   /** Draws the frame and returns what is left for the page. */
   static Area draw(Canvas canvas, Model model) {
     drawHeader(canvas, model);
-    drawStrip(canvas, model.board());
+    drawStrip(canvas, model);
     int top = 2;
     if (model.board().replay().isPresent()) {
       ReplayBar.draw(canvas, top++, model.board());
@@ -75,8 +75,8 @@ final class FrameView {
   }
 
   /** The worst alarm nobody has acknowledged, or how many stand. */
-  private static void drawStrip(Canvas canvas, Board board) {
-    List<Alarm> alarms = AlarmList.of(board);
+  private static void drawStrip(Canvas canvas, Model model) {
+    List<Alarm> alarms = AlarmList.of(model.board());
     List<Alarm> open = alarms.stream().filter(a -> a.state().wantsAcknowledging()).toList();
     if (open.isEmpty()) {
       drawLine(canvas, 1, " " + quietWords(alarms), Role.DIM);
@@ -101,7 +101,7 @@ final class FrameView {
             + worst.kind().word()
             + gone
             + ": "
-            + worst.text();
+            + InUnits.of(worst.text(), model.look().units());
     canvas.put(0, 1, end, text, role);
   }
 

@@ -57,15 +57,16 @@ final class GasPanel {
     writeMargin();
     writeOutlook(assessment.outlook());
     for (Caution caution : assessment.outlook().cautions()) {
-      paragraph("! ", caution.text(), caution.grave() ? Role.CAUTION : Role.NORMAL);
+      paragraph(
+          "! ", InUnits.of(caution.text(), units), caution.grave() ? Role.CAUTION : Role.NORMAL);
     }
     assessment
         .estimate()
         .map(Estimate::ignorance)
         .filter(text -> !text.isEmpty())
-        .ifPresent(text -> named("unknown", text, Role.NORMAL));
+        .ifPresent(text -> named("unknown", InUnits.of(text, units), Role.NORMAL));
     for (String note : assessment.notes()) {
-      named("note", note, Role.NORMAL);
+      named("note", InUnits.of(note, units), Role.NORMAL);
     }
   }
 
@@ -140,9 +141,14 @@ final class GasPanel {
     }
     for (Projection p : outlook.projections()) {
       if (p.scenario() == Scenario.HOLD || p.scenario() == Scenario.REBOUND) {
-        lines.add(new Line(p.words(), units.gauge(p.paGauge()), Role.NORMAL));
+        lines.add(
+            new Line(p.scenario() == Scenario.HOLD ? "hold" : "vented", projected(p), Role.NORMAL));
       }
     }
+  }
+
+  private String projected(Projection p) {
+    return InUnits.of(p.words(), units) + ": " + units.gauge(p.paGauge());
   }
 
   private void named(String name, String text, Role role) {

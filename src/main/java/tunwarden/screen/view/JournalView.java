@@ -64,7 +64,8 @@ final class JournalView {
       canvas.put(x + TIME, y, VESSEL - 1, e.vessel(), Role.NORMAL);
       canvas.put(x + TIME + VESSEL, y, KIND - 1, e.kind(), Role.NORMAL);
       int textX = x + TIME + VESSEL + KIND;
-      canvas.put(textX, y, area.right() - textX, e.text(), Role.NORMAL);
+      canvas.put(
+          textX, y, area.right() - textX, InUnits.of(e.text(), model.look().units()), Role.NORMAL);
     }
     if (chosen) {
       for (int x = area.x(); x < area.right(); x++) {
@@ -92,7 +93,12 @@ final class JournalView {
   private static String stateWords(Model model, Alarm alarm) {
     String until =
         alarm.shelvedUntil().map(t -> " until " + Words.minute(t, model.board().zone())).orElse("");
-    return alarm.priority().word() + ", " + alarm.state().word() + until + ": " + alarm.text();
+    return alarm.priority().word()
+        + ", "
+        + alarm.state().word()
+        + until
+        + ": "
+        + InUnits.of(alarm.text(), model.look().units());
   }
 
   private static String time(Model model, java.time.Instant time) {
@@ -109,7 +115,8 @@ final class JournalView {
             .map(a -> a.text() + " " + a.action())
             .orElseGet(() -> rows.entries().get(chosen - rows.alarms().size()).text());
     int y = area.y() + 1;
-    for (String line : Words.wrap(text, area.columns() - 4)) {
+    String turned = InUnits.of(text, model.look().units());
+    for (String line : Words.wrap(turned, area.columns() - 4)) {
       if (y < area.bottom()) {
         canvas.put(area.x() + 2, y++, line, Role.NORMAL);
       }

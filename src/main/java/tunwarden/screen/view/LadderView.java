@@ -185,7 +185,8 @@ final class LadderView {
     canvas.putRight(valueX() + VALUE_COLUMNS - 1, y, units.pressureNumber(rung.paGauge()), role);
     int end = valueX() + VALUE_COLUMNS + DISTANCE_COLUMNS - 1;
     canvas.putRight(end, y, distance(rung, nowPa), now ? Role.DIM : role);
-    String label = signOf(rung.kind()) + " " + (now ? nowWords(rung) : rung.label());
+    String label =
+        signOf(rung.kind()) + " " + (now ? nowWords(rung) : InUnits.of(rung.label(), units));
     int x = canvas.put(labelX(), y, area.right() - labelX(), label, role);
     String more = reached ? " ! reached" : now ? "" : rangeOf(rung);
     if (canvas.width(more) <= area.right() - x) {

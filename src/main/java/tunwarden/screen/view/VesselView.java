@@ -21,7 +21,7 @@ final class VesselView {
   static void draw(Canvas canvas, Area area, Model model) {
     Optional<VesselBoard> chosen = model.vessel();
     if (chosen.isEmpty()) {
-      canvas.put(area.x() + 2, area.y() + 1, "No vessel.", Role.NORMAL);
+      canvas.put(area.x() + 2, area.y() + 1, "Nothing has been read yet.", Role.NORMAL);
       return;
     }
     Optional<VesselBoard> second = neighbour(model, chosen.get());
