@@ -19,4 +19,12 @@ public interface ByteLinkFactory {
    * @throws PortException when it cannot be opened, with a sentence for the user
    */
   ByteLink open(String port, LineSettings settings, Use use) throws PortException;
+
+  /**
+   * What the port's name leads to at this moment: another answer than at opening means that the
+   * port was unplugged or came back as something else, even where the open line does not say so.
+   */
+  default String behind(String port) {
+    return port;
+  }
 }

@@ -22,6 +22,7 @@ public final class PortRunner implements AutoCloseable {
   private static final long FIRST_PAUSE_MS = 250;
   private static final long LONGEST_PAUSE_MS = 2000;
   private static final long JOIN_MS = 3000;
+  private static final Duration LOOK_EVERY = Duration.ofSeconds(1);
   private static final Duration LEAST_SILENCE = Duration.ofSeconds(5);
   private static final Duration LONGEST_SILENCE = Duration.ofSeconds(60);
 
@@ -38,6 +39,7 @@ public final class PortRunner implements AutoCloseable {
   private String detail = "";
   private Instant since;
   private Instant lastHeard;
+  private Instant lookedAt;
 
   /** Prepares a runner; nothing is opened before {@link #start}. */
   public PortRunner(
@@ -105,15 +107,35 @@ public final class PortRunner implements AutoCloseable {
       settle(link);
       talk.begin();
       lastHeard = clock.instant();
+      lookedAt = lastHeard;
       become(LinkState.OPEN, plan.line().words());
+      String opened = links.behind(plan.port());
       while (!isClosing() && !deaf()) {
         long before = tally.bytes();
         talk.turn(link);
         if (tally.bytes() > before) {
           lastHeard = clock.instant();
+        } else {
+          refuseStranger(opened);
         }
         become(silent(LEAST_SILENCE, 5) ? LinkState.SILENT : talk.state(), plan.line().words());
       }
+    }
+  }
+
+  /**
+   * Some drivers never say that a port was pulled: a quiet port is looked up by name once a second.
+   */
+  private void refuseStranger(String opened) throws PortException {
+    Instant now = clock.instant();
+    Instant latest = lastHeard.isAfter(lookedAt) ? lastHeard : lookedAt;
+    if (Duration.between(latest, now).compareTo(LOOK_EVERY) <= 0) {
+      return;
+    }
+    lookedAt = now;
+    if (!links.behind(plan.port()).equals(opened)) {
+      throw new PortException(
+          PortException.Reason.GONE, plan.port() + " has gone; is it plugged in?");
     }
   }
 

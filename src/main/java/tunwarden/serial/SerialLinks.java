@@ -3,8 +3,10 @@ package tunwarden.serial;
 import com.fazecast.jSerialComm.SerialPort;
 import com.fazecast.jSerialComm.SerialPortInvalidPortException;
 import java.io.IOException;
+import java.nio.file.Files;
 import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
+import java.nio.file.attribute.BasicFileAttributes;
 import java.util.Locale;
 import tunwarden.wire.profile.LineSettings;
 
@@ -39,6 +41,17 @@ public final class SerialLinks implements ByteLinkFactory {
     return new SerialLink(port, serial, use);
   }
 
+  @Override
+  public String behind(String port) {
+    try {
+      Path node = Path.of(port).toRealPath();
+      Object key = Files.readAttributes(node, BasicFileAttributes.class).fileKey();
+      return node + " " + key;
+    } catch (IOException | InvalidPathException e) {
+      return isWindows() ? port : "";
+    }
+  }
+
   /** Where a rehearsal speaks. It has no parity, and the C library calls asking for it an error. */
   private static boolean isPseudoTerminal(String port) {
     try {
@@ -46,6 +59,10 @@ public final class SerialLinks implements ByteLinkFactory {
     } catch (IOException | InvalidPathException e) {
       return false;
     }
+  }
+
+  private static boolean isWindows() {
+    return System.getProperty("os.name").toLowerCase(Locale.ROOT).startsWith("windows");
   }
 
   private static LineSettings plain(LineSettings settings) {
@@ -101,8 +118,7 @@ public final class SerialLinks implements ByteLinkFactory {
 
   /** The sentence for an error code of the operating system met while opening. */
   static PortException refused(String port, int code) {
-    boolean windows = System.getProperty("os.name").toLowerCase(Locale.ROOT).startsWith("windows");
-    PortException.Reason reason = windows ? windowsReason(code) : unixReason(code);
+    PortException.Reason reason = isWindows() ? windowsReason(code) : unixReason(code);
     String sentence =
         switch (reason) {
           case ABSENT ->

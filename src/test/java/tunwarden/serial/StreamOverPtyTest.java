@@ -3,6 +3,8 @@ package tunwarden.serial;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.io.IOException;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.Duration;
 import java.time.InstantSource;
@@ -110,6 +112,23 @@ class StreamOverPtyTest {
         Eventually.within(REOPENED, "reopened", () -> runner.health().state().isOpen());
       }
       assertEquals(2, runner.health().traffic().troubles().get(Trouble.LOST));
+    }
+  }
+
+  @Test
+  void aPortThatVanishesWithoutAWordIsMissedByItsName() throws IOException {
+    try (Pty pty = Pty.plugged(folder);
+        PortRunner runner = runner(pty)) {
+      opened(runner);
+      pty.send("\nP=1.0 T=4\n");
+      Eventually.within(SOON, "read", () -> readings(Quantity.PRESSURE).size() == 1);
+      Files.delete(Path.of(pty.port()));
+      Eventually.within(REOPENED, "loss seen", () -> !runner.health().state().isOpen());
+      pty.unplug();
+      pty.plug();
+      Eventually.within(REOPENED, "reopened", () -> runner.health().state().isOpen());
+      pty.send("\nP=1.0 T=4\n");
+      Eventually.within(SOON, "read again", () -> readings(Quantity.PRESSURE).size() == 2);
     }
   }
 
