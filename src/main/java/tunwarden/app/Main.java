@@ -12,9 +12,11 @@ import picocli.CommandLine.Help;
 import picocli.CommandLine.IVersionProvider;
 import picocli.CommandLine.Mixin;
 import tunwarden.app.board.RehearsalDashboard;
+import tunwarden.app.cellar.CellarCommand;
 import tunwarden.app.instruments.InstrumentsCommand;
 import tunwarden.app.options.Commands;
 import tunwarden.app.options.ScreenOptions;
+import tunwarden.app.reckon.Reckon;
 import tunwarden.config.CellarFile;
 
 /**
@@ -47,7 +49,12 @@ public final class Main implements Callable<Integer> {
   /** Every command, in the order the help lists them; add a class here to add a command. */
   private static final List<Class<?>> COMMANDS =
       List.of(
-          WatchCommand.class, ReplayCommand.class, RehearseCommand.class, InstrumentsCommand.class);
+          WatchCommand.class, //
+          ReplayCommand.class, //
+          Reckon.class, //
+          RehearseCommand.class, //
+          InstrumentsCommand.class, //
+          CellarCommand.class);
 
   private static final int HELP_WIDTH = 90;
 

@@ -1,0 +1,2 @@
+/** Making and checking cellar files. */
+package tunwarden.app.cellar;
