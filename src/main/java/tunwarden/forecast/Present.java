@@ -40,6 +40,9 @@ public record Present(
    */
   public record Activity(Mode mode, Spread transferPerS, double gasMadeKgPerM3PerS) {}
 
+  /** Share of a stated amount of left-over air that it may be off by, 95 %: no source. */
+  private static final double AIR_SHARE = 0.5;
+
   /** Median and 95 % factor of kL for a liquid of which nothing else is known, m/s. */
   private static final double TRANSFER_M_PER_S = 5e-6;
 
@@ -74,7 +77,8 @@ public record Present(
         temperatureK,
         temperatureK,
         Optional.empty(),
-        Uncertain.exactly(vessel.contents().airPaAbsolute()),
+        new Uncertain(
+            vessel.contents().airPaAbsolute(), AIR_SHARE * vessel.contents().airPaAbsolute()),
         new Activity(Mode.SEALED, usualTransfer(vessel.fillM3()), 0));
   }
 
