@@ -5,6 +5,7 @@ import java.util.Comparator;
 import java.util.List;
 import tunwarden.forecast.Outlook;
 import tunwarden.forecast.Projection;
+import tunwarden.forecast.relief.ReliefLevels;
 import tunwarden.vessel.Limits;
 import tunwarden.vessel.ReliefSetting;
 
@@ -41,6 +42,16 @@ public final class Ladder {
 
   private static void addRelief(List<Rung> rungs, ReliefSetting relief) {
     rungs.add(new Rung(Rung.Kind.RELIEF_SET, relief.setPaGauge(), "relief set"));
-    rungs.add(new Rung(Rung.Kind.EARLIEST_LIFT, relief.earliestLiftPaGauge(), "earliest lift"));
+    ReliefLevels levels = ReliefLevels.of(relief);
+    rungs.add(new Rung(Rung.Kind.ACCUMULATION, levels.accumulationPaGauge(), "full flow at last"));
+    rungs.add(new Rung(Rung.Kind.EARLIEST_LIFT, levels.earliestLiftPaGauge(), "earliest lift"));
+    if (levels.operatingCeilingPaGauge() > 0) {
+      rungs.add(
+          new Rung(
+              Rung.Kind.OPERATING_CEILING, levels.operatingCeilingPaGauge(), "operating ceiling"));
+    }
+    if (levels.lowestReseatPaGauge() > 0) {
+      rungs.add(new Rung(Rung.Kind.RESEAT, levels.lowestReseatPaGauge(), "shut again at last"));
+    }
   }
 }

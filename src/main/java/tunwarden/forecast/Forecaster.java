@@ -10,6 +10,7 @@ import java.util.function.DoublePredicate;
 import tunwarden.estimate.Estimate.Spread;
 import tunwarden.estimate.Mode;
 import tunwarden.units.Constants;
+import tunwarden.vessel.Limits;
 import tunwarden.vessel.ReliefSetting;
 
 /** Everything that is forecast for every vessel all the time. Pure. */
@@ -20,6 +21,7 @@ public final class Forecaster {
   private static final double CLOSE_K = 0.005;
   private static final double WORTH_CHILLING_K = 2;
   private static final double WORTH_VENTING_PA = 0.05e5;
+  private static final double ABSURD_PA = 10e5;
   private static final Duration LATER = Duration.ofHours(8);
 
   private static final int REST = 0;
@@ -98,12 +100,31 @@ public final class Forecaster {
     if (toK <= present.temperatureK()) {
       return;
     }
-    projections.add(projection(Scenario.WARM, "warmed to " + celsius(toK), paGauge));
+    boolean full = ensemble.middle().isFullAt(toK);
+    String words = "warmed to " + celsius(toK) + (full ? ", full: over" : "");
+    projections.add(projection(Scenario.WARM, words, capped(paGauge, present)));
     double unmixed = ensemble.middle().unmixedPaGauge(toK);
     cautions.warm(
         toK,
-        paGauge,
+        capped(paGauge, present),
         Double.isFinite(unmixed) ? OptionalDouble.of(unmixed) : OptionalDouble.empty());
+  }
+
+  /**
+   * A vessel full of liquid runs to thousands of bar on paper; far above every limit the number
+   * says nothing more and would only spoil scales.
+   */
+  private static Spread capped(Spread paGauge, Present present) {
+    Limits limits = present.vessel().limits();
+    double highest =
+        Math.max(
+            limits.vesselPaGauge().orElse(0),
+            limits.relief().map(ReliefSetting::setPaGauge).orElse(0.0));
+    double cap = Math.max(ABSURD_PA, 2 * highest);
+    return new Spread(
+        Math.min(paGauge.low(), cap),
+        Math.min(paGauge.middle(), cap),
+        Math.min(paGauge.high(), cap));
   }
 
   private static void addChill(

@@ -140,6 +140,15 @@ class ForecasterTest {
   }
 
   @Test
+  void aVesselThatWarmsFullSaysSoInsteadOfThousandsOfBar() {
+    Present present = Present.atRest(tank(1.996), 0.5 * BAR, COLD_K);
+    Projection warm = Forecaster.outlook(present).projection(Scenario.WARM).orElseThrow();
+    assertEquals("warmed to 24 °C, full: over", warm.words());
+    assertEquals(10 * BAR, warm.paGauge(), 1e-6);
+    assertTrue(warm.highPaGauge() <= 10 * BAR + 1e-6);
+  }
+
+  @Test
   void nothingIsForecastForAnEmptyOrImpossibleVessel() {
     assertEquals(Outlook.NONE, Forecaster.outlook(Present.atRest(tank(1.8), -2 * BAR, COLD_K)));
     assertFalse(Forecaster.outlook(Present.atRest(tank(1.8), 0.1 * BAR, COLD_K)).trend().isEmpty());
