@@ -6,6 +6,11 @@ public final class Estimators {
 
   /** The estimator the program uses; stateless and safe to share. */
   public static Estimator standard() {
+    return new BankEstimator();
+  }
+
+  /** The plain equilibrium reading, as a yardstick. */
+  public static Estimator plain() {
     return new PlainEstimator();
   }
 }

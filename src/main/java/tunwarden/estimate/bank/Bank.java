@@ -16,8 +16,14 @@ public final class Bank {
    * @param paAbsolute total pressure, for the slopes of gas and solubility
    * @param fillKelvin temperature at which the fill was stated
    * @param unmixedS time since the modes last exchanged weight, s
+   * @param drift running surprise of the whole bank, in standard deviations
    */
-  public record Setting(double kelvin, double paAbsolute, double fillKelvin, double unmixedS) {}
+  public record Setting(
+      double kelvin, double paAbsolute, double fillKelvin, double unmixedS, double drift) {
+    Setting withDrift(double other) {
+      return new Setting(kelvin, paAbsolute, fillKelvin, unmixedS, other);
+    }
+  }
 
   Bank(double[] filters, double[] weights, Setting setting) {
     this.filters = filters;

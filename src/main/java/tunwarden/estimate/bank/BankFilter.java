@@ -2,10 +2,10 @@ package tunwarden.estimate.bank;
 
 import static tunwarden.estimate.bank.Gaussian.AIR;
 import static tunwarden.estimate.bank.Gaussian.BIAS;
-import static tunwarden.estimate.bank.Gaussian.FILL;
 import static tunwarden.estimate.bank.Gaussian.GAS;
 import static tunwarden.estimate.bank.Gaussian.HEAT;
 import static tunwarden.estimate.bank.Gaussian.LIQUID;
+import static tunwarden.estimate.bank.Gaussian.PACE;
 import static tunwarden.estimate.bank.Gaussian.RELATION;
 import static tunwarden.estimate.bank.Gaussian.SOURCE;
 
@@ -14,7 +14,6 @@ public final class BankFilter {
   private static final double MIX_EVERY_S = 60;
   private static final double HOUR_S = 3600;
   private static final double DAY_S = 86_400;
-  private static final double FORGET_S = 30 * DAY_S;
 
   /** Slow change of a pinned level or of a nearly tight headspace: 3 mbar in an hour. */
   private static final double LEVEL_PA2_PER_S = 300.0 * 300 / HOUR_S;
@@ -25,7 +24,11 @@ public final class BankFilter {
   private static final double RELATION_PER_K = 2e-6;
   private static final double LIQUID_SHARE = 0.002;
   private static final double SOURCE_SHARE = 0.3;
-  private static final double SOURCE_LEAST = 0.05 * Prior.SOURCE_SD;
+  private static final double SOURCE_LEAST = 0.05 * Prior.MADE_SD;
+  private static final double PACE_PER_S = 0.2 * 0.2 / DAY_S;
+  private static final double DRIFT_MEMORY_S = 1200;
+  private static final double DRIFT_LIMIT = 3.5;
+  private static final double NOT_SEEN = -1e300;
   private static final double COLD_MEMORY_S = 180;
   private static final double ADIABATIC_EXPONENT = 0.23;
   private static final double TAIL = 6;
@@ -44,7 +47,7 @@ public final class BankFilter {
     double ambient = medium.vessel().site().ambientPaAbsolute();
     double total = Math.max(paGauge + ambient, 1000);
     double dry = Math.max(total - medium.vapourPa(kelvin), 500);
-    Bank.Setting setting = new Bank.Setting(kelvin, total, kelvin, 0);
+    Bank.Setting setting = new Bank.Setting(kelvin, total, kelvin, 0, 0);
     Passage way = passage(setting, setting, 0);
     double[] filters = new double[Grid.FILTERS * Gaussian.STRIDE];
     Gaussian x = new Gaussian();
@@ -66,111 +69,143 @@ public final class BankFilter {
         medium.co2Share());
   }
 
-  /** Lets time pass up to a reading, which only sets the working point here. */
-  public Bank move(Bank bank, Look look) {
+  /** Lets time pass up to a reading, and weighs and corrects every filter by it. */
+  public Bank step(Bank bank, Look look) {
     Bank.Setting before = bank.setting;
     double unmixed = before.unmixedS() + look.seconds();
     boolean mixes = unmixed >= MIX_EVERY_S;
+    double[] filters = bank.filters.clone();
+    double[] weights = bank.weights.clone();
+    boolean shaken = mixes && Math.abs(before.drift()) > DRIFT_LIMIT;
+    if (mixes) {
+      Mixer mixer = new Mixer();
+      mixer.mix(
+          filters, weights, shaken ? prior.whenNothingFits() : prior.transitions(unmixed), shaken);
+      mixer.mixPaces(filters, weights, unmixed);
+    }
     Bank.Setting after =
         new Bank.Setting(
-            look.kelvin(), look.paAbsolute(), before.fillKelvin(), mixes ? 0 : unmixed);
+            look.kelvin(), look.paAbsolute(), before.fillKelvin(), mixes ? 0 : unmixed, 0);
     Passage way = passage(before, after, look.seconds());
-    double[] filters = new double[bank.filters.length];
-    double[] weights = bank.weights.clone();
-    Gaussian x = new Gaussian();
-    Motion motion = new Motion();
-    double warmed = Math.abs(look.kelvin() - before.kelvin());
+    double[] evidence = new double[Grid.FILTERS];
+    Worker worker = new Worker(way, look, Math.abs(look.kelvin() - before.kelvin()));
     for (int f = 0; f < Grid.FILTERS; f++) {
-      x.load(bank.filters, f * Gaussian.STRIDE);
-      if (Grid.modeOf(f) == Grid.HELD || look.flowing()) {
+      evidence[f] = weights[f] > Mixer.ASLEEP ? worker.work(filters, weights[f], f) : NOT_SEEN;
+    }
+    double[] next = look.flowing() ? weights : reweigh(weights, evidence);
+    double drift = shaken || look.flowing() ? 0 : drift(before.drift(), worker.surprise, look);
+    return new Bank(filters, next, after.withDrift(drift));
+  }
+
+  /**
+   * Running sum of the standardized surprise of the whole bank, scaled to unit variance: far from
+   * zero when the readings leave every filter on the same side.
+   */
+  private static double drift(double before, double surprise, Look look) {
+    double fresh = 1 - Math.exp(-look.seconds() / DRIFT_MEMORY_S);
+    return (1 - fresh) * before + Math.sqrt(fresh * (2 - fresh)) * surprise;
+  }
+
+  /** The working space of one step. */
+  private final class Worker {
+    private final Gaussian x = new Gaussian();
+    private final Motion motion = new Motion();
+    private final double[] row = new double[Gaussian.STATES];
+    private final Passage way;
+    private final Look look;
+    private final double warmed;
+    private final double dry;
+    private double surprise;
+
+    Worker(Passage way, Look look, double warmed) {
+      this.way = way;
+      this.look = look;
+      this.warmed = warmed;
+      this.dry = look.paAbsolute() - medium.vapourPa(look.kelvin());
+    }
+
+    /** Moves, disturbs and corrects one filter; its log-likelihood comes back. */
+    double work(double[] filters, double weight, int f) {
+      x.load(filters, f * Gaussian.STRIDE);
+      int mode = Grid.modeOf(f);
+      if (mode == Grid.HELD || look.flowing()) {
         motion.held(x, Grid.transferPerS(f), way);
       } else {
         motion.sealed(x, Grid.transferPerS(f), way);
       }
-      disturb(x, f, way, warmed);
+      disturb(x, mode, way, warmed);
       if (look.flowing()) {
-        flow(x, motion, way, look);
+        flow(x, way, look);
       }
+      double miss = dry - predict(x, mode, row);
+      double total = x.varianceOf(row) + look.variance();
+      surprise += weight * Math.max(-4, Math.min(4, miss / Math.sqrt(total)));
+      x.condition(miss, total * Math.max(1, miss * miss / (total * 25)));
+      bound(x, mode);
       x.store(filters, f * Gaussian.STRIDE);
+      return logLikelihood(miss, total);
     }
-    if (mixes) {
-      new Mixer().mix(filters, weights, prior.transitions(unmixed));
-      forget(weights, unmixed);
-    }
-    return new Bank(filters, weights, after);
   }
 
-  /** Noise that stands for everything the model leaves out. */
-  private static void disturb(Gaussian x, int filter, Passage way, double warmed) {
+  /**
+   * Noise that stands for everything the model leaves out. The level of a sealed vessel wanders
+   * exactly as that of a pinned one, liquid and headspace together, so that a constant reading
+   * speaks for neither.
+   */
+  private static void disturb(Gaussian x, int mode, Passage way, double warmed) {
     double dt = way.seconds();
-    double perPa = way.after() * Math.exp(x.mean[FILL]);
-    x.addVariance(GAS, perPa * perPa * LEVEL_PA2_PER_S * dt);
+    x.addWander(1, mode == Grid.HELD ? 0 : way.solubility(), LEVEL_PA2_PER_S * dt);
     x.addVariance(BIAS, BIAS_PA2_PER_S * dt);
     x.addVariance(RELATION, RELATION_PER_K * warmed);
     double liquid = LIQUID_SHARE * x.mean[LIQUID];
     x.addVariance(LIQUID, liquid * liquid * dt / DAY_S);
+    x.addVariance(PACE, PACE_PER_S * dt);
     Motion.soothe(x, dt, COLD_MEMORY_S);
-    if (Grid.modeOf(filter) != Grid.STILL) {
+    if (mode != Grid.STILL) {
       double step = SOURCE_SHARE * Math.max(Math.abs(x.mean[SOURCE]), SOURCE_LEAST);
       x.addVariance(SOURCE, 2 * step * step * dt / DAY_S);
     }
   }
 
   /** Gas passes a valve: whatever the reading says, every species changes in proportion. */
-  private void flow(Gaussian x, Motion motion, Passage way, Look look) {
+  private void flow(Gaussian x, Passage way, Look look) {
     double dry = look.paAbsolute() - medium.vapourPa(look.kelvin()) - x.mean[BIAS];
-    double own = (x.mean[GAS] + x.mean[AIR]) * Math.exp(-x.mean[FILL]) / way.after();
+    double own = x.mean[GAS] + x.mean[AIR];
     double ratio = Math.max(0.02, Math.min(50, dry / own));
-    motion.stretch(x, ratio, way.supplyShare());
-    double doubt = 0.03 * (dry - own) * way.after();
+    if (ratio <= 1) {
+      Motion.scale(x, ratio);
+    } else {
+      Motion.charge(x, dry - own, way.supplyShare());
+    }
+    double doubt = 0.03 * (dry - own);
     x.addVariance(GAS, doubt * doubt);
     double heat = ADIABATIC_EXPONENT * Math.log(ratio);
     x.mean[HEAT] += 0.4 * heat;
     x.addVariance(HEAT, 0.16 * heat * heat);
   }
 
-  private void forget(double[] weights, double seconds) {
-    double share = Math.min(0.5, seconds / FORGET_S) / Grid.FILTERS;
-    for (int f = 0; f < weights.length; f++) {
-      weights[f] += share * 0.1;
+  /** Keeps a filter in its class of transfer and out of the impossible. */
+  private static void bound(Gaussian x, int mode) {
+    if (mode == Grid.MAKING) {
+      x.mean[SOURCE] = Math.max(x.mean[SOURCE], 0);
+    } else if (mode == Grid.LEAKING) {
+      x.mean[SOURCE] = Math.min(x.mean[SOURCE], 0);
     }
-    Bank.normalized(weights);
-  }
-
-  /** Weighs and corrects every filter by a pressure. */
-  public Bank see(Bank bank, Look look) {
-    double[] filters = bank.filters.clone();
-    double[] evidence = new double[Grid.FILTERS];
-    Gaussian x = new Gaussian();
-    double[] row = new double[Gaussian.STATES];
-    double perPa = medium.headspace(look.kelvin(), look.paAbsolute(), bank.setting.fillKelvin());
-    double dry = look.paAbsolute() - medium.vapourPa(look.kelvin());
-    for (int f = 0; f < Grid.FILTERS; f++) {
-      x.load(filters, f * Gaussian.STRIDE);
-      double predicted = predict(x, f, perPa, row);
-      double total = x.varianceOf(row) + look.variance();
-      double miss = dry - predicted;
-      evidence[f] = logLikelihood(miss, total);
-      x.condition(row, miss, total * Math.max(1, miss * miss / (total * 25)));
-      x.store(filters, f * Gaussian.STRIDE);
-    }
-    double[] weights = look.flowing() ? bank.weights : reweigh(bank.weights, evidence);
-    return new Bank(filters, weights, bank.setting);
+    double reach = 1.5;
+    x.mean[PACE] = Math.max(-reach, Math.min(reach, x.mean[PACE]));
+    x.mean[LIQUID] = Math.max(x.mean[LIQUID], 0);
+    x.mean[GAS] = Math.max(x.mean[GAS], 1);
   }
 
   /** Dry absolute pressure a filter expects, and its slopes. */
-  private static double predict(Gaussian x, int filter, double perPa, double[] row) {
-    boolean held = Grid.modeOf(filter) == Grid.HELD;
-    double heat = held ? 1 : 1 + x.mean[HEAT];
-    double per = Math.exp(-x.mean[FILL]) / perPa;
-    double cold = (x.mean[GAS] + x.mean[AIR]) * per;
-    row[GAS] = per * heat;
-    row[AIR] = per * heat;
-    row[FILL] = -cold * heat;
-    row[HEAT] = held ? 0 : cold;
+  private static double predict(Gaussian x, int mode, double[] row) {
+    double heat = mode == Grid.HELD ? 0 : x.mean[HEAT];
+    double rest = x.mean[GAS] + x.mean[AIR];
+    row[GAS] = 1 + heat;
+    row[AIR] = 1 + heat;
+    row[HEAT] = mode == Grid.HELD ? 0 : rest;
     row[BIAS] = 1;
-    row[RELATION] = 0;
-    return cold * heat + x.mean[BIAS];
+    return rest * (1 + heat) + x.mean[BIAS];
   }
 
   /** Student's t with a few degrees of freedom: one odd reading is no proof. */
@@ -201,10 +236,10 @@ public final class BankFilter {
     row[LIQUID] = 1;
     for (int f = 0; f < Grid.FILTERS; f++) {
       x.load(filters, f * Gaussian.STRIDE);
-      double total = x.variance(LIQUID) + standardU * standardU;
+      double total = x.varianceOf(row) + standardU * standardU;
       double miss = dissolved - x.mean[LIQUID];
       evidence[f] = logLikelihood(miss, total);
-      x.condition(row, miss, total);
+      x.condition(miss, total);
       x.store(filters, f * Gaussian.STRIDE);
     }
     return new Bank(filters, reweigh(bank.weights, evidence), bank.setting);
@@ -214,7 +249,7 @@ public final class BankFilter {
   public Bank valveWorked(Bank bank) {
     double[] filters = bank.filters.clone();
     double[] weights = bank.weights.clone();
-    new Mixer().mix(filters, weights, prior.afterValve());
+    new Mixer().mix(filters, weights, prior.afterValve(), true);
     return new Bank(filters, weights, bank.setting);
   }
 }

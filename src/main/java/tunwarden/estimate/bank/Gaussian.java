@@ -1,14 +1,15 @@
 package tunwarden.estimate.bank;
 
 /**
- * Working copy of one filter: mean and covariance over the eight hidden quantities. Masses are kg
- * per m3 of liquid; air is counted as the mass of CO2 with the same number of molecules.
+ * Working copy of one filter: mean and covariance over the nine hidden quantities. Gas is counted
+ * as partial pressure, so that a reading is linear in it and the uncertain fill enters only where
+ * masses are balanced.
  */
 final class Gaussian {
-  /** CO2 in the headspace. */
+  /** CO2 in the headspace: partial pressure at the liquid's temperature, Pa. */
   static final int GAS = 0;
 
-  /** CO2 in the liquid. */
+  /** CO2 in the liquid, kg/m3. */
   static final int LIQUID = 1;
 
   /**
@@ -28,10 +29,13 @@ final class Gaussian {
   /** Headspace gas temperature over liquid temperature, minus one. */
   static final int HEAT = 6;
 
-  /** Air and other gas that does not dissolve. */
+  /** Air and other gas that does not dissolve: partial pressure, Pa. */
   static final int AIR = 7;
 
-  static final int STATES = 8;
+  /** Logarithm of the true transfer coefficient over the one the filter is centred on. */
+  static final int PACE = 8;
+
+  static final int STATES = 9;
 
   /** Doubles a packed filter takes: means, then the lower triangle. */
   static final int STRIDE = STATES + STATES * (STATES + 1) / 2;
@@ -76,6 +80,14 @@ final class Gaussian {
     cov[i * STATES + i] += value;
   }
 
+  /** Adds a common disturbance to gas and liquid. */
+  void addWander(double gas, double liquid, double variance) {
+    cov[0] += gas * gas * variance;
+    cov[1] += gas * liquid * variance;
+    cov[STATES] += gas * liquid * variance;
+    cov[STATES + 1] += liquid * liquid * variance;
+  }
+
   /** Multiplies the spread of one quantity; the mean is left alone. */
   void scaleSpread(int i, double factor) {
     for (int j = 0; j < STATES; j++) {
@@ -94,16 +106,20 @@ final class Gaussian {
 
   /** Replaces the spreads of gas and liquid by those of two linear combinations of everything. */
   void mixRows(double[] gasRow, double[] liquidRow) {
-    for (int j = 0; j < STATES; j++) {
-      double u = 0;
-      double v = 0;
-      for (int z = 0; z < STATES; z++) {
-        double p = cov[z * STATES + j];
-        u += gasRow[z] * p;
-        v += liquidRow[z] * p;
+    java.util.Arrays.fill(first, 0);
+    java.util.Arrays.fill(second, 0);
+    for (int z = 0; z < STATES; z++) {
+      double g = gasRow[z];
+      double l = liquidRow[z];
+      if (g == 0 && l == 0) {
+        continue;
       }
-      first[j] = u;
-      second[j] = v;
+      int row = z * STATES;
+      for (int j = 0; j < STATES; j++) {
+        double p = cov[row + j];
+        first[j] += g * p;
+        second[j] += l * p;
+      }
     }
     double gg = 0;
     double gl = 0;
@@ -127,21 +143,28 @@ final class Gaussian {
 
   /** Variance of a linear combination. */
   double varianceOf(double[] row) {
+    java.util.Arrays.fill(first, 0);
+    for (int z = 0; z < STATES; z++) {
+      double h = row[z];
+      if (h != 0) {
+        int k = z * STATES;
+        for (int i = 0; i < STATES; i++) {
+          first[i] += h * cov[k + i];
+        }
+      }
+    }
     double sum = 0;
     for (int i = 0; i < STATES; i++) {
-      double u = 0;
-      for (int j = 0; j < STATES; j++) {
-        u += cov[i * STATES + j] * row[j];
-      }
-      first[i] = u;
-      sum += u * row[i];
+      sum += first[i] * row[i];
     }
     return sum;
   }
 
-  /** Conditions on a measurement of a linear combination; {@code total} is its whole variance. */
-  void condition(double[] row, double innovation, double total) {
-    varianceOf(row);
+  /**
+   * Conditions on a measurement of the combination that {@link #varianceOf} was last asked for;
+   * {@code total} is the variance of the measurement and the combination together.
+   */
+  void condition(double innovation, double total) {
     for (int i = 0; i < STATES; i++) {
       double gain = first[i] / total;
       mean[i] += gain * innovation;

@@ -1,8 +1,8 @@
 package tunwarden.estimate.bank;
 
 /**
- * The assumptions of the bank: transfer coefficient by half decades, air left behind in four
- * classes, and three ways the headspace can be connected.
+ * The assumptions of the bank: transfer coefficient by 0.8 of a decade, air left behind in four
+ * classes, and five ways the headspace can be connected.
  */
 public final class Grid {
   /** Sealed, nothing made, nothing lost. */
@@ -11,13 +11,23 @@ public final class Grid {
   /** Pressure pinned from outside. */
   public static final int HELD = 1;
 
-  /** Sealed, with gas being made in the liquid or leaking from the headspace. */
-  public static final int SOURCE = 2;
+  /** Sealed, with gas being made in the liquid. */
+  public static final int MAKING = 2;
+
+  /** Closed, but losing gas from the headspace. */
+  public static final int LEAKING = 3;
+
+  /** Sealed since a moment ago, after pressure was held: the liquid may hold anything. */
+  public static final int CLOSED = 4;
 
   /** How many ways of connection. */
-  public static final int MODES = 3;
+  public static final int MODES = 5;
 
-  static final int TRANSFERS = 9;
+  static final int TRANSFERS = 6;
+
+  /** Spread of ln kLa within a class; neighbouring classes overlap at one spread. */
+  static final double TRANSFER_LN_SD = 0.75;
+
   static final int AIRS = 4;
   static final int FILTERS = TRANSFERS * AIRS * MODES;
   private static final double[] TRANSFER_PER_S = new double[TRANSFERS];
@@ -26,7 +36,7 @@ public final class Grid {
 
   static {
     for (int i = 0; i < TRANSFERS; i++) {
-      TRANSFER_PER_S[i] = Math.pow(10, -7 + 0.5 * i);
+      TRANSFER_PER_S[i] = Math.pow(10, -7 + i * 0.8);
     }
   }
 

@@ -1,88 +1,145 @@
 package tunwarden.estimate.bank;
 
 import static tunwarden.estimate.bank.Grid.MODES;
-import static tunwarden.estimate.bank.Grid.SOURCE;
-import static tunwarden.estimate.bank.Grid.STILL;
 
 /**
- * Lets the three modes of one cell exchange weight, as the interacting multiple model does (Blom
- * and Bar-Shalom, IEEE Trans. Autom. Control 33 (1988) 780), with one difference: a mode keeps its
- * own Gaussian as long as that carries most of its weight, and is otherwise replaced by the
+ * Lets the modes of one cell exchange weight, as the interacting multiple model does (Blom and
+ * Bar-Shalom, IEEE Trans. Autom. Control 33 (1988) 780), with one difference: a mode keeps its own
+ * Gaussian as long as that carries most of its weight, and is otherwise replaced by the
  * moment-matched mixture of what may have become it. Blending a wide belief into a narrow one a
  * little at every step would ruin the narrow one long before it is refuted.
  */
 final class Mixer {
   private static final double KEEPS = 0.5;
+  private static final double IDLE = 0.1;
+  private static final double LEAST_SHARE = 1e-3;
 
-  private final Gaussian[] from = {new Gaussian(), new Gaussian(), new Gaussian()};
+  /** Weight below which a filter is left alone until it is born again from its neighbours. */
+  static final double ASLEEP = 1e-10;
+
+  private static final double FLOOR = 1e-30;
+
+  /** Time after which a vessel's transfer coefficient may well be another, s. */
+  private static final double PACE_CHANGES_S = 3 * 86_400;
+
+  private final Gaussian one = new Gaussian();
   private final Gaussian into = new Gaussian();
   private final double[] share = new double[MODES];
+  private final double[] total = new double[MODES];
   private final double[] shift = new double[Gaussian.STATES];
 
-  /** Mixes every cell of the bank in place. */
-  void mix(double[] filters, double[] weights, double[][] transitions) {
+  /**
+   * Mixes every cell of the bank in place.
+   *
+   * @param anew whether the readings have left the bank: a mode with little weight of its own then
+   *     starts afresh from the others
+   */
+  void mix(double[] filters, double[] weights, double[][] transitions, boolean anew) {
+    java.util.Arrays.fill(total, 0);
+    for (int f = 0; f < Grid.FILTERS; f++) {
+      total[Grid.modeOf(f)] += weights[f];
+    }
     for (int cell = 0; cell < Grid.FILTERS; cell += MODES) {
-      mixCell(filters, weights, cell, transitions);
+      mixCell(filters, weights, cell, transitions, anew);
     }
     Bank.normalized(weights);
   }
 
-  private void mixCell(double[] filters, double[] weights, int cell, double[][] transitions) {
-    for (int m = 0; m < MODES; m++) {
-      from[m].load(filters, (cell + m) * Gaussian.STRIDE);
-    }
+  private void mixCell(
+      double[] filters, double[] weights, int cell, double[][] transitions, boolean anew) {
     double[] next = new double[MODES];
     for (int target = 0; target < MODES; target++) {
       for (int m = 0; m < MODES; m++) {
         next[target] += weights[cell + m] * transitions[m][target];
       }
     }
+    boolean[] yields = new boolean[MODES];
+    double[] born = new double[MODES * Gaussian.STRIDE];
     for (int target = 0; target < MODES; target++) {
       double own = weights[cell + target] * transitions[target][target];
-      if (own < KEEPS * next[target]) {
-        merge(weights, cell, target, transitions, next[target] - own);
-        into.store(filters, (cell + target) * Gaussian.STRIDE);
+      boolean weak = own < KEEPS * next[target];
+      boolean idle = anew && next[target] - own > 0.01 * own && total[target] < IDLE;
+      yields[target] = (weak || idle) && next[target] > ASLEEP;
+      if (yields[target]) {
+        merge(filters, weights, cell, target, transitions);
+        into.store(born, target * Gaussian.STRIDE);
       }
     }
-    System.arraycopy(next, 0, weights, cell, MODES);
+    for (int m = 0; m < MODES; m++) {
+      if (yields[m]) {
+        int at = m * Gaussian.STRIDE;
+        System.arraycopy(born, at, filters, cell * Gaussian.STRIDE + at, Gaussian.STRIDE);
+      }
+      weights[cell + m] = Math.max(next[m], FLOOR);
+    }
   }
 
   /** Moment-matched mixture of what comes from the other modes. */
   private void merge(
-      double[] weights, int cell, int target, double[][] transitions, double foreign) {
+      double[] filters, double[] weights, int cell, int target, double[][] transitions) {
+    double foreign = 0;
+    for (int m = 0; m < MODES; m++) {
+      share[m] = m == target ? 0 : weights[cell + m] * transitions[m][target];
+      foreign += share[m];
+    }
     into.clear();
     for (int m = 0; m < MODES; m++) {
-      share[m] = m == target ? 0 : weights[cell + m] * transitions[m][target] / foreign;
-      for (int i = 0; i < Gaussian.STATES; i++) {
-        into.mean[i] += share[m] * sourceAware(m, target, i);
+      share[m] /= foreign;
+      if (share[m] > LEAST_SHARE) {
+        turn(filters, cell + m, m, target);
+        for (int i = 0; i < Gaussian.STATES; i++) {
+          into.mean[i] += share[m] * one.mean[i];
+        }
       }
     }
     for (int m = 0; m < MODES; m++) {
-      if (share[m] > 0) {
-        spread(m, target, share[m]);
+      if (share[m] > LEAST_SHARE) {
+        turn(filters, cell + m, m, target);
+        spread(share[m]);
       }
     }
   }
 
-  private void spread(int m, int target, double share) {
+  /** Loads a filter as it would be under another mode. */
+  private void turn(double[] filters, int filter, int mode, int target) {
+    one.load(filters, filter * Gaussian.STRIDE);
+    boolean keeps =
+        (mode == Grid.MAKING && target == Grid.HELD)
+            || (mode == Grid.HELD && target == Grid.MAKING && one.mean[Gaussian.SOURCE] > 0);
+    if (!keeps) {
+      Prior.beginSource(one, target);
+    }
+  }
+
+  private void spread(double weight) {
     for (int i = 0; i < Gaussian.STATES; i++) {
-      shift[i] = sourceAware(m, target, i) - into.mean[i];
+      shift[i] = one.mean[i] - into.mean[i];
     }
     for (int i = 0; i < Gaussian.STATES; i++) {
       for (int j = 0; j < Gaussian.STATES; j++) {
-        double own = from[m].cov[i * Gaussian.STATES + j];
-        if (target == STILL && (i == Gaussian.SOURCE || j == Gaussian.SOURCE)) {
-          own = 0;
-        }
-        into.cov[i * Gaussian.STATES + j] += share * (own + shift[i] * shift[j]);
+        int k = i * Gaussian.STATES + j;
+        into.cov[k] += weight * (one.cov[k] + shift[i] * shift[j]);
       }
-    }
-    if (target == SOURCE && m == STILL) {
-      into.addVariance(Gaussian.SOURCE, share * Prior.SOURCE_SD * Prior.SOURCE_SD);
     }
   }
 
-  private double sourceAware(int m, int target, int state) {
-    return state == Gaussian.SOURCE && target == STILL ? 0 : from[m].mean[state];
+  /** Lets neighbouring classes of transfer exchange weight, since a vessel may be roused. */
+  void mixPaces(double[] filters, double[] weights, double seconds) {
+    double hop = Math.min(0.1, seconds / PACE_CHANGES_S);
+    int stride = Grid.AIRS * MODES;
+    double[] old = weights.clone();
+    for (int f = 0; f < Grid.FILTERS; f++) {
+      double below = f >= stride ? hop * old[f - stride] : 0;
+      double above = f + stride < Grid.FILTERS ? hop * old[f + stride] : 0;
+      double own = (1 - 2 * hop) * old[f];
+      if (own < below + above && below + above > ASLEEP) {
+        one.load(filters, (below > above ? f - stride : f + stride) * Gaussian.STRIDE);
+        one.pin(Gaussian.PACE, 0);
+        one.addVariance(Gaussian.PACE, Grid.TRANSFER_LN_SD * Grid.TRANSFER_LN_SD);
+        one.store(filters, f * Gaussian.STRIDE);
+      }
+      weights[f] = own + below + above;
+    }
+    Bank.normalized(weights);
   }
 }

@@ -5,6 +5,7 @@ import static tunwarden.estimate.bank.Gaussian.FILL;
 import static tunwarden.estimate.bank.Gaussian.GAS;
 import static tunwarden.estimate.bank.Gaussian.HEAT;
 import static tunwarden.estimate.bank.Gaussian.LIQUID;
+import static tunwarden.estimate.bank.Gaussian.PACE;
 import static tunwarden.estimate.bank.Gaussian.RELATION;
 import static tunwarden.estimate.bank.Gaussian.SOURCE;
 
@@ -22,91 +23,94 @@ final class Motion {
   private final double[] liquidRow = new double[Gaussian.STATES];
 
   /** Nothing passes the valves: the sum of liquid and headspace changes by the source alone. */
-  void sealed(Gaussian x, double transfer, Passage way) {
+  void sealed(Gaussian x, double centre, Passage way) {
+    scale(x, way.before() / way.after());
+    double transfer = centre * Math.exp(x.mean[PACE]);
     double dt = way.seconds();
-    double beta = way.solubility() / way.middle() * Math.exp(x.mean[RELATION] - x.mean[FILL]);
+    double k = way.after() * Math.exp(x.mean[FILL]);
+    double beta = way.solubility() / k * Math.exp(x.mean[RELATION]);
     double lambda = transfer * (1 + beta);
     double share = beta / (1 + beta);
     double gone = gone(lambda * dt);
     double left = 1 - gone;
-    double all = x.mean[GAS] + x.mean[LIQUID];
-    double apart = x.mean[LIQUID] - share * all;
-    double perSource = sourceIntoLiquid(x.mean[SOURCE] >= 0, transfer * beta, lambda, dt);
-    double liquid = share * all + apart * left + x.mean[SOURCE] * perSource;
+    double before = x.mean[LIQUID];
+    double all = before + k * x.mean[GAS];
+    double apart = before - share * all;
+    double source = x.mean[SOURCE];
+    double perSource = sourceIntoLiquid(source >= 0, transfer * beta, lambda, dt);
+    double liquid = before - apart * gone + source * perSource;
     double byBeta = beta * (all / ((1 + beta) * (1 + beta)) * gone - apart * transfer * dt * left);
+    double gas = x.mean[GAS] + (before - liquid + source * dt) / k;
     clearRows();
-    liquidRow[GAS] = share * gone;
+    liquidRow[GAS] = share * gone * k;
     liquidRow[LIQUID] = share * gone + left;
     liquidRow[SOURCE] = perSource;
     liquidRow[RELATION] = byBeta;
-    liquidRow[FILL] = -byBeta;
-    gasRow[GAS] = 1 - liquidRow[GAS];
-    gasRow[LIQUID] = 1 - liquidRow[LIQUID];
-    gasRow[SOURCE] = dt - perSource;
-    gasRow[RELATION] = -byBeta;
-    gasRow[FILL] = byBeta;
-    x.mean[GAS] = all + x.mean[SOURCE] * dt - liquid;
+    liquidRow[FILL] = share * gone * k * x.mean[GAS] - byBeta;
+    liquidRow[PACE] = -apart * lambda * dt * left;
+    gasRow[GAS] = 1 - liquidRow[GAS] / k;
+    gasRow[LIQUID] = (1 - liquidRow[LIQUID]) / k;
+    gasRow[SOURCE] = (dt - perSource) / k;
+    gasRow[RELATION] = -byBeta / k;
+    gasRow[FILL] = x.mean[GAS] - gas - liquidRow[FILL] / k;
+    gasRow[PACE] = -liquidRow[PACE] / k;
+    x.mean[GAS] = gas;
     x.mean[LIQUID] = liquid;
     x.mixRows(gasRow, liquidRow);
   }
 
-  /** The pressure is pinned: the liquid relaxes towards it, the headspace follows the pin. */
-  void held(Gaussian x, double transfer, Passage way) {
-    double gone = gone(transfer * way.seconds());
+  /** The pressure is pinned: the liquid relaxes towards it, whatever gas that takes. */
+  void held(Gaussian x, double centre, Passage way) {
+    double transfer = centre * Math.exp(x.mean[PACE]);
+    double dt = way.seconds();
+    double gone = gone(transfer * dt);
     double atRest = atRest(x, way);
-    double perSource = transfer > 0 ? gone / transfer : way.seconds();
-    double liquid =
-        x.mean[LIQUID] + (atRest - x.mean[LIQUID]) * gone + Math.max(0, x.mean[SOURCE]) * perSource;
-    double released = x.mean[LIQUID] - liquid + Math.max(0, x.mean[SOURCE]) * way.seconds();
+    double made = Math.max(0, x.mean[SOURCE]);
+    double perSource = gone / transfer;
+    double before = x.mean[LIQUID];
+    double liquid = before + (atRest - before) * gone + made * perSource;
     clearRows();
-    liquidRow[GAS] = gone * atRest / Math.max(x.mean[GAS], 1e-9);
+    liquidRow[GAS] = gone * way.solubility() * Math.exp(x.mean[RELATION]);
     liquidRow[LIQUID] = 1 - gone;
-    liquidRow[SOURCE] = x.mean[SOURCE] > 0 ? perSource : 0;
+    liquidRow[SOURCE] = made > 0 ? perSource : 0;
     liquidRow[RELATION] = gone * atRest;
-    liquidRow[FILL] = -gone * atRest;
+    liquidRow[PACE] = (atRest - before) * transfer * dt * (1 - gone);
     gasRow[GAS] = 1;
     x.mean[LIQUID] = liquid;
     x.mixRows(gasRow, liquidRow);
-    stretch(x, way.after() / way.before(), way.supplyShare());
-    exchange(x, released, way.supplyShare());
+    double k = way.after() * Math.exp(x.mean[FILL]);
+    double intoGas = (before - liquid + made * dt) / k;
+    double total = x.mean[GAS] + x.mean[AIR];
+    exchange(x, intoGas + total * (way.before() / way.after() - 1), way.supplyShare());
   }
 
-  /** Scales what the headspace holds; growth is fed from the supply, shrinkage takes all alike. */
-  void stretch(Gaussian x, double factor, double supplyShare) {
-    if (factor <= 1) {
-      x.mean[GAS] *= factor;
-      x.mean[AIR] *= factor;
-      x.scaleSpread(GAS, factor);
-      x.scaleSpread(AIR, factor);
-      return;
-    }
-    double grown = factor - 1;
-    double inert = 1 - supplyShare;
-    double added = grown * (x.mean[GAS] + x.mean[AIR]);
-    x.mean[GAS] += supplyShare * added;
-    x.mean[AIR] += inert * added;
-    clearRows();
-    gasRow[GAS] = 1 + supplyShare * grown;
-    gasRow[AIR] = supplyShare * grown;
-    liquidRow[LIQUID] = 1;
-    x.mixRows(gasRow, liquidRow);
-    x.scaleSpread(AIR, 1 + inert * grown);
+  /** Every species alike. */
+  static void scale(Gaussian x, double factor) {
+    x.mean[GAS] *= factor;
+    x.mean[AIR] *= factor;
+    x.scaleSpread(GAS, factor);
+    x.scaleSpread(AIR, factor);
   }
 
-  /**
-   * Liquid gives gas to a pinned headspace and sweeps air out, or takes gas and draws supply in.
-   */
-  private void exchange(Gaussian x, double released, double supplyShare) {
-    double held = x.mean[GAS] + x.mean[AIR];
-    double swept;
-    if (released >= 0) {
-      swept = x.mean[AIR] * gone(released / Math.max(held, 1e-9));
-      x.scaleSpread(AIR, x.mean[AIR] > 0 ? 1 - swept / x.mean[AIR] : 1);
+  /** Gas enters (Pa) and an equal amount leaves a pinned headspace, or the supply makes it up. */
+  private static void exchange(Gaussian x, double surplus, double supplyShare) {
+    double total = x.mean[GAS] + x.mean[AIR];
+    double inert;
+    if (surplus >= 0) {
+      double kept = Math.exp(-surplus / total);
+      inert = x.mean[AIR] * kept;
+      x.scaleSpread(AIR, kept);
     } else {
-      swept = Math.max((1 - supplyShare) * released, -0.5 * x.mean[GAS]);
+      inert = x.mean[AIR] - (1 - supplyShare) * Math.max(surplus, -0.5 * total);
     }
-    x.mean[AIR] -= swept;
-    x.mean[GAS] += swept;
+    x.mean[GAS] = total - inert;
+    x.mean[AIR] = inert;
+  }
+
+  /** Gas drawn from the supply, Pa. */
+  static void charge(Gaussian x, double added, double supplyShare) {
+    x.mean[GAS] += supplyShare * added;
+    x.mean[AIR] += (1 - supplyShare) * added;
   }
 
   /** Cold or hot gas comes back to the liquid's temperature; how fast is known within a factor. */
@@ -120,10 +124,7 @@ final class Motion {
 
   /** What the liquid would hold at rest under the filter's own CO2 pressure. */
   static double atRest(Gaussian x, Passage way) {
-    return way.solubility()
-        / way.middle()
-        * x.mean[GAS]
-        * Math.exp(x.mean[RELATION] - x.mean[FILL]);
+    return way.solubility() * x.mean[GAS] * Math.exp(x.mean[RELATION]);
   }
 
   /** 1 - exp(-u), accurate for small u. */

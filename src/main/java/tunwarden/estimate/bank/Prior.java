@@ -1,8 +1,10 @@
 package tunwarden.estimate.bank;
 
+import static tunwarden.estimate.bank.Grid.CLOSED;
 import static tunwarden.estimate.bank.Grid.HELD;
+import static tunwarden.estimate.bank.Grid.LEAKING;
+import static tunwarden.estimate.bank.Grid.MAKING;
 import static tunwarden.estimate.bank.Grid.MODES;
-import static tunwarden.estimate.bank.Grid.SOURCE;
 import static tunwarden.estimate.bank.Grid.STILL;
 
 import tunwarden.physics.liquid.LiquidKind;
@@ -18,14 +20,22 @@ final class Prior {
   private static final double STILL_KL = 5e-6;
   private static final double MAKING_KL = 5e-5;
   private static final double KL_LN_SD = 1.6;
-  private static final double EVEN_SHARE = 0.5;
+  private static final double EVEN_SHARE = 0.8;
   private static final double[] AIR_SHARE = {0.94, 0.02, 0.02, 0.02};
   private static final double SOLUBILITY_PER_K = 0.03;
+  private static final double FIRST_READING_PA = 200;
   private static final double NEAR_ATMOSPHERE_PA = 8_000;
   private static final double DAY_S = 86_400;
 
-  /** Spread of the rate at which gas is made, kg/m3/s: a brisk fermentation is 4 g/L a day. */
-  static final double SOURCE_SD = 4e-5;
+  /** Middle of the rate at which gas is made, kg/m3/s: 2 g/L a day; 4 is brisk. */
+  static final double MADE = 2.4e-5;
+
+  static final double MADE_SD = 2.4e-5;
+
+  /** Middle of a leak, kg/m3/s: some 10 mbar an hour in a usual vessel. */
+  static final double LEAK = -0.8e-5;
+
+  static final double LEAK_SD = 0.8e-5;
 
   private final Medium medium;
   private final Vessel vessel;
@@ -42,7 +52,7 @@ final class Prior {
     double[] weights = new double[Grid.FILTERS];
     for (int f = 0; f < Grid.FILTERS; f++) {
       int mode = Grid.modeOf(f);
-      double kl = mode == SOURCE ? MAKING_KL : STILL_KL;
+      double kl = mode == MAKING ? MAKING_KL : STILL_KL;
       double air = Grid.airPa(Grid.airOf(f), vessel.contents().airPaAbsolute());
       double fits = air < 0.9 * dryPa ? AIR_SHARE[Grid.airOf(f)] : 0;
       weights[f] = modes[mode] * fits * transferShare(Grid.transferPerS(f), kl / depth);
@@ -52,11 +62,12 @@ final class Prior {
 
   private static double transferShare(double transfer, double centre) {
     double z = Math.log(transfer / centre) / KL_LN_SD;
-    return EVEN_SHARE / Grid.TRANSFERS + (1 - EVEN_SHARE) * 0.287 * Math.exp(-0.5 * z * z);
+    return EVEN_SHARE / Grid.TRANSFERS + (1 - EVEN_SHARE) * 0.43 * Math.exp(-0.5 * z * z);
   }
 
   private double[] modes() {
-    double source = ferments() ? 0.1 : 0.02;
+    double making = ferments() ? 0.1 : 0;
+    double leaking = 0.002;
     double held =
         switch (vessel.closure()) {
           case SEALED -> 0.02;
@@ -65,8 +76,10 @@ final class Prior {
         };
     double[] modes = new double[MODES];
     modes[HELD] = held;
-    modes[SOURCE] = (1 - held) * source;
-    modes[STILL] = (1 - held) * (1 - source);
+    modes[MAKING] = (1 - held) * making;
+    modes[LEAKING] = (1 - held) * leaking;
+    modes[CLOSED] = (1 - held) * 0.03;
+    modes[STILL] = (1 - held) * (0.97 - making - leaking);
     return modes;
   }
 
@@ -85,50 +98,56 @@ final class Prior {
     double stated = vessel.contents().airPaAbsolute();
     double airPa = Grid.airPa(air, stated) + (1 - medium.co2Share()) * dryPa;
     double gasPa = Math.max(dryPa - airPa, 0.02 * dryPa);
-    double k = way.middle();
-    double headU = 0.5 * accuracy.fillU95M3() / headspaceM3(k);
+    double headU = 0.5 * accuracy.fillU95M3() / headspaceM3();
     double relationU =
         Math.hypot(medium.relationU(), SOLUBILITY_PER_K * 0.5 * accuracy.temperatureU95K());
     double biasU = 0.5 * Math.hypot(accuracy.pressureU95Pa(), vessel.site().ambientU95Pa());
     x.addVariance(Gaussian.FILL, square(Math.min(headU, 0.5)));
     x.addVariance(Gaussian.RELATION, square(relationU));
     x.addVariance(Gaussian.BIAS, square(biasU));
-    x.mean[Gaussian.AIR] = airPa * k;
-    x.addVariance(Gaussian.AIR, square(Grid.airSdPa(air, stated) * k));
-    x.mean[Gaussian.GAS] = gasPa * k;
-    gasFromReading(x, k, gasPa + airPa);
+    x.addVariance(Gaussian.PACE, square(Grid.TRANSFER_LN_SD));
+    x.mean[Gaussian.AIR] = airPa;
+    x.addVariance(Gaussian.AIR, square(Grid.airSdPa(air, stated)));
+    x.mean[Gaussian.GAS] = gasPa;
+    gasFromReading(x);
     liquidFromGas(x, way, Grid.modeOf(filter), paGauge);
-    if (Grid.modeOf(filter) == SOURCE) {
-      x.addVariance(Gaussian.SOURCE, square(SOURCE_SD));
-    } else if (Grid.modeOf(filter) == HELD && ferments()) {
+    beginSource(x, Grid.modeOf(filter));
+    if (Grid.modeOf(filter) == HELD && ferments()) {
       double bound = 0.1 * x.mean[Gaussian.LIQUID] * Grid.transferPerS(filter);
-      x.addVariance(Gaussian.SOURCE, square(Math.min(SOURCE_SD, bound)));
+      x.addVariance(Gaussian.SOURCE, square(Math.min(MADE_SD, bound)));
     }
   }
 
-  /** The first reading fixes the sum of CO2 and air, up to bias and fill. */
-  private void gasFromReading(Gaussian x, double k, double totalPa) {
+  /** The rate of making or leaking as it is believed when that begins. */
+  static void beginSource(Gaussian x, int mode) {
+    x.pin(Gaussian.SOURCE, mode == MAKING ? MADE : mode == LEAKING ? LEAK : 0);
+    if (mode == MAKING) {
+      x.addVariance(Gaussian.SOURCE, MADE_SD * MADE_SD);
+    } else if (mode == LEAKING) {
+      x.addVariance(Gaussian.SOURCE, LEAK_SD * LEAK_SD);
+    }
+  }
+
+  /** The first reading fixes the sum of CO2, air and bias. */
+  private static void gasFromReading(Gaussian x) {
     double[] gas = new double[Gaussian.STATES];
     double[] liquid = new double[Gaussian.STATES];
     gas[Gaussian.GAS] = 1;
     gas[Gaussian.AIR] = -1;
-    gas[Gaussian.BIAS] = -k;
-    gas[Gaussian.FILL] = totalPa * k;
+    gas[Gaussian.BIAS] = -1;
     liquid[Gaussian.LIQUID] = 1;
-    x.addVariance(Gaussian.GAS, square(k * 100));
+    x.addVariance(Gaussian.GAS, square(FIRST_READING_PA));
     x.mixRows(gas, liquid);
   }
 
   private void liquidFromGas(Gaussian x, Passage way, int mode, double paGauge) {
     double atRest = Motion.atRest(x, way);
     double[] share = shareOfRest(mode, paGauge);
-    double slope = atRest / x.mean[Gaussian.GAS];
     double[] gas = new double[Gaussian.STATES];
     double[] liquid = new double[Gaussian.STATES];
     gas[Gaussian.GAS] = 1;
-    liquid[Gaussian.GAS] = share[0] * slope;
+    liquid[Gaussian.GAS] = share[0] * atRest / x.mean[Gaussian.GAS];
     liquid[Gaussian.RELATION] = share[0] * atRest;
-    liquid[Gaussian.FILL] = -share[0] * atRest;
     x.mixRows(gas, liquid);
     x.mean[Gaussian.LIQUID] = share[0] * atRest;
     x.addVariance(Gaussian.LIQUID, square(share[1] * atRest));
@@ -136,54 +155,72 @@ final class Prior {
 
   /** Mean and spread of dissolved over equilibrium content. */
   private double[] shareOfRest(int mode, double paGauge) {
-    if (mode == STILL) {
-      return new double[] {1, 0.015};
+    if (mode == STILL || mode == LEAKING) {
+      return new double[] {1, 0.004};
     }
-    if (mode == SOURCE) {
+    if (mode == MAKING) {
       return new double[] {1.1, 0.15};
     }
     return switch (vessel.closure()) {
       case SPUNDING -> new double[] {1.05, 0.2};
       case SUPPLY -> new double[] {0.62, 0.33};
       case OPEN -> new double[] {1.2, 0.5};
-      default -> paGauge < NEAR_ATMOSPHERE_PA ? new double[] {1.2, 0.5} : new double[] {0.62, 0.33};
+      default -> {
+        if (paGauge < NEAR_ATMOSPHERE_PA) {
+          yield new double[] {1.2, 0.5};
+        }
+        yield ferments() ? new double[] {0.72, 0.38} : new double[] {0.6, 0.33};
+      }
     };
   }
 
-  private double headspaceM3(double k) {
+  private double headspaceM3() {
     return Math.max(vessel.volumeM3() - vessel.fillM3(), 1e-3 * vessel.volumeM3());
   }
 
   /** Chance of leaving each mode for each other within a time; rows add to one. */
   double[][] transitions(double seconds) {
-    double slow = seconds / (5 * DAY_S);
-    boolean told = vessel.closure() == Closure.SEALED;
-    double toHeld = told ? 0.1 * slow : slow;
-    double toSource = ferments() ? 0.5 * slow : 0.1 * slow;
+    double slow = Math.min(0.2, seconds / (5 * DAY_S));
+    double toHeld = vessel.closure() == Closure.SEALED ? 0.1 * slow : slow;
+    double toMaking = ferments() ? 0.3 * slow : 0;
     return rows(
-        new double[] {0, toHeld, toSource},
-        new double[] {slow, 0, ferments() ? slow : 0.1 * slow},
-        new double[] {slow, toHeld, 0});
+        new double[] {0, toHeld, toMaking, 0.05 * slow, 0},
+        new double[] {0, 0, 3 * toMaking, 0.01 * slow, 3 * slow},
+        new double[] {slow, toHeld, 0, 0, 0},
+        new double[] {slow, toHeld, 0, 0, 0},
+        new double[] {0.1 * slow, toHeld, toMaking, 0.01 * slow, 0});
   }
 
   /** The same after somebody has worked a valve. */
   double[][] afterValve() {
-    if (vessel.closure() == Closure.SEALED) {
-      return rows(
-          new double[] {0, 0.05, 0.02}, new double[] {0.8, 0, 0.05}, new double[] {0.05, 0.05, 0});
-    }
+    double making = ferments() ? 0.05 : 0;
+    double held = vessel.closure() == Closure.SEALED ? 0.05 : 0.38;
     return rows(
-        new double[] {0, 0.38, 0.02}, new double[] {0.55, 0, 0.05}, new double[] {0.05, 0.35, 0});
+        new double[] {0, held, 0.4 * making, 0.001, 0},
+        new double[] {0, 0, making, 0.001, 0.6},
+        new double[] {0.05, held, 0, 0, 0},
+        new double[] {0.5, held, 0, 0, 0},
+        new double[] {0.05, held, 0.4 * making, 0.001, 0});
+  }
+
+  /** The same when no filter explains the readings any more. */
+  double[][] whenNothingFits() {
+    double making = ferments() ? 0.05 : 0;
+    return rows(
+        new double[] {0, 0.02, making, 0.02, 0},
+        new double[] {0, 0, 2 * making, 0.001, 0.2},
+        new double[] {0.05, 0.05, 0, 0, 0.05},
+        new double[] {0.05, 0.05, 0, 0, 0},
+        new double[] {0, 0.02, making, 0.002, 0});
   }
 
   private static double[][] rows(double[]... rows) {
     for (int i = 0; i < rows.length; i++) {
       double out = 0;
-      for (int j = 0; j < rows.length; j++) {
-        rows[i][j] = Math.min(rows[i][j], 0.3 + 0.3 * (i == j ? 0 : 1));
-        out += rows[i][j];
+      for (double chance : rows[i]) {
+        out += chance;
       }
-      rows[i][i] = Math.max(1 - out, 0);
+      rows[i][i] = 1 - out;
     }
     return rows;
   }

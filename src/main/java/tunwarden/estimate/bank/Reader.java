@@ -5,6 +5,9 @@ public final class Reader {
   private static final double LEAST_WEIGHT = 1e-4;
   private static final int BISECTIONS = 30;
   private static final double COVER = 0.955;
+  private static final double EXPECTED_WEIGHT = 1e-3;
+  private static final double COLD_S = 60;
+  private static final double UNTOLD_TAIL = 0.006;
   private static final double MODEL_SHARE = 0.004;
 
   private final Medium medium;
@@ -40,15 +43,20 @@ public final class Reader {
     double centre;
     double half;
     if (bank.modeWeight(Grid.HELD) > 0.5) {
-      double a = Math.max(0, quantile(w, mean, sd, n, 0.0225, low, high));
-      double b = quantile(w, mean, sd, n, 0.9775, low, high);
+      double a = Math.max(0, quantile(w, mean, sd, n, UNTOLD_TAIL, low, high));
+      double b = quantile(w, mean, sd, n, 1 - UNTOLD_TAIL, low, high);
       centre = 0.5 * (a + b);
       half = 0.5 * (b - a);
     } else {
       centre = Math.max(0, quantile(w, mean, sd, n, 0.5, low, high));
-      half = halfWidth(w, mean, sd, n, centre, high - low);
+      half = halfWidth(w, mean, sd, n, cover(bank), centre, high - low);
     }
     return finish(bank, centre, half);
+  }
+
+  /** After pressure was held the prior weighs heavily, so its tails are not cut. */
+  private static double cover(Bank bank) {
+    return bank.modeWeight(Grid.CLOSED) > 0.5 ? 1 - 2 * UNTOLD_TAIL : COVER;
   }
 
   private static double quantile(
@@ -67,13 +75,13 @@ public final class Reader {
   }
 
   private static double halfWidth(
-      double[] w, double[] mean, double[] sd, int n, double centre, double most) {
+      double[] w, double[] mean, double[] sd, int n, double cover, double centre, double most) {
     double a = 0;
     double b = most;
     for (int i = 0; i < BISECTIONS; i++) {
       double c = 0.5 * (a + b);
       double inside = below(w, mean, sd, n, centre + c) - below(w, mean, sd, n, centre - c);
-      if (inside < COVER) {
+      if (inside < cover) {
         a = c;
       } else {
         b = c;
@@ -97,9 +105,7 @@ public final class Reader {
     double made = 0;
     double made2 = 0;
     Bank.Setting s = bank.setting;
-    double slope =
-        medium.solubility(s.kelvin(), s.paAbsolute())
-            / medium.headspace(s.kelvin(), s.paAbsolute(), s.fillKelvin());
+    double slope = medium.solubility(s.kelvin(), s.paAbsolute());
     for (int f = 0; f < Grid.FILTERS; f++) {
       double w = bank.weights[f];
       if (w < 1e-9) {
@@ -111,8 +117,7 @@ public final class Reader {
       double y = Math.max(0, inert / all);
       air += w * y;
       air2 += w * (y * y + bank.variance(f, Gaussian.AIR) / (all * all));
-      rest +=
-          w * slope * gas * Math.exp(bank.mean(f, Gaussian.RELATION) - bank.mean(f, Gaussian.FILL));
+      rest += w * slope * gas * Math.exp(bank.mean(f, Gaussian.RELATION));
       double q = bank.mean(f, Gaussian.SOURCE);
       made += w * q;
       made2 += w * (q * q + bank.variance(f, Gaussian.SOURCE));
@@ -126,6 +131,48 @@ public final class Reader {
         transfers(bank),
         made,
         Math.sqrt(Math.max(0, made2 - made * made)));
+  }
+
+  /** What the filters of weight expect of the next moments. */
+  public Expectation expect(Bank bank) {
+    Bank.Setting s = bank.setting;
+    double solubility = medium.solubility(s.kelvin(), s.paAbsolute());
+    double perPa = medium.headspace(s.kelvin(), s.paAbsolute(), s.fillKelvin());
+    double level = 0;
+    double low = 0;
+    double high = 0;
+    for (int f = 0; f < Grid.FILTERS; f++) {
+      double w = bank.weights[f];
+      double gas = bank.mean(f, Gaussian.GAS);
+      boolean held = Grid.modeOf(f) == Grid.HELD;
+      double heat = held ? 0 : bank.mean(f, Gaussian.HEAT);
+      double rest = gas + bank.mean(f, Gaussian.AIR);
+      level += w * (rest * (1 + heat) + bank.mean(f, Gaussian.BIAS));
+      if (w < EXPECTED_WEIGHT || held) {
+        continue;
+      }
+      double apart =
+          bank.mean(f, Gaussian.LIQUID)
+              - solubility * gas * Math.exp(bank.mean(f, Gaussian.RELATION));
+      double k = perPa * Math.exp(bank.mean(f, Gaussian.FILL));
+      double transfer = Grid.transferPerS(f) * Math.exp(bank.mean(f, Gaussian.PACE));
+      double rate = transfer * apart / k - rest * heat / COLD_S;
+      low = Math.min(low, rate);
+      high = Math.max(high, rate);
+    }
+    return new Expectation(level, low, high);
+  }
+
+  /** CO2 in liquid and headspace together, kg per m3 of liquid, in the mean of the bank. */
+  public double total(Bank bank) {
+    Bank.Setting s = bank.setting;
+    double perPa = medium.headspace(s.kelvin(), s.paAbsolute(), s.fillKelvin());
+    double sum = 0;
+    for (int f = 0; f < Grid.FILTERS; f++) {
+      double k = perPa * Math.exp(bank.mean(f, Gaussian.FILL));
+      sum += bank.weights[f] * (bank.mean(f, Gaussian.LIQUID) + k * bank.mean(f, Gaussian.GAS));
+    }
+    return sum;
   }
 
   private static double[] transfers(Bank bank) {

@@ -1,0 +1,69 @@
+package tunwarden.estimate;
+
+/**
+ * What is remembered between readings on the fast side of the bank: the block being averaged, the
+ * reading that surprised, the flow that goes on. Times are seconds since the epoch; pressures Pa
+ * gauge; immutable.
+ *
+ * @param bankS when the bank was last moved
+ * @param sumPa sum of the readings since
+ * @param count how many
+ * @param last newest reading that was believed
+ * @param doubt a reading that nothing led to expect, waiting for the next to confirm it; null for
+ *     none
+ * @param flow the flow that goes on; null for none
+ * @param intervalS usual time between readings
+ */
+record Front(
+    double bankS, double sumPa, int count, Point last, Point doubt, Flow flow, double intervalS) {
+
+  /** A reading. */
+  record Point(double atS, double paGauge) {}
+
+  /**
+   * Gas passing a valve.
+   *
+   * @param begin last reading before it
+   * @param first first reading that showed it
+   * @param moving newest reading that still showed it
+   * @param totalBefore CO2 per m3 of liquid before it
+   * @param quiet readings in a row that show no flow any more
+   */
+  record Flow(Point begin, Point first, Point moving, double totalBefore, int quiet) {
+    Flow moves(Point to) {
+      return new Flow(begin, first, to, totalBefore, 0);
+    }
+
+    Flow rests() {
+      return new Flow(begin, first, moving, totalBefore, quiet + 1);
+    }
+  }
+
+  static Front start(Point first) {
+    return new Front(first.atS(), 0, 0, first, null, null, 10);
+  }
+
+  /** Adds a believed reading to the block. */
+  Front with(Point point) {
+    double gap = point.atS() - last.atS();
+    double usual = intervalS + 0.1 * (Math.min(gap, 600) - intervalS);
+    return new Front(
+        bankS, sumPa + point.paGauge(), count + 1, point, null, flow, Math.max(usual, 0.5));
+  }
+
+  Front emptied(double atS) {
+    return new Front(atS, 0, 0, last, doubt, flow, intervalS);
+  }
+
+  Front doubting(Point point) {
+    return new Front(bankS, sumPa, count, last, point, flow, intervalS);
+  }
+
+  Front flowing(Flow other) {
+    return new Front(bankS, sumPa, count, last, null, other, intervalS);
+  }
+
+  double meanPa() {
+    return sumPa / count;
+  }
+}
