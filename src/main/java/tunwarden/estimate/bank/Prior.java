@@ -21,7 +21,7 @@ final class Prior {
   private static final double MAKING_KL = 5e-5;
   private static final double KL_LN_SD = 1.6;
   private static final double EVEN_SHARE = 0.8;
-  private static final double[] AIR_SHARE = {0.94, 0.02, 0.02, 0.02};
+  private static final double[] AIR_SHARE = {0.97, 0.01, 0.01, 0.01};
   private static final double SOLUBILITY_PER_K = 0.03;
   private static final double FIRST_READING_PA = 200;
   private static final double NEAR_ATMOSPHERE_PA = 8_000;
@@ -66,11 +66,11 @@ final class Prior {
   }
 
   private double[] modes() {
-    double making = ferments() ? 0.1 : 0;
+    double making = ferments() ? 0.02 : 0;
     double leaking = 0.002;
     double held =
         switch (vessel.closure()) {
-          case SEALED -> 0.02;
+          case SEALED -> 0.01;
           case SUPPLY, SPUNDING, OPEN -> 0.96;
           default -> 0.3;
         };
@@ -78,8 +78,8 @@ final class Prior {
     modes[HELD] = held;
     modes[MAKING] = (1 - held) * making;
     modes[LEAKING] = (1 - held) * leaking;
-    modes[CLOSED] = (1 - held) * 0.03;
-    modes[STILL] = (1 - held) * (0.97 - making - leaking);
+    modes[CLOSED] = (1 - held) * 0.005;
+    modes[STILL] = (1 - held) * (0.995 - making - leaking);
     return modes;
   }
 
