@@ -26,7 +26,7 @@ class SharedLineTest {
   private static final int UNITS = 8;
   private static final int DEAD = 3;
   private static final int ANSWER_MS = 25;
-  private static final int SECONDS = 14;
+  private static final int SECONDS = 10;
 
   /** A machine that holds a sleeping thread up this long cannot be used to time anything. */
   private static final double TOO_BUSY_S = 0.06;

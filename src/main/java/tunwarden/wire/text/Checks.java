@@ -1,7 +1,7 @@
 package tunwarden.wire.text;
 
 import java.nio.charset.StandardCharsets;
-import java.util.Locale;
+import java.util.HexFormat;
 import java.util.Optional;
 import tunwarden.wire.profile.Framing.Check;
 import tunwarden.wire.signal.Crc16;
@@ -48,7 +48,7 @@ public final class Checks {
   }
 
   private static String hex(int value, int digits) {
-    return String.format(Locale.ROOT, "%0" + digits + "X", value);
+    return HexFormat.of().withUpperCase().toHexDigits(value, digits);
   }
 
   /**

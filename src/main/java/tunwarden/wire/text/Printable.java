@@ -1,13 +1,15 @@
 package tunwarden.wire.text;
 
 import java.nio.charset.StandardCharsets;
-import java.util.Locale;
+import java.util.HexFormat;
 
 /**
  * Bytes from a wire made fit to be shown: anything but printable ASCII becomes {@code <hh>}, so
  * that no escape sequence ever reaches the user's terminal.
  */
 public final class Printable {
+  private static final HexFormat HEX = HexFormat.of();
+
   private Printable() {}
 
   /** The last {@code most} bytes of {@code count}. */
@@ -18,7 +20,7 @@ public final class Printable {
       if (b >= ' ' && b < 0x7F && b != '<') {
         text.append((char) b);
       } else {
-        text.append(String.format(Locale.ROOT, "<%02x>", b));
+        text.append('<').append(HEX.toHexDigits((byte) b)).append('>');
       }
     }
     return text.toString();
@@ -35,7 +37,7 @@ public final class Printable {
   public static String hex(byte[] bytes, int count, int most) {
     StringBuilder text = new StringBuilder();
     for (int i = Math.max(0, count - most); i < count; i++) {
-      text.append(String.format(Locale.ROOT, text.isEmpty() ? "%02x" : " %02x", bytes[i]));
+      text.append(text.isEmpty() ? "" : " ").append(HEX.toHexDigits(bytes[i]));
     }
     return text.toString();
   }

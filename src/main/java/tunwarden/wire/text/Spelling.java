@@ -1,9 +1,10 @@
 package tunwarden.wire.text;
 
-import tunwarden.units.BadQuantityException;
+import java.util.Optional;
 import tunwarden.units.Kind;
 import tunwarden.units.Pressure;
 import tunwarden.units.Quantities;
+import tunwarden.units.Unit;
 import tunwarden.wire.profile.Field;
 import tunwarden.wire.signal.Linear;
 
@@ -22,12 +23,11 @@ final class Spelling {
       return false;
     }
     for (Kind kind : Kind.values()) {
-      boolean plain = kind != Kind.NUMBER && Quantities.unitOf(word, kind).isPresent();
-      if (plain || (kind == Kind.PRESSURE && pressure(word) != null)) {
+      if (kind != Kind.NUMBER && Quantities.unitOf(word, kind).isPresent()) {
         return true;
       }
     }
-    return false;
+    return pressureUnit(word).isPresent();
   }
 
   /** Whether what follows the number is what the profile says, or its own unit. */
@@ -39,16 +39,26 @@ final class Spelling {
       return false;
     }
     if (field.kind() == Kind.PRESSURE) {
-      return new Pressure(linear.unit().toSi(1), field.reference()).equals(pressure(rest));
+      return pressureUnit(rest)
+          .equals(Optional.of(new PressureUnit(linear.unit(), field.reference())));
     }
     return Quantities.unitOf(rest, field.kind()).orElse(null) == linear.unit();
   }
 
-  private static Pressure pressure(String unit) {
-    try {
-      return Pressure.parse("1 " + unit);
-    } catch (BadQuantityException e) {
-      return null;
+  /** A pressure unit and what it counts from: {@code bar} and {@code barg} are gauge. */
+  private record PressureUnit(Unit unit, Pressure.Reference reference) {}
+
+  private static Optional<PressureUnit> pressureUnit(String word) {
+    Optional<Unit> plain = Quantities.unitOf(word, Kind.PRESSURE);
+    if (plain.isPresent()) {
+      return plain.map(unit -> new PressureUnit(unit, Pressure.Reference.GAUGE));
     }
+    Pressure.Reference reference =
+        word.endsWith("a") ? Pressure.Reference.ABSOLUTE : Pressure.Reference.GAUGE;
+    if (!word.endsWith("a") && !word.endsWith("g")) {
+      return Optional.empty();
+    }
+    return Quantities.unitOf(word.substring(0, word.length() - 1), Kind.PRESSURE)
+        .map(unit -> new PressureUnit(unit, reference));
   }
 }
