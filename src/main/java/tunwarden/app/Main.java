@@ -50,7 +50,8 @@ public final class Main implements Callable<Integer> {
   private static final List<Class<?>> COMMANDS =
       List.of(
           WatchCommand.class, //
-          ReplayCommand.class, //
+          ReplayCommand.class,
+          HeadlessCommand.class, //
           Reckon.class, //
           RehearseCommand.class, //
           InstrumentsCommand.class, //

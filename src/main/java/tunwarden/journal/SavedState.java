@@ -18,29 +18,23 @@ import tunwarden.alarm.AlarmSettings;
 import tunwarden.journal.disk.Disk;
 
 /**
- * What a restart begins with: the alarm book, and for each vessel what its estimator remembered.
+ * What a restart begins with: the alarm book, and how each vessel was described when its readings
+ * were taken in. The estimator's memory is not in it: it is had again by taking in the recorded
+ * readings.
  *
  * @param savedAt when it was saved
  * @param book the alarms
- * @param vessels by vessel
+ * @param descriptions the whole description of each vessel as text; a memory made under another one
+ *     is of no use
  */
-public record SavedState(Instant savedAt, AlarmBook book, Map<String, Memory> vessels) {
+public record SavedState(Instant savedAt, AlarmBook book, Map<String, String> descriptions) {
   private static final ObjectMapper JSON = JsonMapper.builder().build();
   private static final int FORMAT = 1;
 
   /** Keeps its own copy. */
   public SavedState {
-    vessels = Map.copyOf(vessels);
+    descriptions = Map.copyOf(descriptions);
   }
-
-  /**
-   * What an estimator remembered of a vessel.
-   *
-   * @param description the vessel's description as text; a memory made under another one is of no
-   *     use
-   * @param content in the estimator's own words
-   */
-  public record Memory(String description, String content) {}
 
   /** As bytes of JSON. */
   public byte[] bytes() {
@@ -49,12 +43,7 @@ public record SavedState(Instant savedAt, AlarmBook book, Map<String, Memory> ve
     node.put("saved_at", savedAt.toString());
     node.set("alarms", AlarmBookJson.write(book));
     ObjectNode all = node.putObject("vessels");
-    new TreeMap<>(vessels)
-        .forEach(
-            (vessel, memory) ->
-                all.putObject(vessel)
-                    .put("description", memory.description())
-                    .put("content", memory.content()));
+    new TreeMap<>(descriptions).forEach(all::put);
     return node.toPrettyString().getBytes(StandardCharsets.UTF_8);
   }
 
@@ -74,18 +63,15 @@ public record SavedState(Instant savedAt, AlarmBook book, Map<String, Memory> ve
       if (node == null || node.path("format").asInt() != FORMAT) {
         throw new IOException(file.getFileName() + " is not a state file this version can read");
       }
-      Map<String, Memory> vessels = new TreeMap<>();
-      for (Map.Entry<String, JsonNode> entry : node.path("vessels").properties()) {
-        JsonNode memory = entry.getValue();
-        vessels.put(
-            entry.getKey(),
-            new Memory(memory.path("description").asText(), memory.path("content").asText()));
-      }
+      Map<String, String> descriptions = new TreeMap<>();
+      node.path("vessels")
+          .properties()
+          .forEach(vessel -> descriptions.put(vessel.getKey(), vessel.getValue().asText()));
       return Optional.of(
           new SavedState(
               Instant.parse(node.path("saved_at").asText()),
               AlarmBookJson.read(node.path("alarms"), settings),
-              vessels));
+              descriptions));
     } catch (JsonProcessingException | RuntimeException notOurs) {
       throw new IOException(file.getFileName() + " cannot be understood", notOurs);
     }

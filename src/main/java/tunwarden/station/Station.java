@@ -5,6 +5,7 @@ import java.time.Instant;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import org.slf4j.Logger;
 import org.slf4j.LoggerFactory;
 import tunwarden.assess.Assessment;
@@ -82,9 +83,15 @@ public final class Station {
     return new Checkpoint(memories);
   }
 
-  /** Goes back to a state kept earlier. */
+  /** Goes back to a state kept earlier; vessels that are not in this station are passed over. */
   public void restore(Checkpoint checkpoint) {
-    checkpoint.memories.forEach((id, memory) -> watches.get(id).restore(memory));
+    checkpoint.memories.forEach(
+        (id, memory) -> {
+          VesselWatch watch = watches.get(id);
+          if (watch != null) {
+            watch.restore(memory);
+          }
+        });
   }
 
   /** How many samples named a vessel that is not in the cellar. */
@@ -98,6 +105,13 @@ public final class Station {
 
     private Checkpoint(Map<String, VesselMemory> memories) {
       this.memories = memories;
+    }
+
+    /** The same moment, of these vessels only. */
+    public Checkpoint only(Set<String> vessels) {
+      Map<String, VesselMemory> kept = new LinkedHashMap<>(memories);
+      kept.keySet().retainAll(vessels);
+      return new Checkpoint(kept);
     }
   }
 

@@ -32,14 +32,14 @@ class SavedStateTest {
     book = book.acknowledge(AlarmKind.LIFT_SEEN, "FV2", "\u00e4ye \"so\"", at).book();
     book = book.shelve(AlarmKind.LEAK, "FV2", "known", at.plusSeconds(900), at).book();
     book = book.outOfService(AlarmKind.VACUUM, "BT1", "broken", at).book();
-    SavedState.Memory memory = new SavedState.Memory("2000 L", "{\"a\": 1}");
     Path file = folder.resolve("state.json");
-    AtomicFile.write(new RealDisk(), file, new SavedState(at, book, Map.of("FV2", memory)).bytes());
+    AtomicFile.write(
+        new RealDisk(), file, new SavedState(at, book, Map.of("FV2", "2000 L")).bytes());
     SavedState back = SavedState.read(new RealDisk(), file, AlarmSettings.DEFAULT).orElseThrow();
     assertEquals(book.alarms(), back.book().alarms());
     assertEquals(book.memories(), back.book().memories());
     assertEquals(book.counts(), back.book().counts());
-    assertEquals(Map.of("FV2", memory), back.vessels());
+    assertEquals(Map.of("FV2", "2000 L"), back.descriptions());
     assertEquals(4, back.book().alarms().size());
   }
 

@@ -1,0 +1,76 @@
+package tunwarden.app;
+
+import java.io.IOException;
+import java.net.InetSocketAddress;
+import java.nio.file.Path;
+import java.time.InstantSource;
+import java.util.Optional;
+import java.util.concurrent.Callable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Option;
+import picocli.CommandLine.Spec;
+import tunwarden.app.headless.HeadlessPlan;
+import tunwarden.app.headless.HeadlessRun;
+import tunwarden.config.CellarFile;
+import tunwarden.serve.ServeAddress;
+import tunwarden.serve.TokenFile;
+
+/** {@code headless}: records, raises alarms and answers HTTP with nobody at the screen. */
+@Command(
+    name = "headless",
+    description = {
+      "Watches, records, raises alarms and sends word with nobody at the screen, until stopped.",
+      "Reads the cellar file again when it changes or on SIGHUP."
+    },
+    mixinStandardHelpOptions = true,
+    sortOptions = false,
+    footerHeading = "%nExamples:%n",
+    footer = {
+      "  tunwarden headless --cellar cellar.toml --data /var/lib/tunwarden",
+      "  tunwarden headless --data data --serve 0.0.0.0:9470 --token-file token.txt"
+    })
+public final class HeadlessCommand implements Callable<Integer> {
+  private static final String NOWHERE = "none";
+
+  @Spec private CommandSpec spec;
+
+  @Option(
+      names = "--cellar",
+      paramLabel = "F",
+      description = "Cellar file (default: ${DEFAULT-VALUE}).",
+      defaultValue = CellarFile.USUAL_NAME)
+  private Path cellarFile;
+
+  @Option(
+      names = "--data",
+      paramLabel = "DIR",
+      required = true,
+      description = "Folder for everything recorded; made if absent, one program at a time.")
+  private Path data;
+
+  @Option(
+      names = "--serve",
+      paramLabel = "ADDRESS",
+      description = "Address and port to answer HTTP on, or none (default: ${DEFAULT-VALUE}).",
+      defaultValue = ServeAddress.USUAL)
+  private String serve;
+
+  @Option(
+      names = "--token-file",
+      paramLabel = "F",
+      description = "File with the token that others must give; needed beyond this computer.")
+  private Path tokenFile;
+
+  @Override
+  public Integer call() throws IOException {
+    Optional<InetSocketAddress> address =
+        serve.equals(NOWHERE) ? Optional.empty() : Optional.of(ServeAddress.parse(serve));
+    Optional<String> token =
+        tokenFile == null ? Optional.empty() : Optional.of(TokenFile.read(tokenFile));
+    HeadlessPlan plan =
+        new HeadlessPlan(cellarFile, data, address, token, HeadlessPlan.USUAL_RESUME);
+    HeadlessRun.untilStopped(plan, InstantSource.system(), spec.commandLine().getOut());
+    return 0;
+  }
+}

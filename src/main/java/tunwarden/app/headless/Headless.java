@@ -1,0 +1,303 @@
+package tunwarden.app.headless;
+
+import java.io.IOException;
+import java.time.Duration;
+import java.time.Instant;
+import java.time.InstantSource;
+import java.util.ArrayList;
+import java.util.HashMap;
+import java.util.HashSet;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.Set;
+import java.util.concurrent.CountDownLatch;
+import java.util.concurrent.TimeUnit;
+import java.util.function.Consumer;
+import org.slf4j.Logger;
+import org.slf4j.LoggerFactory;
+import tunwarden.alarm.AlarmBook;
+import tunwarden.alarm.AlarmKind;
+import tunwarden.alarm.Transition;
+import tunwarden.config.Cellar;
+import tunwarden.config.CellarFile;
+import tunwarden.journal.Entries;
+import tunwarden.journal.JournalEntry;
+import tunwarden.journal.JournalReader;
+import tunwarden.journal.Recorder;
+import tunwarden.journal.SavedState;
+import tunwarden.journal.disk.Disk;
+import tunwarden.journal.disk.RealDisk;
+import tunwarden.serial.ByteLinkFactory;
+import tunwarden.serve.EventFeed;
+import tunwarden.serve.LatestState;
+import tunwarden.serve.Served;
+import tunwarden.serve.Server;
+import tunwarden.station.AlarmKeeper;
+import tunwarden.station.Sink;
+import tunwarden.station.Station;
+import tunwarden.units.BadInputException;
+import tunwarden.vessel.Vessel;
+
+/**
+ * The whole of unattended watching, started and stopped in order: recorder, station, ports, server.
+ * The cellar file can be read again while it runs; everything but ports and station stays up then.
+ */
+public final class Headless implements AutoCloseable {
+  private static final Logger LOG = LoggerFactory.getLogger(Headless.class);
+  private static final Duration STALLED = Duration.ofSeconds(5);
+  private static final Duration SAVE_EVERY = Duration.ofMinutes(1);
+
+  private final HeadlessPlan plan;
+  private final ByteLinkFactory links;
+  private final InstantSource clock;
+  private final Consumer<String> console;
+  private final Disk disk = new RealDisk();
+  private final LatestState latest = new LatestState();
+  private final CountDownLatch closing = new CountDownLatch(1);
+  private final Thread minder = new Thread(this::mind, "minder");
+
+  private Recorder recorder;
+  private AlarmKeeper alarms;
+  private Optional<Server> server = Optional.empty();
+  private CellarWatch cellarWatch;
+  private volatile Watching watching;
+  private volatile boolean reloadAsked;
+  private boolean closed;
+
+  /**
+   * Prepares; nothing is opened before {@link #start}.
+   *
+   * @param links opens serial ports
+   * @param console told of what a person at the start should know, one sentence each
+   */
+  public Headless(
+      HeadlessPlan plan, ByteLinkFactory links, InstantSource clock, Consumer<String> console) {
+    this.plan = plan;
+    this.links = links;
+    this.clock = clock;
+    this.console = console;
+  }
+
+  /**
+   * Starts everything and returns.
+   *
+   * @throws BadInputException when cellar file, data folder or address cannot be used
+   */
+  public void start() throws IOException {
+    Cellar cellar = CellarFile.read(plan.cellarFile());
+    cellarWatch = new CellarWatch(plan.cellarFile());
+    recorder = Recorder.open(plan.data(), disk, cellar.recording(), clock);
+    try {
+      begin(cellar);
+    } catch (IOException | RuntimeException failed) {
+      close();
+      throw failed;
+    }
+  }
+
+  private void begin(Cellar cellar) throws IOException {
+    recorder.repairs().forEach(console);
+    Optional<SavedState> saved = saved(cellar);
+    AlarmBook book = saved.map(SavedState::book).orElseGet(() -> AlarmBook.empty(cellar.alarms()));
+    alarms = new AlarmKeeper(book.retain(ids(cellar)), List.of(this::changed));
+    EventFeed events = new EventFeed(Optional.of(reader()));
+    recorder.listen(events);
+    recorder.watchDisk((failing, text) -> report(AlarmKind.DISK, failing, text));
+    watching = new Watching(cellar, links, clock, sinks());
+    resume(cellar, saved);
+    recorder.start();
+    say("start", "Watching " + cellar.vessels().size() + " vessels of " + cellar.file() + ".");
+    if (plan.serve().isPresent()) {
+      server = Optional.of(new Server(plan.serve().get(), plan.token(), served(events)));
+      server.ifPresent(s -> console.accept("Serving on http:/" + s.address() + "/"));
+    }
+    watching.start();
+    saveState();
+    minder.start();
+  }
+
+  private List<Sink> sinks() {
+    return List.of(alarms, recorder, latest);
+  }
+
+  private JournalReader reader() {
+    return new JournalReader(disk, recorder.folder().journal());
+  }
+
+  private Served served(EventFeed events) {
+    return new Served(latest, alarms::book, events, this::ailments, this::figures, clock);
+  }
+
+  private Served.RecorderFigures figures() {
+    return new Served.RecorderFigures(
+        recorder.accepted(), recorder.dropped(), recorder.waiting(), recorder.isFailing());
+  }
+
+  private Optional<SavedState> saved(Cellar cellar) {
+    try {
+      return SavedState.read(disk, recorder.folder().state(), cellar.alarms());
+    } catch (IOException unreadable) {
+      say("start", "Alarms and shelves of the last run are lost: " + unreadable.getMessage());
+      return Optional.empty();
+    }
+  }
+
+  private void resume(Cellar cellar, Optional<SavedState> saved) {
+    Map<String, String> before = saved.map(SavedState::descriptions).orElse(Map.of());
+    Instant now = clock.instant();
+    Resumption resumption = new Resumption(recorder.folder(), cellar.vessels(), plan.resume(), now);
+    resumption.run(cellar.vessels(), before);
+    watching.station().restore(resumption.checkpoint());
+    for (Vessel vessel : cellar.vessels()) {
+      if (!resumption.resumed().contains(vessel.id())) {
+        alarms.change(book -> book.eventsLost(vessel.id(), now));
+      }
+    }
+    resumption.words().forEach(text -> say("start", text));
+  }
+
+  /** On the station's thread. */
+  private void changed(Transition transition) {
+    recorder.write(Entries.of(transition));
+    saveState();
+  }
+
+  /** The book is taken when it is written, so that the newest goes to disk. */
+  private void saveState() {
+    Cellar cellar = watching.cellar();
+    recorder.keepState(
+        () -> {
+          Map<String, String> descriptions = new HashMap<>();
+          cellar.vessels().forEach(v -> descriptions.put(v.id(), v.toString()));
+          return new SavedState(clock.instant(), alarms.book(), descriptions).bytes();
+        });
+  }
+
+  private void report(AlarmKind kind, boolean active, String text) {
+    watching
+        .loop()
+        .submit(() -> alarms.change(book -> book.report(kind, active, text, clock.instant())));
+  }
+
+  private void say(String kind, String text) {
+    console.accept(text);
+    recorder.write(JournalEntry.station(clock.instant(), kind, text));
+  }
+
+  /** Reasons why the program is not well. */
+  List<String> ailments() {
+    List<String> found = new ArrayList<>();
+    long age = clock.millis() - watching.loop().heartbeatMs();
+    if (age > STALLED.toMillis()) {
+      found.add("The watching loop has not come round for " + age / 1000 + " s.");
+    }
+    if (watching.loop().dropped() > 0) {
+      found.add(watching.loop().dropped() + " readings were lost before they could be looked at.");
+    }
+    if (recorder.isFailing()) {
+      found.add("Recording has stopped; see the disk alarm.");
+    }
+    return found;
+  }
+
+  /** Asks for the cellar file to be read again; returns at once. */
+  public void reload() {
+    reloadAsked = true;
+  }
+
+  private void mind() {
+    ClockWatch clockWatch = new ClockWatch(clock.instant(), System.nanoTime());
+    Instant nextSave = clock.instant().plus(SAVE_EVERY);
+    while (!awaitClosing()) {
+      try {
+        Optional<String> step = clockWatch.look(clock.instant(), System.nanoTime());
+        report(AlarmKind.CLOCK, step.isPresent(), step.orElse(""));
+        watching.loop().submit(() -> alarms.change(book -> book.tick(clock.instant())));
+        if (reloadAsked || cellarWatch.hasChanged()) {
+          reloadAsked = false;
+          readAgain();
+        }
+        Instant now = clock.instant();
+        if (now.isAfter(nextSave) || now.isBefore(nextSave.minus(SAVE_EVERY))) {
+          nextSave = now.plus(SAVE_EVERY);
+          saveState();
+        }
+      } catch (RuntimeException e) {
+        LOG.error("minding goes on after a failure", e);
+      }
+    }
+  }
+
+  private boolean awaitClosing() {
+    try {
+      return closing.await(1, TimeUnit.SECONDS);
+    } catch (InterruptedException e) {
+      return true;
+    }
+  }
+
+  private void readAgain() {
+    try {
+      Cellar cellar = CellarFile.read(plan.cellarFile());
+      Watching next = new Watching(cellar, links, clock, sinks());
+      change(next);
+      report(AlarmKind.CONFIGURATION, false, "");
+      say("reload", "The cellar file was read again: " + cellar.vessels().size() + " vessels.");
+    } catch (BadInputException | IOException bad) {
+      String text = "The cellar file was not taken: " + bad.getMessage();
+      report(AlarmKind.CONFIGURATION, true, text);
+      say("reload", text);
+    }
+  }
+
+  /** Old ports and station end before the new begin; unchanged vessels keep what was learnt. */
+  private void change(Watching next) {
+    Watching old = watching;
+    old.close();
+    Set<Vessel> before = new HashSet<>(old.cellar().vessels());
+    Set<String> unchanged = new HashSet<>();
+    next.cellar().vessels().stream()
+        .filter(before::contains)
+        .forEach(vessel -> unchanged.add(vessel.id()));
+    Station.Checkpoint kept = old.station().checkpoint().only(unchanged);
+    next.station().restore(kept);
+    alarms.restore(alarms.book().withSettings(next.cellar().alarms()).retain(ids(next.cellar())));
+    latest.retain(ids(next.cellar()));
+    watching = next;
+    next.start();
+    saveState();
+  }
+
+  private static Set<String> ids(Cellar cellar) {
+    Set<String> ids = new HashSet<>();
+    cellar.vessels().forEach(vessel -> ids.add(vessel.id()));
+    return ids;
+  }
+
+  /** What is served and where, if it is. */
+  Optional<Server> server() {
+    return server;
+  }
+
+  /** Stops everything in order within two seconds; what was seen is recorded. */
+  @Override
+  public synchronized void close() {
+    if (closed) {
+      return;
+    }
+    closed = true;
+    closing.countDown();
+    if (watching != null) {
+      watching.close();
+      saveState();
+      recorder.write(JournalEntry.station(clock.instant(), "stop", "Watching ended."));
+    }
+    server.ifPresent(Server::close);
+    try {
+      recorder.close();
+    } catch (IOException e) {
+      LOG.warn("closing the recorder", e);
+    }
+  }
+}

@@ -1,0 +1,43 @@
+package tunwarden.app.headless;
+
+import java.io.IOException;
+import java.io.PrintWriter;
+import java.time.InstantSource;
+import java.util.concurrent.CountDownLatch;
+import tunwarden.serial.SerialLinks;
+
+/** Keeps {@link Headless} running until the process is told to end. */
+public final class HeadlessRun {
+  private HeadlessRun() {}
+
+  /** Starts, waits for SIGTERM or Ctrl-C, and ends cleanly. */
+  public static void untilStopped(HeadlessPlan plan, InstantSource clock, PrintWriter out)
+      throws IOException {
+    Headless headless =
+        new Headless(
+            plan,
+            new SerialLinks(),
+            clock,
+            line -> {
+              out.println(line);
+              out.flush();
+            });
+    headless.start();
+    CountDownLatch stopped = new CountDownLatch(1);
+    Runtime.getRuntime()
+        .addShutdownHook(
+            new Thread(
+                () -> {
+                  headless.close();
+                  stopped.countDown();
+                },
+                "stop"));
+    HangUp.onSignal(headless::reload);
+    try {
+      stopped.await();
+    } catch (InterruptedException e) {
+      Thread.currentThread().interrupt();
+      headless.close();
+    }
+  }
+}

@@ -1,0 +1,78 @@
+package tunwarden.app.headless;
+
+import java.time.InstantSource;
+import java.util.ArrayList;
+import java.util.List;
+import tunwarden.app.board.Assembly;
+import tunwarden.config.Cellar;
+import tunwarden.config.PortPlans;
+import tunwarden.estimate.Estimators;
+import tunwarden.serial.ByteLinkFactory;
+import tunwarden.serial.PortPlan;
+import tunwarden.serial.PortRunner;
+import tunwarden.station.Sink;
+import tunwarden.station.Station;
+import tunwarden.station.StationLoop;
+import tunwarden.station.StationSettings;
+
+/** The ports and the station of one reading of the cellar file; a changed file gets another. */
+final class Watching implements AutoCloseable {
+  private final Cellar cellar;
+  private final Station station;
+  private final StationLoop loop;
+  private final List<PortRunner> ports = new ArrayList<>();
+
+  /**
+   * Prepares everything; nothing is opened yet.
+   *
+   * @throws tunwarden.units.BadInputException when an instrument's profile does not fit
+   */
+  Watching(Cellar cellar, ByteLinkFactory links, InstantSource clock, List<Sink> sinks) {
+    this.cellar = cellar;
+    StationSettings pacing = StationSettings.USUAL.withStale(cellar.alarms().stale());
+    this.station =
+        new Station(cellar.vessels(), Estimators.standard(), Assembly.FORECASTS, pacing, sinks);
+    List<PortPlan> plans = PortPlans.of(cellar);
+    this.loop = new StationLoop(station, clock);
+    for (PortPlan plan : plans) {
+      ports.add(new PortRunner(plan, links, loop.inlet(), clock));
+    }
+  }
+
+  Cellar cellar() {
+    return cellar;
+  }
+
+  Station station() {
+    return station;
+  }
+
+  StationLoop loop() {
+    return loop;
+  }
+
+  void start() {
+    loop.start();
+    ports.forEach(PortRunner::start);
+  }
+
+  /** Ports first, side by side, so that nothing more comes in; then the loop, which empties. */
+  @Override
+  public void close() {
+    List<Thread> closers = new ArrayList<>();
+    for (PortRunner port : ports) {
+      Thread closer = new Thread(port::close, "close port");
+      closer.setDaemon(true);
+      closer.start();
+      closers.add(closer);
+    }
+    for (Thread closer : closers) {
+      try {
+        closer.join(1000);
+      } catch (InterruptedException e) {
+        Thread.currentThread().interrupt();
+      }
+    }
+    loop.close();
+  }
+}

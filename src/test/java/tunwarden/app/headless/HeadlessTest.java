@@ -1,0 +1,136 @@
+package tunwarden.app.headless;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertThrows;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.io.IOException;
+import java.net.InetAddress;
+import java.net.InetSocketAddress;
+import java.net.URI;
+import java.net.http.HttpClient;
+import java.net.http.HttpRequest;
+import java.net.http.HttpResponse;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.time.Duration;
+import java.time.InstantSource;
+import java.util.List;
+import java.util.Optional;
+import java.util.concurrent.Callable;
+import java.util.concurrent.CopyOnWriteArrayList;
+import org.junit.jupiter.api.AfterEach;
+import org.junit.jupiter.api.BeforeEach;
+import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.io.TempDir;
+import tunwarden.units.BadInputException;
+
+/** Unattended watching as a whole, in process, over ports that the test plays. */
+class HeadlessTest {
+  private static final String VESSEL =
+      """
+      [vessel.%s]
+      volume = "2000 L"
+      fill = "1800 L"
+      liquid = { kind = "beer" }
+      limits = { relief = "1.5 bar", tolerance = "0.1 bar" }
+      [vessel.%s.readings]
+      pressure = { device = "text-line", port = "/dev/%s", field = "P" }
+      temperature = { device = "text-line", port = "/dev/%s", field = "T" }
+      """;
+
+  @TempDir private Path folder;
+  private final FakeLinks links = new FakeLinks(0.873, 50);
+  private final List<String> console = new CopyOnWriteArrayList<>();
+  private final HttpClient client = HttpClient.newHttpClient();
+  private Path cellar;
+  private Headless headless;
+
+  @BeforeEach
+  void start() throws IOException {
+    cellar = folder.resolve("cellar.toml");
+    Files.writeString(cellar, vessel("FV2") + "[recording]\nflush = \"1 s\"\n");
+    headless = begin();
+  }
+
+  @AfterEach
+  void stop() {
+    headless.close();
+  }
+
+  private static String vessel(String id) {
+    return VESSEL.formatted(id, id, id, id);
+  }
+
+  private Headless begin() throws IOException {
+    HeadlessPlan plan =
+        new HeadlessPlan(
+            cellar,
+            folder.resolve("data"),
+            Optional.of(new InetSocketAddress(InetAddress.getLoopbackAddress(), 0)),
+            Optional.empty(),
+            Duration.ofHours(6));
+    Headless begun = new Headless(plan, links, InstantSource.system(), console::add);
+    begun.start();
+    return begun;
+  }
+
+  private HttpResponse<String> get(String path) throws Exception {
+    int port = headless.server().orElseThrow().address().getPort();
+    URI uri = URI.create("http://127.0.0.1:" + port + path);
+    return client.send(HttpRequest.newBuilder(uri).build(), HttpResponse.BodyHandlers.ofString());
+  }
+
+  private void await(String what, Callable<Boolean> condition) throws Exception {
+    long end = System.nanoTime() + Duration.ofSeconds(20).toNanos();
+    while (!condition.call()) {
+      assertTrue(System.nanoTime() < end, () -> "waited in vain: " + what + " " + console);
+      Thread.sleep(100);
+    }
+  }
+
+  private boolean says(String path, String words) throws Exception {
+    return get(path).body().contains(words);
+  }
+
+  @Test
+  void whatAnInstrumentSaysIsServedAndRecordedAndSurvivesARestart() throws Exception {
+    await("metrics", () -> says("/metrics", "tunwarden_pressure_bar_gauge{vessel=\"FV2\"} 0.873"));
+    assertEquals(200, get("/health").statusCode());
+    links.unplugged.add("/dev/FV2");
+    await("the alarm", () -> says("/events", "instrument silent raised"));
+    assertTrue(says("/state", "\"instrument-stale\""));
+    long begun = System.nanoTime();
+    headless.close();
+    long tookMs = (System.nanoTime() - begun) / 1_000_000;
+    assertTrue(tookMs < 2000, "ending took " + tookMs + " ms");
+    console.clear();
+    headless = begin();
+    assertTrue(
+        console.stream().anyMatch(line -> line.startsWith("FV2: the estimate goes on from")),
+        console::toString);
+    assertTrue(says("/state", "\"instrument-stale\""), "the alarm is still there");
+    assertTrue(says("/events?after=0", "Watching ended."));
+  }
+
+  @Test
+  void theFolderCannotBeUsedTwice() {
+    String words = assertThrows(BadInputException.class, this::begin).getMessage();
+    assertTrue(words.contains("in use by another"), words);
+  }
+
+  @Test
+  void aChangedCellarFileIsTakenAndABadOneIsNot() throws Exception {
+    await("metrics", () -> says("/metrics", "gauge{vessel=\"FV2\"}"));
+    Files.writeString(cellar, vessel("FV2").replace("1800 L", "2800 L"));
+    await("the refusal", () -> says("/state", "\"alarm\" : \"configuration\""));
+    assertTrue(says("/events", "The cellar file was not taken: "));
+    assertTrue(says("/metrics", "gauge{vessel=\"FV2\"}"), "the old one stays in use");
+    Files.writeString(cellar, vessel("FV2") + vessel("BT1"));
+    await("the new vessel", () -> says("/metrics", "gauge{vessel=\"BT1\"}"));
+    assertTrue(says("/state", "returned-unacknowledged"));
+    Files.writeString(cellar, vessel("BT1"));
+    headless.reload();
+    await("the old vessel to go", () -> !says("/metrics", "vessel=\"FV2\""));
+  }
+}
