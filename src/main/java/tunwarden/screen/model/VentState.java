@@ -1,6 +1,7 @@
 package tunwarden.screen.model;
 
 import java.util.OptionalDouble;
+import tunwarden.vessel.ReliefOrifice;
 
 /**
  * The vent being tried on the bench; nothing here moves a valve.
@@ -21,6 +22,11 @@ public record VentState(
   public double targetOr(double nowPaGauge) {
     double usual = Math.max(0, nowPaGauge / 2);
     return Math.min(targetPaGauge.orElse(usual), Math.max(0, nowPaGauge));
+  }
+
+  /** What the gas would leave through. */
+  public ReliefOrifice path() {
+    return new ReliefOrifice(orificeM, dischargeCoefficient);
   }
 
   public VentState withTarget(double paGauge) {

@@ -27,9 +27,18 @@ final class Patience {
             name);
     thread.setDaemon(true);
     thread.start();
+    await(thread);
+  }
+
+  /** Waits a bounded time for a thread to end, also when the caller has been interrupted. */
+  static void await(Thread thread) {
+    boolean interrupted = Thread.interrupted();
     try {
       thread.join(MOST_MS);
     } catch (InterruptedException e) {
+      interrupted = true;
+    }
+    if (interrupted) {
       Thread.currentThread().interrupt();
     }
   }

@@ -27,7 +27,6 @@ import tunwarden.screen.view.ScreenView;
 final class Session {
   private static final long DRAW_EVERY_MS = 200;
   private static final long KEY_POLL_MS = 20;
-  private static final long JOIN_MS = 2_000;
 
   private final Terminal terminal;
   private final TerminalScreen screen;
@@ -69,23 +68,18 @@ final class Session {
     }
   }
 
-  /** Gives the terminal back; called once, on whatever way out. */
-  void leave() throws IOException {
+  /** Gives the terminal back, unless it takes no more output; on whatever way out. */
+  void leave() {
     stopDrawing();
-    screen.stopScreen(false);
+    Patience.within("leaving the screen", () -> screen.stopScreen(false));
   }
 
   /** Stops the drawing thread and waits for its last frame, but not for a stalled terminal. */
   void stopDrawing() {
     over = true;
     wake();
-    if (Thread.currentThread() == drawing) {
-      return;
-    }
-    try {
-      drawing.join(JOIN_MS);
-    } catch (InterruptedException e) {
-      Thread.currentThread().interrupt();
+    if (Thread.currentThread() != drawing) {
+      Patience.await(drawing);
     }
   }
 
