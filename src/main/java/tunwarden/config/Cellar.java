@@ -17,6 +17,7 @@ import tunwarden.vessel.Vessel;
  * @param instruments where their quantities are read
  * @param alarms when alarms come and go, and the units texts are written in
  * @param recording how readings are recorded and kept
+ * @param notice whom to tell of an alarm
  */
 public record Cellar(
     Path file,
@@ -24,7 +25,8 @@ public record Cellar(
     List<Vessel> vessels,
     List<Instrument> instruments,
     AlarmSettings alarms,
-    RecorderSettings recording) {
+    RecorderSettings recording,
+    NoticePlan notice) {
   /** Keeps its own copies. */
   public Cellar {
     vessels = List.copyOf(vessels);

@@ -40,8 +40,9 @@ final class CellarReader {
     Display display = AlarmsReader.display(root.section("display"));
     AlarmSettings alarms = AlarmsReader.read(root.section("alarms"), display);
     RecorderSettings recording = RecordingReader.read(root.section("recording"));
+    NoticePlan notice = NoticeReader.read(root.section("notice"));
     root.close();
-    return new Cellar(file, site, vessels, instruments, alarms, recording);
+    return new Cellar(file, site, vessels, instruments, alarms, recording, notice);
   }
 
   private void vessels(Site site) {

@@ -131,6 +131,15 @@ final class Section {
     }
   }
 
+  /** Tells of one item of a list that its parser refuses. */
+  void check(String key, String item, Function<String, ?> parser) {
+    try {
+      parser.apply(item);
+    } catch (BadInputException refused) {
+      problem(key, refused.getMessage());
+    }
+  }
+
   /** A quantity in SI. */
   OptionalDouble quantity(String key, Function<String, Double> parser) {
     return parsed(key, parser).map(OptionalDouble::of).orElse(OptionalDouble.empty());

@@ -77,6 +77,13 @@ class CellarFaultsTest {
             + " '0 s' is no time at all",
         "[vessel.FV2]\\n | [display]\\nunits = \"imperial\"\\n[vessel.FV2]\\n | line 2,"
             + " display.units: 'imperial' is not a set of units; write one of metric, us, si",
+        "[vessel.FV2]\\n | [notice]\\ncommand = \"ring\"\\n[vessel.FV2]\\n | line 2,"
+            + " notice.command: write a list of texts in quotes, as [\"one\", \"two\"]",
+        "[vessel.FV2]\\n | [notice]\\nwebhook = { url = \"http://example.org\" }\\n[vessel.FV2]\\n"
+            + " | line 2, notice.webhook.url: 'http://example.org' will not do; write an https"
+            + " address, or http on this machine",
+        "[vessel.FV2]\\n | [notice]\\nmail = { host = \"h\", from = \"a@b\", to = [\"a b\"] }\\n"
+            + "[vessel.FV2]\\n | line 2, notice.mail.to: 'a b' is not an e-mail address",
         "[vessel.FV2]\\n | [sitte]\\n[vessel.FV2]\\n | line 1, sitte: there is no such key here; did"
             + " you mean 'site'?",
         "[vessel.FV2]\\n | [site]\\naltitude = \"9000 m\"\\n[vessel.FV2]\\n | line 2, site.altitude:"

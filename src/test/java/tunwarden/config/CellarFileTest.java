@@ -129,6 +129,25 @@ class CellarFileTest {
   }
 
   @Test
+  void whomToTellIsRead() {
+    Cellar cellar =
+        Cellars.parse(
+            Cellars.LEAST
+                + """
+                [notice]
+                command = ["ring-bell", "--loud"]
+                webhook = { url = "http://127.0.0.1:8080/alarm", token-file = "token" }
+                mail = { host = "h", from = "a@example.org", to = ["b@example.org"], tls = true }
+                """);
+    NoticePlan notice = cellar.notice();
+    assertEquals(List.of("ring-bell", "--loud"), notice.command());
+    assertEquals(8080, notice.webhook().orElseThrow().url().getPort());
+    assertEquals(587, notice.mail().orElseThrow().port());
+    assertTrue(notice.mail().orElseThrow().tls());
+    assertEquals(NoticePlan.NONE, Cellars.parse(Cellars.LEAST).notice());
+  }
+
+  @Test
   void aToleranceMayBeNamedByItsStandard() {
     String asme = Cellars.LEAST.replace("\"1.5 bar\" }", "\"1.5 bar\", tolerance = \"ASME\" }");
     Vessel vessel = Cellars.parse(asme).vessel("FV2").orElseThrow();

@@ -11,6 +11,7 @@ import picocli.CommandLine.Spec;
 import tunwarden.config.BadCellarException;
 import tunwarden.config.Cellar;
 import tunwarden.config.CellarFile;
+import tunwarden.config.PortPlans;
 import tunwarden.units.Display;
 import tunwarden.vessel.Vessel;
 
@@ -43,6 +44,7 @@ final class CellarCheck implements Callable<Integer> {
       wrong.problems().forEach(err::println);
       return WRONG_INPUT;
     }
+    PortPlans.of(cellar);
     describe(cellar, spec.commandLine().getOut());
     return 0;
   }

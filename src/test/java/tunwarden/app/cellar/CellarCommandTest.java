@@ -135,6 +135,19 @@ class CellarCommandTest {
   }
 
   @Test
+  void anUnknownDeviceAndAnUnknownFieldAreToldToo() throws IOException {
+    String example = Ran.tunwarden("cellar", "new", "--example").ok();
+    Files.writeString(file, example.replace("field = \"T\"", "field = \"Q\""));
+    assertTrue(
+        Ran.tunwarden("cellar", "check", file.toString()).refused().contains("has no field 'Q'"));
+    Files.writeString(file, example.replace("\"text-line\"", "\"text-lime\""));
+    assertTrue(
+        Ran.tunwarden("cellar", "check", file.toString())
+            .refused()
+            .contains("there is no device profile 'text-lime'"));
+  }
+
+  @Test
   void withoutASubcommandItSaysWhatThereIs() {
     assertTrue(Ran.tunwarden("cellar").refused().startsWith("Say what to do: cellar new or"));
   }
