@@ -26,16 +26,15 @@ record Front(
    * @param begin last reading before it
    * @param first first reading that showed it
    * @param moving newest reading that still showed it
-   * @param totalBefore CO2 per m3 of liquid before it
    * @param quiet readings in a row that show no flow any more
    */
-  record Flow(Point begin, Point first, Point moving, double totalBefore, int quiet) {
+  record Flow(Point begin, Point first, Point moving, int quiet) {
     Flow moves(Point to) {
-      return new Flow(begin, first, to, totalBefore, 0);
+      return new Flow(begin, first, to, 0);
     }
 
     Flow rests() {
-      return new Flow(begin, first, moving, totalBefore, quiet + 1);
+      return new Flow(begin, first, moving, quiet + 1);
     }
   }
 

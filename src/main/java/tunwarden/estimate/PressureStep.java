@@ -12,6 +12,7 @@ import tunwarden.estimate.bank.Look;
 import tunwarden.estimate.bank.Medium;
 import tunwarden.estimate.bank.Noise;
 import tunwarden.estimate.bank.Reader;
+import tunwarden.estimate.bank.Summary;
 import tunwarden.reading.Reading;
 
 /** The work of one accepted pressure reading; used once and thrown away. */
@@ -20,6 +21,9 @@ final class PressureStep {
   private static final double LEAST_JUMP_PA = 700;
   private static final double JUMP_SHARE = 0.004;
   private static final double JUMP_SDS = 6;
+  private static final double LEAST_MOVE = 0.7;
+  private static final double QUICK_S = 10;
+  private static final double COLD_EXPONENT = 0.93;
   private static final int REST_READINGS = 2;
 
   private final BankState state;
@@ -172,10 +176,9 @@ final class PressureStep {
     }
     flush();
     Point begin = front.last();
-    double before = reader.total(bank);
     moveBank(doubt.paGauge(), 1, doubt.atS(), true);
     front = front.with(doubt).emptied(doubt.atS());
-    front = front.flowing(new Flow(begin, doubt, doubt, before, 0));
+    front = front.flowing(new Flow(begin, doubt, doubt, 0));
     flowOn(surprise(point));
   }
 
@@ -220,10 +223,34 @@ final class PressureStep {
     believe();
   }
 
+  /**
+   * CO2 that left, kg: what the headspace lost, expanding somewhat colder than the liquid where the
+   * readings are quick enough to see it, and what the liquid gave meanwhile.
+   */
+  private double gasKg(Flow flow) {
+    double toDry = state.ambientPa() - medium.vapourPa(kelvin);
+    double from = Math.max(flow.begin().paGauge() + toDry, 1000);
+    double to = Math.max(flow.moving().paGauge() + toDry, 1000);
+    Summary now = reader.read(bank);
+    double seconds = flow.moving().atS() - flow.begin().atS();
+    double middle = 0.5 * (from + to);
+    double solubility = medium.solubility(kelvin, middle);
+    double co2 = 1 - now.airFraction();
+    double perPa = medium.headspace(kelvin, middle, bank.setting().fillKelvin());
+    double exponent = front.intervalS() < QUICK_S ? COLD_EXPONENT : 1;
+    double headspace = perPa * co2 * from * (1 - Math.pow(to / from, exponent));
+    double apart = now.dissolved() - solubility * co2 * middle;
+    double liquid = apart * (1 - Math.exp(-now.transfer()[1] * seconds));
+    return medium.fillM3() * (headspace + (to < from ? Math.max(0, liquid) : 0));
+  }
+
   private void endFlow(Flow flow) {
-    double gasKg = (flow.totalBefore() - reader.total(bank)) * medium.fillM3();
+    double gasKg = gasKg(flow);
     Event event = FlowEvents.name(medium.vessel(), flow, gasKg, noise);
-    news.add(event);
+    double moved = Math.abs(event.toPaGauge() - event.fromPaGauge());
+    if (moved > LEAST_MOVE * jumpLimit()) {
+      news.add(event);
+    }
     if (event.kind() != EventKind.LIFT) {
       bank = filter.valveWorked(bank);
     }

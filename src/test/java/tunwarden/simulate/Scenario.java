@@ -154,7 +154,7 @@ public enum Scenario {
     double seal = w.between(0.4, 1) * DAY;
     double rate = w.between(0.5, 4) / DAY;
     double strength = w.between(0, 0.3);
-    w.tank.transferPerS = Math.pow(10, w.between(-5.3, -3.3));
+    w.tank.transferPerS = Math.pow(10, w.between(-4.6, -3.3));
     double surplus = rate / w.tank.transferPerS;
     w.tank.fill(level, 0, 1);
     w.tank.fill(level, 0, 1 + Math.min(surplus / w.tank.equilibrium(), 0.5));
@@ -200,9 +200,18 @@ public enum Scenario {
     w.tank.reliefOpensPaGauge = Double.POSITIVE_INFINITY;
     Script script =
         new Script(w) {
+          private boolean told;
+
           @Override
           void act(double t) {
+            if (t >= from && tank.ventAreaM2 == 0 && !told) {
+              tank.passedKg = 0;
+            }
             tank.ventAreaM2 = t >= from && t < shut ? area : 0;
+            if (tank.ventAreaM2 > 0 && !told && tank.pressurePaGauge() < 1500) {
+              note("vent", from, t, tank.passedKg);
+              told = true;
+            }
           }
         };
     script.lengthS = shut + 14 * HOUR;

@@ -58,7 +58,7 @@ public final class BankFilter {
     return new Bank(filters, prior.weights(dry, paGauge), setting);
   }
 
-  private Passage passage(Bank.Setting a, Bank.Setting b, double seconds) {
+  Passage passage(Bank.Setting a, Bank.Setting b, double seconds) {
     double kelvin = 0.5 * (a.kelvin() + b.kelvin());
     double pa = 0.5 * (a.paAbsolute() + b.paAbsolute());
     return new Passage(
@@ -140,7 +140,7 @@ public final class BankFilter {
       double miss = dry - predict(x, mode, row);
       double total = x.varianceOf(row) + look.variance();
       surprise += weight * Math.max(-4, Math.min(4, miss / Math.sqrt(total)));
-      x.condition(miss, total * Math.max(1, miss * miss / (total * 25)));
+      x.condition(miss, total * Math.max(1, miss * miss / (total * 25)), true);
       bound(x, mode);
       x.store(filters, f * Gaussian.STRIDE);
       return logLikelihood(miss, total);
@@ -152,7 +152,7 @@ public final class BankFilter {
    * exactly as that of a pinned one, liquid and headspace together, so that a constant reading
    * speaks for neither.
    */
-  private static void disturb(Gaussian x, int mode, Passage way, double warmed) {
+  static void disturb(Gaussian x, int mode, Passage way, double warmed) {
     double dt = way.seconds();
     x.addWander(1, mode == Grid.HELD ? 0 : way.solubility(), LEVEL_PA2_PER_S * dt);
     x.addVariance(BIAS, BIAS_PA2_PER_S * dt);
@@ -198,7 +198,7 @@ public final class BankFilter {
   }
 
   /** Dry absolute pressure a filter expects, and its slopes. */
-  private static double predict(Gaussian x, int mode, double[] row) {
+  static double predict(Gaussian x, int mode, double[] row) {
     double heat = mode == Grid.HELD ? 0 : x.mean[HEAT];
     double rest = x.mean[GAS] + x.mean[AIR];
     row[GAS] = 1 + heat;
@@ -239,7 +239,7 @@ public final class BankFilter {
       double total = x.varianceOf(row) + standardU * standardU;
       double miss = dissolved - x.mean[LIQUID];
       evidence[f] = logLikelihood(miss, total);
-      x.condition(miss, total);
+      x.condition(miss, total, false);
       x.store(filters, f * Gaussian.STRIDE);
     }
     return new Bank(filters, reweigh(bank.weights, evidence), bank.setting);

@@ -161,18 +161,33 @@ final class Gaussian {
   }
 
   /**
-   * Conditions on a measurement of the combination that {@link #varianceOf} was last asked for;
-   * {@code total} is the variance of the measurement and the combination together.
+   * Conditions on a measurement of the combination that {@link #varianceOf} was last asked for.
+   *
+   * @param innovation measured minus expected
+   * @param total variance of the measurement and the combination together
+   * @param considers whether fill, relation and bias are only considered, not learnt (Schmidt's
+   *     filter, NASA TR R-135, 1962): pressures repeat too often for their small model errors to be
+   *     trusted with these
    */
-  void condition(double innovation, double total) {
+  void condition(double innovation, double total, boolean considers) {
     for (int i = 0; i < STATES; i++) {
+      boolean fixed = considers && isConsidered(i);
       double gain = first[i] / total;
-      mean[i] += gain * innovation;
+      if (!fixed) {
+        mean[i] += gain * innovation;
+      }
       for (int j = 0; j <= i; j++) {
+        if (fixed && isConsidered(j)) {
+          continue;
+        }
         double value = cov[i * STATES + j] - gain * first[j];
         cov[i * STATES + j] = value;
         cov[j * STATES + i] = value;
       }
     }
+  }
+
+  private static boolean isConsidered(int i) {
+    return i == FILL || i == RELATION || i == BIAS;
   }
 }

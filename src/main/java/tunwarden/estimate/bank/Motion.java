@@ -93,12 +93,17 @@ final class Motion {
   }
 
   /** Gas enters (Pa) and an equal amount leaves a pinned headspace, or the supply makes it up. */
-  private static void exchange(Gaussian x, double surplus, double supplyShare) {
+  private void exchange(Gaussian x, double surplus, double supplyShare) {
     double total = x.mean[GAS] + x.mean[AIR];
     double inert;
     if (surplus >= 0) {
       double kept = Math.exp(-surplus / total);
       inert = x.mean[AIR] * kept;
+      clearRows();
+      gasRow[GAS] = 1;
+      gasRow[AIR] = 1 - kept;
+      liquidRow[LIQUID] = 1;
+      x.mixRows(gasRow, liquidRow);
       x.scaleSpread(AIR, kept);
     } else {
       inert = x.mean[AIR] - (1 - supplyShare) * Math.max(surplus, -0.5 * total);
@@ -116,10 +121,10 @@ final class Motion {
   /** Cold or hot gas comes back to the liquid's temperature; how fast is known within a factor. */
   static void soothe(Gaussian x, double seconds, double memoryS) {
     double left = Math.exp(-seconds / memoryS);
-    double doubt = 0.5 * x.mean[HEAT] * (1 - left);
+    double doubt = 0.6 * x.mean[HEAT];
     x.mean[HEAT] *= left;
     x.scaleSpread(HEAT, left);
-    x.addVariance(HEAT, doubt * doubt);
+    x.addVariance(HEAT, doubt * doubt * (1 - left));
   }
 
   /** What the liquid would hold at rest under the filter's own CO2 pressure. */

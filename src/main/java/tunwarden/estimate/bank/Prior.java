@@ -113,7 +113,8 @@ final class Prior {
     liquidFromGas(x, way, Grid.modeOf(filter), paGauge);
     beginSource(x, Grid.modeOf(filter));
     if (Grid.modeOf(filter) == HELD && ferments()) {
-      double bound = 0.1 * x.mean[Gaussian.LIQUID] * Grid.transferPerS(filter);
+      double bound = 0.12 * x.mean[Gaussian.GAS] * way.solubility() * Grid.transferPerS(filter);
+      x.mean[Gaussian.SOURCE] = Math.min(0.4 * bound, MADE);
       x.addVariance(Gaussian.SOURCE, square(Math.min(MADE_SD, bound)));
     }
   }
@@ -169,7 +170,7 @@ final class Prior {
         if (paGauge < NEAR_ATMOSPHERE_PA) {
           yield new double[] {1.2, 0.5};
         }
-        yield ferments() ? new double[] {0.72, 0.38} : new double[] {0.6, 0.33};
+        yield ferments() ? new double[] {0.8, 0.4} : new double[] {0.6, 0.33};
       }
     };
   }

@@ -3,7 +3,6 @@ package tunwarden.estimate.bank;
 /** Reads the mixture of a bank. */
 public final class Reader {
   private static final double LEAST_WEIGHT = 1e-4;
-  private static final int BISECTIONS = 30;
   private static final double COVER = 0.955;
   private static final double EXPECTED_WEIGHT = 1e-3;
   private static final double COLD_S = 60;
@@ -19,83 +18,26 @@ public final class Reader {
 
   /** Boils the bank down. */
   public Summary read(Bank bank) {
-    int n = 0;
-    double[] w = new double[Grid.FILTERS];
-    double[] mean = new double[Grid.FILTERS];
-    double[] sd = new double[Grid.FILTERS];
-    double low = Double.POSITIVE_INFINITY;
-    double high = 0;
-    double total = 0;
+    Mixture liquid = new Mixture(Grid.FILTERS);
     for (int f = 0; f < Grid.FILTERS; f++) {
       if (bank.weights[f] > LEAST_WEIGHT) {
-        w[n] = bank.weights[f];
-        mean[n] = bank.mean(f, Gaussian.LIQUID);
-        double own = MODEL_SHARE * mean[n];
-        sd[n] = Math.sqrt(Math.max(bank.variance(f, Gaussian.LIQUID), 0) + own * own);
-        low = Math.min(low, mean[n] - 5 * sd[n]);
-        high = Math.max(high, mean[n] + 5 * sd[n]);
-        total += w[n++];
+        double mean = bank.mean(f, Gaussian.LIQUID);
+        double own = MODEL_SHARE * mean;
+        liquid.add(bank.weights[f], mean, bank.variance(f, Gaussian.LIQUID) + own * own);
       }
     }
-    for (int i = 0; i < n; i++) {
-      w[i] /= total;
-    }
-    double centre;
-    double half;
     if (bank.modeWeight(Grid.HELD) > 0.5) {
-      double a = Math.max(0, quantile(w, mean, sd, n, UNTOLD_TAIL, low, high));
-      double b = quantile(w, mean, sd, n, 1 - UNTOLD_TAIL, low, high);
-      centre = 0.5 * (a + b);
-      half = 0.5 * (b - a);
-    } else {
-      centre = Math.max(0, quantile(w, mean, sd, n, 0.5, low, high));
-      half = halfWidth(w, mean, sd, n, cover(bank), centre, high - low);
+      double low = Math.max(0, liquid.quantile(UNTOLD_TAIL));
+      double high = liquid.quantile(1 - UNTOLD_TAIL);
+      return finish(bank, 0.5 * (low + high), 0.5 * (high - low));
     }
-    return finish(bank, centre, half);
+    double centre = Math.max(0, liquid.quantile(0.5));
+    return finish(bank, centre, liquid.halfWidth(centre, cover(bank)));
   }
 
   /** After pressure was held the prior weighs heavily, so its tails are not cut. */
   private static double cover(Bank bank) {
     return bank.modeWeight(Grid.CLOSED) > 0.5 ? 1 - 2 * UNTOLD_TAIL : COVER;
-  }
-
-  private static double quantile(
-      double[] w, double[] mean, double[] sd, int n, double p, double low, double high) {
-    double a = low;
-    double b = high;
-    for (int i = 0; i < BISECTIONS; i++) {
-      double c = 0.5 * (a + b);
-      if (below(w, mean, sd, n, c) < p) {
-        a = c;
-      } else {
-        b = c;
-      }
-    }
-    return 0.5 * (a + b);
-  }
-
-  private static double halfWidth(
-      double[] w, double[] mean, double[] sd, int n, double cover, double centre, double most) {
-    double a = 0;
-    double b = most;
-    for (int i = 0; i < BISECTIONS; i++) {
-      double c = 0.5 * (a + b);
-      double inside = below(w, mean, sd, n, centre + c) - below(w, mean, sd, n, centre - c);
-      if (inside < cover) {
-        a = c;
-      } else {
-        b = c;
-      }
-    }
-    return b;
-  }
-
-  private static double below(double[] w, double[] mean, double[] sd, int n, double x) {
-    double sum = 0;
-    for (int i = 0; i < n; i++) {
-      sum += w[i] * Normal.below((x - mean[i]) / sd[i]);
-    }
-    return sum;
   }
 
   private Summary finish(Bank bank, double centre, double half) {
@@ -161,18 +103,6 @@ public final class Reader {
       high = Math.max(high, rate);
     }
     return new Expectation(level, low, high);
-  }
-
-  /** CO2 in liquid and headspace together, kg per m3 of liquid, in the mean of the bank. */
-  public double total(Bank bank) {
-    Bank.Setting s = bank.setting;
-    double perPa = medium.headspace(s.kelvin(), s.paAbsolute(), s.fillKelvin());
-    double sum = 0;
-    for (int f = 0; f < Grid.FILTERS; f++) {
-      double k = perPa * Math.exp(bank.mean(f, Gaussian.FILL));
-      sum += bank.weights[f] * (bank.mean(f, Gaussian.LIQUID) + k * bank.mean(f, Gaussian.GAS));
-    }
-    return sum;
   }
 
   private static double[] transfers(Bank bank) {

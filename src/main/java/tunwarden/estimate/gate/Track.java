@@ -6,7 +6,9 @@ package tunwarden.estimate.gate;
  * @param seen whether anything was accepted yet
  * @param timeMs time of the newest accepted reading
  * @param value its value
- * @param restless share of readings that differed from the one before, learnt while it moved
+ * @param earlier the value before it
+ * @param restless share of readings that differed from both before them, learnt while it moved; a
+ *     coarse signal that flickers between two steps stays at zero
  * @param sameRun readings in a row without any change
  * @param sameSinceMs when that run began
  * @param strayMs time of the newest reading refused for its time or rate; 0 for none
@@ -17,6 +19,7 @@ public record Track(
     boolean seen,
     long timeMs,
     double value,
+    double earlier,
     double restless,
     int sameRun,
     long sameSinceMs,
@@ -24,21 +27,23 @@ public record Track(
     double strayValue,
     int strays) {
   /** Nothing seen yet. */
-  public static final Track EMPTY = new Track(false, 0, 0, 0, 0, 0, 0, 0, 0);
+  public static final Track EMPTY = new Track(false, 0, 0, 0, 0, 0, 0, 0, 0, 0);
 
   private static final double LEARNING = 0.02;
 
   /** After an accepted reading. */
   Track accept(long newTimeMs, double newValue) {
     if (!seen) {
-      return new Track(true, newTimeMs, newValue, 0, 0, newTimeMs, 0, 0, 0);
+      return new Track(true, newTimeMs, newValue, newValue, 0, 0, newTimeMs, 0, 0, 0);
     }
     boolean same = newValue == value;
-    double learnt = restless + LEARNING * ((same ? 0 : 1) - restless);
+    boolean flickers = same || newValue == earlier;
+    double learnt = restless + LEARNING * ((flickers ? 0 : 1) - restless);
     return new Track(
         true,
         newTimeMs,
         newValue,
+        value,
         same && sameRun > 0 ? restless : learnt,
         same ? sameRun + 1 : 0,
         same ? sameSinceMs : newTimeMs,
@@ -53,6 +58,7 @@ public record Track(
         seen,
         timeMs,
         value,
+        earlier,
         restless,
         sameRun,
         sameSinceMs,
