@@ -1,5 +1,6 @@
 package tunwarden.forecast;
 
+import tunwarden.forecast.vacuum.Vacuum;
 import tunwarden.physics.closed.ClosedSolver;
 import tunwarden.physics.closed.ClosedVessel;
 import tunwarden.physics.gas.DryBlend;
@@ -219,6 +220,19 @@ public final class World {
     double dry = paGauge() + setting.ambientPa - vapourPa(setting.temperatureK);
     double squeezed = dry * temperatureK / setting.temperatureK * headspaceM3() / room;
     return squeezed + vapourPa(temperatureK) - setting.ambientPa;
+  }
+
+  /** Pressure right after liquid was drawn off with no gas let in, Pa gauge. */
+  public double drawnPaGauge(double drawnM3) {
+    double vapour = vapourPa(setting.temperatureK);
+    double dry = paGauge() + setting.ambientPa - vapour;
+    return dry * headspaceM3() / (headspaceM3() + drawnM3) + vapour - setting.ambientPa;
+  }
+
+  /** Pressure after caustic has bound a share of the headspace's CO2, 0..1, Pa gauge. */
+  public double causticPaGauge(double boundShare) {
+    double total = paGauge() + setting.ambientPa;
+    return Vacuum.afterCaustic(total, partialPa[CO2] / total, boundShare) - setting.ambientPa;
   }
 
   /**

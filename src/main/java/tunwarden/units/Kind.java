@@ -13,6 +13,7 @@ public enum Kind {
   EXTRACT("an extract or gravity"),
   FRACTION("a share"),
   LENGTH("a length"),
+  AREA("an area"),
   DURATION("a time"),
   RATE("a rate"),
   MASS_FLOW("a mass flow"),

@@ -47,6 +47,9 @@ public enum Unit {
   FOOT(Kind.LENGTH, "ft", 0.3048),
   INCH(Kind.LENGTH, "in", 0.0254),
 
+  SQUARE_METRE(Kind.AREA, "m2", 1, 0, List.of("m²")),
+  SQUARE_FOOT(Kind.AREA, "ft2", 0.09290304, 0, List.of("ft²")),
+
   SECOND(Kind.DURATION, "s", 1),
   MILLISECOND(Kind.DURATION, "ms", 1e-3),
   MINUTE(Kind.DURATION, "min", 60),

@@ -63,6 +63,11 @@ public final class VesselOptions {
     return volumeM3 != null || fillM3 != null || liquid.areGiven() || limits.areGiven();
   }
 
+  /** Whether volume or fill are given. */
+  public boolean areSized() {
+    return volumeM3 != null || fillM3 != null;
+  }
+
   /**
    * The vessel as described.
    *

@@ -17,6 +17,8 @@ import tunwarden.units.Display;
     requiredOptionMarker = '*',
     optionListHeading = "%nOptions, * required:%n")
 abstract class AnswerCommand implements Callable<Integer> {
+  private static final int NO = 1;
+
   @Option(names = "--json", description = "Print one JSON object; keys end in their unit.")
   private boolean json;
 
@@ -39,7 +41,7 @@ abstract class AnswerCommand implements Callable<Integer> {
     } else {
       sheet.printText(out);
     }
-    return 0;
+    return sheet.isNo() ? NO : 0;
   }
 
   /**

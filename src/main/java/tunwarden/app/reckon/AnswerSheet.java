@@ -35,6 +35,7 @@ final class AnswerSheet {
   private final List<String[]> lines = new ArrayList<>();
   private final Set<String> cautions = new LinkedHashSet<>();
   private String model = "";
+  private boolean no;
 
   AnswerSheet(Display display) {
     this.display = display;
@@ -103,7 +104,7 @@ final class AnswerSheet {
     line(label, reason);
   }
 
-  /** A bare value of the JSON: a number, a text or a truth, with a line of text of its own. */
+  /** A bare value of the JSON: number, text, truth, list or map, with a line of its own. */
   void plain(String key, Object value, String label, String text) {
     values.put(key, value);
     line(label, text);
@@ -115,9 +116,23 @@ final class AnswerSheet {
     values.put("u95_" + key, u95);
   }
 
+  /** A bare value of the JSON without a line of text. */
+  void hidden(String key, Object value) {
+    values.put(key, value);
+  }
+
   /** A line of text that has no value in the JSON. */
   void line(String label, String text) {
     lines.add(new String[] {label, text});
+  }
+
+  /** The question was one of yes or no, and the answer is no. */
+  void no() {
+    no = true;
+  }
+
+  boolean isNo() {
+    return no;
   }
 
   /** The correlations used. */
@@ -172,6 +187,19 @@ final class AnswerSheet {
               .toPlainString());
     } else if (value instanceof String text) {
       json.writeString(text);
+    } else if (value instanceof List<?> list) {
+      json.writeStartArray();
+      for (Object each : list) {
+        write(json, each);
+      }
+      json.writeEndArray();
+    } else if (value instanceof Map<?, ?> map) {
+      json.writeStartObject();
+      for (Map.Entry<?, ?> entry : map.entrySet()) {
+        json.writeFieldName(entry.getKey().toString());
+        write(json, entry.getValue());
+      }
+      json.writeEndObject();
     } else {
       json.writeNull();
     }

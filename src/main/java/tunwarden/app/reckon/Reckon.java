@@ -24,7 +24,17 @@ import tunwarden.app.options.Group;
     })
 public final class Reckon implements Runnable, Group {
   private static final List<Class<?>> KINDS =
-      List.of(Dissolved.class, Hold.class, Warm.class, Chill.class, Solubility.class, Flow.class);
+      List.of(
+          Dissolved.class,
+          Hold.class,
+          Warm.class,
+          Chill.class,
+          VentTrial.class,
+          Sealing.class,
+          ReliefCheck.class,
+          VacuumCheck.class,
+          Solubility.class,
+          Flow.class);
 
   @Spec private CommandSpec spec;
 

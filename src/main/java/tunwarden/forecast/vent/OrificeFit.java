@@ -17,7 +17,7 @@ public final class OrificeFit {
         diameterM > 0
             ? String.format(
                 Locale.ROOT,
-                "an orifice of %.4g mm is wider than a vessel of %.4g L; check its unit",
+                "an orifice of %.0f mm is wider than a vessel of %.0f L; check its unit",
                 1000 * diameterM,
                 1000 * vesselM3)
             : "an orifice needs a diameter above 0 mm");
