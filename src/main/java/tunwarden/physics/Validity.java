@@ -26,11 +26,6 @@ public record Validity(double leastK, double mostK, double leastPaAbsolute, doub
         most * PA_PER_BAR);
   }
 
-  /** True when both lie inside; false for anything not finite. */
-  public boolean holds(double temperatureK, double pressurePaAbsolute) {
-    return holdsTemperature(temperatureK) && holdsPressure(pressurePaAbsolute);
-  }
-
   /** What is outside, in words; empty when nothing is. */
   public Optional<String> breach(double temperatureK, double pressurePaAbsolute) {
     if (!holdsTemperature(temperatureK)) {

@@ -58,11 +58,11 @@ public final class Tsonopoulos1974 {
   }
 
   private static double second(double reduced, double volume, double acentric) {
-    double r2 = reduced * reduced;
-    double r3 = r2 * reduced;
-    double r8 = r3 * r3 * r2;
-    double simple = 0.1445 - 0.330 / reduced - 0.1385 / r2 - 0.0121 / r3 - 0.000607 / r8; // Eq. 5
-    double departure = 0.0637 + 0.331 / r2 - 0.423 / r3 - 0.008 / r8; // Eq. 6
+    double r = 1 / reduced;
+    double r3 = r * r * r;
+    double r8 = r3 * r3 * r * r;
+    double simple = 0.1445 - r * (0.330 + r * 0.1385) - 0.0121 * r3 - 0.000607 * r8; // Eq. 5
+    double departure = 0.0637 + 0.331 * r * r - 0.423 * r3 - 0.008 * r8; // Eq. 6
     return volume * (simple + acentric * departure); // Eq. 4
   }
 }

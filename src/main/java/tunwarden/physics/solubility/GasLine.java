@@ -15,7 +15,7 @@ import tunwarden.physics.gas.Gas;
  */
 public final class GasLine {
   private static final int MOST_STEPS = 60;
-  private static final double CLOSE_ENOUGH = 1e-13;
+  private static final double CLOSE_ENOUGH = 3e-9;
 
   private final Drink drink;
   private final Gas gas;
@@ -128,10 +128,10 @@ public final class GasLine {
     for (int i = 0; i < MOST_STEPS; i++) {
       double dissolved = dissolvedKgPerM3(guess, totalPaAbsolute);
       double miss = dissolvedKgPerM3 - dissolved;
-      if (Math.abs(miss) <= CLOSE_ENOUGH * dissolvedKgPerM3) {
-        break;
-      }
       double secant = (dissolved - previousDissolved) / (guess - previous);
+      if (Math.abs(miss) <= CLOSE_ENOUGH * dissolvedKgPerM3) {
+        return Double.isFinite(secant) && secant > 0 ? guess + miss / secant : guess;
+      }
       double proportional = guess * dissolvedKgPerM3 / dissolved;
       double next = guess + miss / secant;
       previous = guess;

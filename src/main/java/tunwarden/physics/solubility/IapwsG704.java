@@ -51,10 +51,11 @@ public final class IapwsG704 {
     double[] row = TABLE_1[gas.ordinal()];
     double reduced = temperatureK / WagnerPruss1993.CRITICAL_K;
     double tau = 1 - reduced;
+    double root = Math.exp(0.355 * Math.log(tau));
+    double hot = Math.exp(tau - 0.41 * Math.log(reduced));
     return LN_CRITICAL // Eq. 1
         + WagnerPruss1993.lnReduced(reduced)
-        + row[0] / reduced
-        + row[1] * Math.pow(tau, 0.355) / reduced
-        + row[2] * Math.pow(reduced, -0.41) * Math.exp(tau);
+        + (row[0] + row[1] * root) / reduced
+        + row[2] * hot;
   }
 }

@@ -61,7 +61,7 @@ public final class LinearPropagation {
         covariance[k][l] = covariance(share[k], share[l]);
       }
     }
-    return new Propagated(out, covariance, share);
+    return new Propagated(out, covariance);
   }
 
   /** Carries the inputs through one function. */

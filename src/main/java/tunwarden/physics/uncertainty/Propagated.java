@@ -1,15 +1,13 @@
 package tunwarden.physics.uncertainty;
 
-/** Results of a propagation: values, standard uncertainties, correlations, and who contributes. */
+/** Results of a propagation: values, standard uncertainties, and correlations. */
 public final class Propagated {
   private final double[] value;
   private final double[][] covariance;
-  private final double[][] share;
 
-  Propagated(double[] value, double[][] covariance, double[][] share) {
+  Propagated(double[] value, double[][] covariance) {
     this.value = value;
     this.covariance = covariance;
-    this.share = share;
   }
 
   /** The first result. */
@@ -40,10 +38,5 @@ public final class Propagated {
   /** Correlation coefficient between two results. */
   public double correlation(int k, int l) {
     return covariance[k][l] / (standard(k) * standard(l));
-  }
-
-  /** What one input alone would give the first result, signed, as a standard uncertainty. */
-  public double share(int input) {
-    return share[0][input];
   }
 }
