@@ -20,7 +20,8 @@ import tunwarden.units.BadInputException;
     name = "rehearse",
     description = {
       "Plays a simulated vessel, to practise on or to try an alarm: into a log file, marked as",
-      "simulated. Without a scenario it lists them."
+      "simulated, or on a serial port, in the language of a device profile. Without a scenario it",
+      "lists them."
     },
     mixinStandardHelpOptions = true,
     sortOptions = false,
@@ -28,6 +29,7 @@ import tunwarden.units.BadInputException;
     footer = {
       "  tunwarden rehearse",
       "  tunwarden rehearse cooling-lost --log day.csv",
+      "  tunwarden rehearse settled --port /dev/ttyUSB1 --device modbus-rtu-float --address 3",
       "  tunwarden rehearse slow-leak --seed 7 --log - | tunwarden report - --volume '1000 L' ..."
     })
 final class RehearseCommand implements Callable<Integer> {
@@ -48,6 +50,30 @@ final class RehearseCommand implements Callable<Integer> {
       description = "The same seed gives the same log. Default: ${DEFAULT-VALUE}.")
   private long seed = 1;
 
+  @Option(
+      names = "--port",
+      paramLabel = "PORT",
+      description = "Play it on this serial port, until Ctrl-C.")
+  private String port;
+
+  @Option(
+      names = "--device",
+      paramLabel = "PROFILE",
+      description = "With --port: how to speak. Default: ${DEFAULT-VALUE}.")
+  private String device = "text-line";
+
+  @Option(
+      names = "--address",
+      paramLabel = "N",
+      description = "With --port: address on the line. Default: ${DEFAULT-VALUE}.")
+  private int address = 1;
+
+  @Option(
+      names = "--pace",
+      paramLabel = "N",
+      description = "With --port: seconds of the vessel in each second. Default: 1.")
+  private double pace = 1;
+
   @Override
   public Integer call() throws IOException {
     PrintWriter out = spec.commandLine().getOut();
@@ -56,8 +82,12 @@ final class RehearseCommand implements Callable<Integer> {
       return 0;
     }
     Scenario scenario = scenario();
+    if (port != null) {
+      return new PortStage(port, device, address, pace).play(scenario, seed, out);
+    }
     if (log == null) {
-      throw new BadInputException("rehearse: say where the readings are to go with --log FILE");
+      throw new BadInputException(
+          "rehearse: say where the readings are to go with --log FILE or --port PORT");
     }
     if (log.equals("-")) {
       RehearsalLog.write(scenario, seed, out);

@@ -16,6 +16,7 @@ import tunwarden.wire.profile.LineSettings;
  */
 public final class SerialLinks implements ByteLinkFactory {
   private static final int LISTEN_MS = 100;
+  private static final int LINUX_BUSY = 16;
 
   static {
     // Keeps the unpacked native library apart from that of other programs.
@@ -36,7 +37,7 @@ public final class SerialLinks implements ByteLinkFactory {
     }
     prepare(serial, isPseudoTerminal(port) ? plain(settings) : settings, use);
     if (!serial.openPort(0)) {
-      throw refused(port, serial.getLastErrorCode());
+      throw refused(port, errorCode(port, serial.getLastErrorCode()));
     }
     return new SerialLink(port, serial, use);
   }
@@ -114,6 +115,12 @@ public final class SerialLinks implements ByteLinkFactory {
       case XON_XOFF ->
           SerialPort.FLOW_CONTROL_XONXOFF_IN_ENABLED | SerialPort.FLOW_CONTROL_XONXOFF_OUT_ENABLED;
     };
+  }
+
+  /** A port that another program has locked comes back as absent although its name is there. */
+  private static int errorCode(String port, int code) {
+    boolean there = !isWindows() && Files.exists(Path.of(port));
+    return there && unixReason(code) == PortException.Reason.ABSENT ? LINUX_BUSY : code;
   }
 
   /** The sentence for an error code of the operating system met while opening. */

@@ -11,6 +11,7 @@ import tunwarden.screen.model.Origin;
 import tunwarden.screen.terminal.Dashboard;
 import tunwarden.serial.ByteLinkFactory;
 import tunwarden.serial.LinkHealth;
+import tunwarden.serial.LinkWords;
 import tunwarden.serial.PortPlan;
 import tunwarden.serial.PortRunner;
 import tunwarden.station.StationLoop;
@@ -62,14 +63,10 @@ public final class LiveDashboard {
       for (LinkHealth.Channel channel : health.channels()) {
         if (channel.binding().vessel().equals(vessel) && channel.binding().quantity() == quantity) {
           String device = channel.binding().profile().name();
-          return new SignalSource(device, health.port(), () -> words(health));
+          return new SignalSource(device, health.port(), () -> LinkWords.of(health, channel));
         }
       }
     }
     return SignalSource.BY_HAND;
-  }
-
-  private static String words(LinkHealth health) {
-    return health.detail().isEmpty() ? health.state().words() : health.detail();
   }
 }

@@ -37,8 +37,16 @@ public record Binding(
     return new Binding(vessel, quantity, profile, found, 0, trim);
   }
 
-  /** Refuses a field that measures something else. */
+  /**
+   * Refuses a field that measures something else, and a Modbus instrument without an address.
+   *
+   * @throws IllegalArgumentException with a sentence for the user
+   */
   public Binding {
+    if (profile.speaks() == Speaks.MODBUS_RTU && (slave < 1 || slave > 247)) {
+      throw new IllegalArgumentException(
+          profile.name() + " speaks Modbus and needs its address on the line, 1 to 247");
+    }
     if (field.kind() != quantity.kind()) {
       throw new IllegalArgumentException(
           "field '"
