@@ -51,6 +51,7 @@ public final class Main implements Callable<Integer> {
       List.of(
           WatchCommand.class, //
           ReplayCommand.class,
+          ReportCommand.class,
           HeadlessCommand.class, //
           Reckon.class, //
           RehearseCommand.class, //

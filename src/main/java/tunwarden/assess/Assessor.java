@@ -58,8 +58,8 @@ public final class Assessor {
       return Optional.empty();
     }
     double u95Pa = evidence.vessel().accuracy().pressureU95Pa();
-    double highestNowPa = evidence.pressure().value().getAsDouble() + u95Pa;
-    double marginPa = relief.get().earliestLiftPaGauge() - highestNowPa;
+    double marginPa =
+        Margins.reliefPa(relief.get(), evidence.pressure().value().getAsDouble(), u95Pa);
     return Optional.of(
         new Margins(marginPa, marginPa / relief.get().setPaGauge(), u95Pa, warming(evidence)));
   }

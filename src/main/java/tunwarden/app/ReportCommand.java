@@ -1,0 +1,196 @@
+package tunwarden.app;
+
+import java.io.IOException;
+import java.io.PrintWriter;
+import java.io.Writer;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.time.DateTimeException;
+import java.time.Duration;
+import java.time.ZoneId;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import java.util.concurrent.Callable;
+import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Model.CommandSpec;
+import picocli.CommandLine.Option;
+import picocli.CommandLine.Parameters;
+import picocli.CommandLine.Spec;
+import tunwarden.app.options.VesselOptions;
+import tunwarden.estimate.Estimators;
+import tunwarden.report.Reporter;
+import tunwarden.report.otherwise.WhatIf;
+import tunwarden.report.story.Chapter;
+import tunwarden.units.BadInputException;
+import tunwarden.units.Kind;
+import tunwarden.units.Quantities;
+
+/** Tells what happened in a log. */
+@Command(
+    name = "report",
+    description = {
+      "Tells what happened in a log: whether the relief valve lifted, what left the vessel, whether",
+      "the sensors can be believed, how close it came and what would have come next."
+    },
+    mixinStandardHelpOptions = true,
+    sortOptions = false,
+    footerHeading = "%nExamples:%n",
+    footer = {
+      "  tunwarden report replay-logs/cooling-lost.csv --volume '2000 L' --fill '1800 L' \\",
+      "      --liquid beer --relief '1.5 bar' --html day.html",
+      "  tunwarden report logger.csv --cellar cellar.toml --vessel FV2 --zone Europe/Vienna \\",
+      "      --columns time=Zeit,pressure=Druck/mbar,temperature=T/C --json -",
+      "  tunwarden report day.csv ... --what-if relief=1.2bar,vent=08:30@0.3bar --html try.html",
+      "  tunwarden report one.csv two.csv --compare ... --html both.html"
+    })
+final class ReportCommand implements Callable<Integer> {
+  @Spec private CommandSpec spec;
+
+  @Parameters(
+      arity = "1..*",
+      paramLabel = "LOG",
+      description = "Logs of one vessel, in any order; .gz is read too.")
+  private List<Path> logs;
+
+  @Option(
+      names = "--json",
+      paramLabel = "FILE",
+      description = "Report as JSON; - is standard output.")
+  private String json;
+
+  @Option(
+      names = "--series",
+      paramLabel = "FILE",
+      description = "Estimate row by row as CSV; - is standard output.")
+  private String series;
+
+  @Option(names = "--html", paramLabel = "FILE", description = "Report to print or send.")
+  private String html;
+
+  @Option(names = "--every", paramLabel = "TIME", description = "Thin the series, as 60s or 5min.")
+  private String every;
+
+  @Option(
+      names = "--causal",
+      description = "Let the estimate know only what came before, not what came later.")
+  private boolean causal;
+
+  @Option(
+      names = "--what-if",
+      paramLabel = "CHANGES",
+      description = "Rerun with relief=PRESSURE or vent=TIME@PRESSURE, or both with a comma.")
+  private String whatIf;
+
+  @Option(
+      names = "--compare",
+      description = "Put the logs, or the vessels named by --vessel, side by side on one page.")
+  private boolean compare;
+
+  @Mixin private LogChoice choice = new LogChoice();
+  @Mixin private VesselOptions described = new VesselOptions();
+
+  @Override
+  public Integer call() throws IOException {
+    List<Reporter.Source> sources = choice.sources(logs, described, compare);
+    double ambientPa = sources.get(0).vessel().site().ambientPaAbsolute();
+    Reporter.Settings settings =
+        new Reporter.Settings(
+            causal,
+            everyOrZero(),
+            Optional.ofNullable(whatIf).map(text -> WhatIf.parse(text, ambientPa)),
+            choice.zone(),
+            command(),
+            new Main.Version().getVersion()[0]);
+    if (series != null && sources.size() > 1) {
+      throw new BadInputException("--series: it holds one vessel; leave out --compare");
+    }
+    Reporter reporter = new Reporter(Estimators.standard(), settings);
+    PrintWriter err = spec.commandLine().getErr();
+    List<Chapter> chapters = new ArrayList<>();
+    for (Reporter.Source source : sources) {
+      Progress progress = new Progress(err, choice.bytes(source));
+      choice.reportBytesTo(progress);
+      chapters.add(read(reporter, source, progress));
+      progress.end();
+    }
+    chapters.forEach(chapter -> chapter.notes().forEach(note -> err.println("note: " + note)));
+    write(chapters);
+    return 0;
+  }
+
+  private Chapter read(Reporter reporter, Reporter.Source source, Progress progress)
+      throws IOException {
+    if (series == null) {
+      return reporter.read(source, Optional.empty(), progress::rows);
+    }
+    if (series.equals("-")) {
+      PrintWriter out = spec.commandLine().getOut();
+      Chapter chapter = reporter.read(source, Optional.of(out), progress::rows);
+      out.flush();
+      return chapter;
+    }
+    try (Writer file = Files.newBufferedWriter(Path.of(series))) {
+      return reporter.read(source, Optional.of(file), progress::rows);
+    }
+  }
+
+  private void write(List<Chapter> chapters) throws IOException {
+    if (json != null) {
+      put(json, Reporter.json(chapters));
+    }
+    if (html != null) {
+      put(html, Reporter.html(chapters));
+    }
+    if (json == null && html == null && series == null) {
+      PrintWriter out = spec.commandLine().getOut();
+      for (Chapter chapter : chapters) {
+        if (chapters.size() > 1) {
+          out.println(chapter.title());
+        }
+        chapter.story().summary().forEach(out::println);
+        chapter.story().cautions().forEach(caution -> out.println("! " + caution));
+      }
+    }
+  }
+
+  private void put(String where, String text) throws IOException {
+    if (where.equals("-")) {
+      spec.commandLine().getOut().print(text);
+    } else {
+      Files.writeString(Path.of(where), text);
+    }
+  }
+
+  private Duration everyOrZero() {
+    if (every == null) {
+      return Duration.ZERO;
+    }
+    double seconds = Quantities.parse(every, Kind.DURATION);
+    if (!(seconds > 0)) {
+      throw new BadInputException("--every: write a time above zero, such as 60s");
+    }
+    return Duration.ofMillis(Math.round(1000 * seconds));
+  }
+
+  /** The command line again, quoted where a shell needs it. */
+  private String command() {
+    StringBuilder text = new StringBuilder(Main.NAME);
+    for (String argument : spec.commandLine().getParent().getParseResult().originalArgs()) {
+      boolean plain = argument.matches("[\\w@%+=:,./-]+");
+      text.append(' ').append(plain ? argument : "'" + argument.replace("'", "'\\''") + "'");
+    }
+    return text.toString();
+  }
+
+  /** A zone by its name or offset. */
+  static ZoneId zone(String text) {
+    try {
+      return ZoneId.of(text);
+    } catch (DateTimeException unknown) {
+      throw new BadInputException(
+          "--zone: '" + text + "' is not a zone; write Europe/Vienna, +01:00 or UTC", unknown);
+    }
+  }
+}

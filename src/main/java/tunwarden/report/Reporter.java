@@ -1,0 +1,221 @@
+package tunwarden.report;
+
+import java.io.IOException;
+import java.time.Duration;
+import java.time.ZoneId;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Optional;
+import java.util.function.LongConsumer;
+import tunwarden.estimate.Estimate;
+import tunwarden.estimate.Estimator;
+import tunwarden.estimate.Event;
+import tunwarden.estimate.EventKind;
+import tunwarden.forecast.Forecaster;
+import tunwarden.forecast.Outlook;
+import tunwarden.forecast.Present;
+import tunwarden.replay.BadLogException;
+import tunwarden.replay.LogFile;
+import tunwarden.replay.LogRow;
+import tunwarden.report.analysis.Analysis;
+import tunwarden.report.analysis.Analyst;
+import tunwarden.report.analysis.EventWindow;
+import tunwarden.report.analysis.ReportRow;
+import tunwarden.report.analysis.RowSpool;
+import tunwarden.report.analysis.Smoother;
+import tunwarden.report.otherwise.Rerun;
+import tunwarden.report.otherwise.WhatIf;
+import tunwarden.report.page.HtmlPage;
+import tunwarden.report.story.Belief;
+import tunwarden.report.story.Chapter;
+import tunwarden.report.story.Course;
+import tunwarden.report.story.Story;
+import tunwarden.vessel.Vessel;
+
+/** Makes reports out of logs. Memory does not grow with the length of a log. */
+public final class Reporter {
+  private static final int WINDOWS = 8;
+
+  /** Kinds worth a closer look, the gravest first. */
+  private static final List<EventKind> CLOSER =
+      List.of(
+          EventKind.OVER_RELIEF,
+          EventKind.LIFT,
+          EventKind.VENT,
+          EventKind.CHARGE,
+          EventKind.LEAK,
+          EventKind.FROZEN,
+          EventKind.SPIKE,
+          EventKind.GAP);
+
+  private final Estimator estimator;
+  private final Settings settings;
+
+  /**
+   * How a report is made.
+   *
+   * @param causal whether only what came before counts, not what came later
+   * @param every least time between two lines of the series; zero for every row
+   * @param whatIf what is to be tried, if anything
+   * @param zone the zone to tell times in, if stated
+   * @param command the command line, to be quoted in the report
+   * @param program name and version, to be quoted in the report
+   */
+  public record Settings(
+      boolean causal,
+      Duration every,
+      Optional<WhatIf> whatIf,
+      Optional<ZoneId> zone,
+      String command,
+      String program) {}
+
+  /**
+   * What a report is made from.
+   *
+   * @param title what it is called
+   * @param vessel its description; its id is the one the rows name
+   * @param logs one or several, put in order of time
+   * @param inputs the same with their hashes
+   */
+  public record Source(
+      String title, Vessel vessel, List<LogFile> logs, List<Chapter.Input> inputs) {}
+
+  public Reporter(Estimator estimator, Settings settings) {
+    this.estimator = estimator;
+    this.settings = settings;
+  }
+
+  /**
+   * Reads one vessel's logs.
+   *
+   * @param series takes the series, if wanted
+   * @param rowsDone told how many rows have been read
+   * @throws BadLogException when a log is no log or speaks of other vessels only
+   */
+  public Chapter read(Source source, Optional<Appendable> series, LongConsumer rowsDone)
+      throws IOException {
+    Analyst analyst = new Analyst(source.vessel(), estimator);
+    try (VesselRows rows = new VesselRows(source.logs(), source.vessel().id());
+        RowSpool spool = new RowSpool()) {
+      for (LogRow row = rows.next(); row != null; row = rows.next()) {
+        ReportRow known = analyst.take(row);
+        if (series.isPresent()) {
+          spool.add(known);
+        }
+        rowsDone.accept(analyst.rows());
+      }
+      rows.requireRows(analyst.rows());
+      Analysis analysis = analyst.finish();
+      requirePressure(source, analysis);
+      Belief belief = new Belief(analysis.bins(), smoother(analysis));
+      if (series.isPresent()) {
+        writeSeries(series.get(), spool, analysis, belief);
+      }
+      ZoneId zone = settings.zone().orElse(rows.zone());
+      Chapter.Origin origin =
+          new Chapter.Origin(source.inputs(), rows.notes(), settings.command(), settings.program());
+      return chapter(source, analysis, belief, zone, origin);
+    }
+  }
+
+  private static void requirePressure(Source source, Analysis analysis) {
+    if (analysis.extremes().isEmpty()) {
+      throw new BadLogException(
+          source.logs().get(0).path().toString(),
+          0,
+          "pressure",
+          "no row holds a pressure that can be used");
+    }
+  }
+
+  private Optional<Smoother> smoother(Analysis analysis) {
+    Optional<Estimate> last = analysis.state().estimate();
+    return settings.causal() || last.isEmpty()
+        ? Optional.empty()
+        : Smoother.over(analysis.bins(), last.get());
+  }
+
+  private void writeSeries(Appendable out, RowSpool spool, Analysis analysis, Belief belief)
+      throws IOException {
+    SeriesWriter writer = new SeriesWriter(out, settings.every(), analysis.events());
+    spool.replay(row -> writer.write(belief.smoother().map(s -> s.smooth(row)).orElse(row)));
+  }
+
+  private Chapter chapter(
+      Source source, Analysis analysis, Belief belief, ZoneId zone, Chapter.Origin origin)
+      throws IOException {
+    Optional<Course> otherwise =
+        settings.whatIf().map(whatIf -> Rerun.of(analysis, belief, whatIf, zone));
+    return new Chapter(
+        source.title(),
+        analysis,
+        Story.of(analysis, outlook(analysis), zone),
+        belief,
+        windows(source, analysis),
+        otherwise,
+        zone,
+        origin);
+  }
+
+  private static Outlook outlook(Analysis analysis) {
+    return analysis
+        .state()
+        .estimate()
+        .map(estimate -> Forecaster.outlook(Present.of(analysis.vessel(), estimate)))
+        .orElse(Outlook.NONE);
+  }
+
+  /** A second pass, for the readings around the gravest events. */
+  private static List<EventWindow> windows(Source source, Analysis analysis) throws IOException {
+    List<Event> chosen =
+        analysis.events().stream()
+            .filter(event -> CLOSER.contains(event.kind()))
+            .sorted(
+                Comparator.comparingInt((Event e) -> CLOSER.indexOf(e.kind()))
+                    .thenComparing(Event::time))
+            .toList();
+    List<EventWindow> windows = new ArrayList<>();
+    for (Event event : spread(chosen)) {
+      windows.add(new EventWindow(event));
+    }
+    if (windows.isEmpty()) {
+      return windows;
+    }
+    try (VesselRows rows = new VesselRows(source.logs(), source.vessel().id())) {
+      for (LogRow row = rows.next(); row != null; row = rows.next()) {
+        for (EventWindow window : windows) {
+          window.take(row);
+        }
+      }
+    }
+    return windows;
+  }
+
+  /** At most two of each kind, the first and the last, and no more than fit a page or two. */
+  private static List<Event> spread(List<Event> events) {
+    List<Event> spread = new ArrayList<>();
+    for (EventKind kind : CLOSER) {
+      List<Event> same = events.stream().filter(event -> event.kind() == kind).toList();
+      if (!same.isEmpty()) {
+        spread.add(same.get(0));
+      }
+      if (same.size() > 1) {
+        spread.add(same.get(same.size() - 1));
+      }
+    }
+    List<Event> few = new ArrayList<>(spread.subList(0, Math.min(WINDOWS, spread.size())));
+    few.sort(Comparator.comparing(Event::time));
+    return few;
+  }
+
+  /** The report as JSON. */
+  public static String json(List<Chapter> chapters) {
+    return JsonReport.text(chapters);
+  }
+
+  /** The report as one HTML page. */
+  public static String html(List<Chapter> chapters) {
+    return HtmlPage.of(chapters);
+  }
+}

@@ -1,0 +1,118 @@
+package tunwarden.report.find;
+
+import java.time.Instant;
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
+import java.util.Optional;
+import tunwarden.estimate.Event;
+import tunwarden.estimate.EventKind;
+import tunwarden.vessel.ReliefSetting;
+import tunwarden.vessel.Vessel;
+
+/** Fed every row of one vessel, it names the events once the log has ended. Memory is bounded. */
+public final class EventFinder {
+  private final Vessel vessel;
+  private final GapTracker gaps = new GapTracker();
+  private final MovementTracker movements = new MovementTracker();
+  private final StillTracker still = new StillTracker();
+  private final WarmingTracker warming = new WarmingTracker();
+  private final Optional<OverTracker> over;
+
+  /** A finder for one pass over one vessel's log. */
+  public EventFinder(Vessel vessel) {
+    this.vessel = vessel;
+    this.over = vessel.limits().relief().map(r -> new OverTracker(r.setPaGauge()));
+  }
+
+  /** Takes in the next row. */
+  public void add(Point point) {
+    if (gaps.add(point)) {
+      movements.silence();
+    }
+    movements.add(point);
+    still.add(point);
+    warming.add(point);
+    over.ifPresent(tracker -> tracker.add(point));
+  }
+
+  /** The events, in order of time; call once, after the last row. */
+  public List<Event> finish() {
+    movements.silence();
+    still.finish();
+    warming.finish();
+    over.ifPresent(OverTracker::finish);
+    List<Event> events = new ArrayList<>();
+    Naming naming = new Naming(vessel, usualU95Pa());
+    movements.movements().forEach(m -> events.add(naming.movement(m)));
+    movements.spikes().forEach(m -> events.add(naming.spike(m)));
+    gaps.gaps().forEach(g -> events.add(naming.gap(g)));
+    frozen().forEach(s -> events.add(naming.frozen(s)));
+    warming.rises().forEach(r -> events.add(naming.warming(r)));
+    addOver(events, naming);
+    events.sort(Comparator.comparing(Event::time).thenComparing(Event::kind));
+    return events;
+  }
+
+  private double usualU95Pa() {
+    return Math.max(vessel.accuracy().pressureU95Pa(), 2 * movements.noise().sigma());
+  }
+
+  /** Usual distance between rows, s; NaN while unknown. */
+  public double usualIntervalS() {
+    return gaps.usualS();
+  }
+
+  /** Scatter of the pressure about its course, Pa. */
+  public double pressureNoisePa() {
+    return movements.noise().sigma();
+  }
+
+  /** Step of the pressure's last digit, Pa; 0 while unknown. */
+  public double pressureStepPa() {
+    return movements.noise().step();
+  }
+
+  /** Stretches much longer than the signal is ever still by itself, or still while it warmed. */
+  private List<StillTracker.Stretch> frozen() {
+    List<StillTracker.Stretch> longest = still.longest();
+    List<StillTracker.Stretch> frozen = new ArrayList<>();
+    double usual = longest.size() > 8 ? longest.get(longest.size() / 2).seconds() : 0;
+    for (StillTracker.Stretch stretch : longest) {
+      boolean unusual = usual > 0 && stretch.seconds() > 6 * usual;
+      if (stretch.seconds() >= 600 && (unusual || shouldHaveMoved(stretch))) {
+        frozen.add(stretch);
+      }
+    }
+    return frozen;
+  }
+
+  /** By the gas law alone, without the liquid's help, the change of temperature would show. */
+  private boolean shouldHaveMoved(StillTracker.Stretch stretch) {
+    double absolute = stretch.paGauge() + vessel.site().ambientPaAbsolute();
+    double byGas = absolute * Math.abs(stretch.untilK() / stretch.fromK() - 1);
+    double noticed = 3 * movements.noise().step() + 3 * movements.noise().sigma();
+    return noticed > 0 && byGas > noticed;
+  }
+
+  private void addOver(List<Event> events, Naming naming) {
+    if (over.isEmpty()) {
+      return;
+    }
+    ReliefSetting relief = vessel.limits().relief().orElseThrow();
+    for (Movement stretch : over.get().stretches()) {
+      Instant from = Instant.ofEpochMilli(stretch.fromMs());
+      Instant until = Instant.ofEpochMilli(stretch.untilMs()).plusSeconds(60);
+      boolean lifted =
+          events.stream()
+              .anyMatch(
+                  e ->
+                      e.kind() == EventKind.LIFT
+                          && !e.time().isBefore(from)
+                          && !e.time().isAfter(until));
+      if (!lifted) {
+        events.add(naming.overRelief(stretch, relief));
+      }
+    }
+  }
+}

@@ -1,0 +1,200 @@
+package tunwarden.report.find;
+
+import java.util.ArrayDeque;
+import java.util.ArrayList;
+import java.util.List;
+
+/**
+ * Finds movements and spikes in a pressure signal. A shut vessel follows its temperature and its
+ * liquid within minutes; a valve changes the pressure within seconds. So a value far from the
+ * straight course of the last rows opens a movement, if the next rows stay away; if they return, it
+ * was a spike.
+ */
+final class MovementTracker {
+  private static final int COURSE_ROWS = 12;
+  private static final int LEAST_ROWS = 4;
+  private static final double FLOOR_PA = 350;
+  private static final int SPIKE_ROWS = 3;
+
+  private final NoiseGauge noise = new NoiseGauge();
+  private final ArrayDeque<Point> course = new ArrayDeque<>();
+  private final List<Point> away = new ArrayList<>();
+  private final List<Movement> movements = new ArrayList<>();
+  private final List<Movement> spikes = new ArrayList<>();
+  private Point last;
+  private Point before;
+  private boolean moving;
+  private double extremePa;
+  private Point extreme;
+
+  /** Smallest change that counts, Pa. */
+  private double threshold() {
+    return Math.max(FLOOR_PA, Math.max(6 * noise.sigma(), 2.5 * noise.step()));
+  }
+
+  void add(Point point) {
+    if (last != null && !moving && away.isEmpty()) {
+      noise.add(point.paGauge() - last.paGauge());
+    }
+    if (moving) {
+      goOn(point);
+    } else {
+      judge(point);
+    }
+    last = point;
+  }
+
+  /** The signal was silent: nothing before it tells what comes after. */
+  void silence() {
+    if (moving) {
+      end();
+    }
+    flushAway();
+    course.clear();
+    last = null;
+  }
+
+  private void judge(Point point) {
+    if (course.size() < LEAST_ROWS) {
+      keep(point);
+      return;
+    }
+    double expected = expected(point.ms());
+    double off = point.paGauge() - expected;
+    if (Math.abs(off) <= threshold()) {
+      if (!away.isEmpty()) {
+        spike(expected);
+      }
+      keep(point);
+      return;
+    }
+    if (!away.isEmpty() && off * (away.get(0).paGauge() - expected(away.get(0).ms())) < 0) {
+      spike(expected);
+    }
+    away.add(point);
+    if (away.size() >= SPIKE_ROWS || isLargeAndGoingOn()) {
+      begin(point);
+    }
+  }
+
+  /** Two rows away, the second further than the first, are no spike. */
+  private boolean isLargeAndGoingOn() {
+    if (away.size() < 2) {
+      return false;
+    }
+    double first = away.get(0).paGauge() - expected(away.get(0).ms());
+    double second = away.get(1).paGauge() - expected(away.get(1).ms());
+    return Math.abs(second) > Math.abs(first) + threshold();
+  }
+
+  private void spike(double expected) {
+    Point first = away.get(0);
+    Point top = away.get(away.size() - 1);
+    double sharp = Math.abs(top.paGauge() - expected) / threshold();
+    spikes.add(new Movement(first.ms(), top.ms(), expected, top.paGauge(), top.kelvin(), sharp));
+    away.clear();
+  }
+
+  private void begin(Point point) {
+    moving = true;
+    before = course.peekLast();
+    extreme = away.get(0);
+    boolean down = away.get(0).paGauge() < level();
+    for (Point each : away) {
+      boolean further =
+          down ? each.paGauge() < extreme.paGauge() : each.paGauge() > extreme.paGauge();
+      extreme = further ? each : extreme;
+    }
+    extremePa = extreme.paGauge();
+    if (extreme != point) {
+      end();
+      return;
+    }
+    away.clear();
+  }
+
+  private void goOn(Point point) {
+    boolean down = extremePa < level();
+    double further = down ? extremePa - point.paGauge() : point.paGauge() - extremePa;
+    double seconds = Math.max(1, (point.ms() - extreme.ms()) / 1000.0);
+    boolean quick = further > Math.max(noise.step(), threshold() / 8) && further / seconds > 8;
+    if (quick) {
+      extreme = point;
+      extremePa = point.paGauge();
+      return;
+    }
+    if (further < -threshold() / 2 || seconds > 20) {
+      end();
+      keep(point);
+    }
+  }
+
+  private void end() {
+    double sharp = Math.abs(extremePa - level()) / threshold();
+    movements.add(
+        new Movement(before.ms(), extreme.ms(), level(), extremePa, extreme.kelvin(), sharp));
+    moving = false;
+    List<Point> later = new ArrayList<>(away);
+    away.clear();
+    course.clear();
+    for (Point point : later) {
+      if (point.ms() > extreme.ms()) {
+        keep(point);
+      }
+    }
+  }
+
+  private void flushAway() {
+    if (away.size() > 1) {
+      begin(away.get(away.size() - 1));
+      if (moving) {
+        end();
+      }
+    }
+    away.clear();
+  }
+
+  private void keep(Point point) {
+    course.addLast(point);
+    if (course.size() > COURSE_ROWS) {
+      course.removeFirst();
+    }
+  }
+
+  private double level() {
+    return course.isEmpty() ? before.paGauge() : expected(course.peekLast().ms());
+  }
+
+  /** The straight line through the last rows, carried on; never steeper than the rows show. */
+  private double expected(long ms) {
+    double n = course.size();
+    double originMs = course.peekLast().ms();
+    double sumT = 0;
+    double sumP = 0;
+    double sumTt = 0;
+    double sumTp = 0;
+    for (Point point : course) {
+      double t = (point.ms() - originMs) / 1000;
+      sumT += t;
+      sumP += point.paGauge();
+      sumTt += t * t;
+      sumTp += t * point.paGauge();
+    }
+    double spread = sumTt - sumT * sumT / n;
+    double slope = spread > 0 ? (sumTp - sumT * sumP / n) / spread : 0;
+    double at = (ms - originMs) / 1000 - sumT / n;
+    return sumP / n + slope * at;
+  }
+
+  List<Movement> movements() {
+    return movements;
+  }
+
+  List<Movement> spikes() {
+    return spikes;
+  }
+
+  NoiseGauge noise() {
+    return noise;
+  }
+}
