@@ -44,10 +44,13 @@ public final class EventFinder {
     over.ifPresent(OverTracker::finish);
     List<Event> events = new ArrayList<>();
     Naming naming = new Naming(vessel, usualU95Pa());
-    movements.movements().forEach(m -> events.add(naming.movement(m)));
+    List<StillTracker.Stretch> frozen = frozen();
+    Echoes.without(movements.movements()).stream()
+        .filter(m -> frozen.stream().noneMatch(s -> s.explains(m)))
+        .forEach(m -> events.add(naming.movement(m)));
     movements.spikes().forEach(m -> events.add(naming.spike(m)));
     gaps.gaps().forEach(g -> events.add(naming.gap(g)));
-    frozen().forEach(s -> events.add(naming.frozen(s)));
+    frozen.forEach(s -> events.add(naming.frozen(s)));
     warming.rises().forEach(r -> events.add(naming.warming(r)));
     addOver(events, naming);
     events.sort(Comparator.comparing(Event::time).thenComparing(Event::kind));
@@ -77,9 +80,11 @@ public final class EventFinder {
   private List<StillTracker.Stretch> frozen() {
     List<StillTracker.Stretch> longest = still.longest();
     List<StillTracker.Stretch> frozen = new ArrayList<>();
-    double usual = longest.size() > 8 ? longest.get(longest.size() / 2).seconds() : 0;
+    boolean many = longest.size() > 8;
+    double usual = many ? longest.get(longest.size() / 2).seconds() : 0;
+    double long3 = many ? longest.get(2).seconds() : 0;
     for (StillTracker.Stretch stretch : longest) {
-      boolean unusual = usual > 0 && stretch.seconds() > 6 * usual;
+      boolean unusual = many && stretch.seconds() > 6 * usual && stretch.seconds() > 2.2 * long3;
       if (stretch.seconds() >= 600 && (unusual || shouldHaveMoved(stretch))) {
         frozen.add(stretch);
       }

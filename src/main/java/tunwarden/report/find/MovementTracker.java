@@ -12,7 +12,7 @@ import java.util.List;
  */
 final class MovementTracker {
   private static final int COURSE_ROWS = 12;
-  private static final int LEAST_ROWS = 4;
+  private static final int LEAST_ROWS = 5;
   private static final double FLOOR_PA = 350;
   private static final int SPIKE_ROWS = 3;
 
@@ -61,7 +61,7 @@ final class MovementTracker {
     }
     double expected = expected(point.ms());
     double off = point.paGauge() - expected;
-    if (Math.abs(off) <= threshold()) {
+    if (Math.abs(off) <= threshold() * reach(point.ms())) {
       if (!away.isEmpty()) {
         spike(expected);
       }
@@ -131,8 +131,10 @@ final class MovementTracker {
 
   private void end() {
     double sharp = Math.abs(extremePa - level()) / threshold();
-    movements.add(
-        new Movement(before.ms(), extreme.ms(), level(), extremePa, extreme.kelvin(), sharp));
+    if (sharp >= 1) {
+      movements.add(
+          new Movement(before.ms(), extreme.ms(), level(), extremePa, extreme.kelvin(), sharp));
+    }
     moving = false;
     List<Point> later = new ArrayList<>(away);
     away.clear();
@@ -165,7 +167,22 @@ final class MovementTracker {
     return course.isEmpty() ? before.paGauge() : expected(course.peekLast().ms());
   }
 
-  /** The straight line through the last rows, carried on; never steeper than the rows show. */
+  /** How much less certain the straight line is at a time outside its rows; 1 amid them. */
+  private double reach(long ms) {
+    double n = course.size();
+    double mean = 0;
+    for (Point point : course) {
+      mean += (point.ms() - ms) / 1000.0 / n;
+    }
+    double spread = 0;
+    for (Point point : course) {
+      double off = (point.ms() - ms) / 1000.0 - mean;
+      spread += off * off;
+    }
+    return Math.sqrt(1 + 1 / n + (spread > 0 ? mean * mean / spread : 0));
+  }
+
+  /** The straight line through the last rows, carried on. */
   private double expected(long ms) {
     double n = course.size();
     double originMs = course.peekLast().ms();

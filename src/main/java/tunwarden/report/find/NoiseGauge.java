@@ -9,13 +9,20 @@ final class NoiseGauge {
   private static final double MEMORY_ROWS = 200;
   private static final double TO_SIGMA = Math.sqrt(Math.PI) / 2;
 
+  private static final int MOST_STILL_ROWS = 12;
+
   private double meanChange;
   private double step = Double.POSITIVE_INFINITY;
   private long seen;
+  private int still;
 
   /** Takes in one change between neighbouring rows. */
   void add(double change) {
     double size = Math.abs(change);
+    still = size == 0 ? still + 1 : 0;
+    if (still > MOST_STILL_ROWS) {
+      return; // a signal that stands still says nothing about its noise
+    }
     if (size > 1e-6 && size < step) {
       step = size;
     }

@@ -7,6 +7,7 @@ import java.util.List;
 /** The longest stretches in which the pressure signal showed exactly the same value. */
 final class StillTracker {
   private static final int KEPT = 24;
+  private static final long AWAKE_MS = 60_000;
 
   /**
    * One stretch.
@@ -22,6 +23,11 @@ final class StillTracker {
       long fromMs, long untilMs, double paGauge, double afterPa, double fromK, double untilK) {
     double seconds() {
       return (untilMs - fromMs) / 1000.0;
+    }
+
+    /** A signal that wakes up jumps to where the pressure has gone meanwhile: no gas moved. */
+    boolean explains(Movement movement) {
+      return movement.fromMs() >= fromMs && movement.fromMs() <= untilMs + AWAKE_MS;
     }
   }
 

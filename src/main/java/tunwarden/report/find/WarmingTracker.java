@@ -145,7 +145,7 @@ final class WarmingTracker {
       topMs = Math.min(ms, lastMs);
     }
     boolean fell = mean < topK - Math.max(0.5, 0.3 * (topK - baseK));
-    boolean stopped = ms - topMs > 90 * MINUTE_MS || isLevel();
+    boolean stopped = ms - topMs > 90 * MINUTE_MS || ms - startMs > 150 * MINUTE_MS && isLevel();
     if (fell || stopped) {
       rises.add(new Rise((long) startMs, (long) topMs, baseK, topK, !fell));
       startMs = Double.NaN;
