@@ -50,8 +50,8 @@ public final class Main implements Callable<Integer> {
   private static final List<Class<?>> COMMANDS =
       List.of(
           WatchCommand.class, //
-          ReplayCommand.class,
-          ReportCommand.class,
+          ReplayCommand.class, //
+          ReportCommand.class, //
           HeadlessCommand.class, //
           Reckon.class, //
           RehearseCommand.class, //
