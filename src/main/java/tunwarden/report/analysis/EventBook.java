@@ -1,22 +1,23 @@
 package tunwarden.report.analysis;
 
-import java.time.Duration;
-import java.time.Instant;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Set;
 import tunwarden.estimate.Event;
 import tunwarden.estimate.EventKind;
 
 /**
- * The events of a log: what the estimator found while it ran, refined by what is found with the
- * whole log in hand. Where both speak of one thing, the later look gives its times and the
- * estimator the gas, since it knows what the liquid gave off meanwhile.
+ * The events of a log. What can be judged better with the whole log in hand is taken from there;
+ * what only the estimator's model of the liquid can see is taken from its running reports.
  */
 final class EventBook {
-  private static final Duration SAME = Duration.ofSeconds(120);
+  /** Kinds for which the sealed model is needed, not only the course of the readings. */
+  private static final Set<EventKind> BY_MODEL =
+      Set.of(EventKind.LEAK, EventKind.DRIFT, EventKind.UNEXPLAINED);
+
   private static final double WORTH_TELLING = 0.5;
 
   private final Map<String, Event> running = new LinkedHashMap<>();
@@ -24,72 +25,19 @@ final class EventBook {
   /** Takes in what one step reported; a later word about the same event replaces the earlier. */
   void note(List<Event> events) {
     for (Event event : events) {
-      running.put(event.kind() + "@" + event.time(), event);
+      if (BY_MODEL.contains(event.kind())) {
+        running.put(event.kind() + "@" + event.time(), event);
+      }
     }
   }
 
   /** The events of the whole log, in order of time. */
   List<Event> merged(List<Event> found) {
-    List<Event> merged = new ArrayList<>();
-    List<Event> left = new ArrayList<>(running.values());
-    for (Event event : found) {
-      Event twin = twin(event, left);
-      if (twin != null) {
-        left.remove(twin);
-      }
-      merged.add(twin == null ? event : refined(event, twin));
-    }
-    for (Event event : left) {
-      if (event.confidence() >= WORTH_TELLING && !isTold(event, merged)) {
-        merged.add(event);
-      }
-    }
+    List<Event> merged = new ArrayList<>(found);
+    running.values().stream()
+        .filter(event -> event.confidence() >= WORTH_TELLING)
+        .forEach(merged::add);
     merged.sort(Comparator.comparing(Event::time).thenComparing(Event::kind));
     return merged;
-  }
-
-  private static Event twin(Event event, List<Event> others) {
-    Event best = null;
-    long bestMs = SAME.toMillis() + 1;
-    for (Event other : others) {
-      long apart = Math.abs(Duration.between(event.time(), other.time()).toMillis());
-      if (other.kind() == event.kind() && apart < bestMs) {
-        best = other;
-        bestMs = apart;
-      }
-    }
-    return best;
-  }
-
-  private static Event refined(Event found, Event running) {
-    double gasKg = running.gasKg() == 0 ? found.gasKg() : running.gasKg();
-    double confidence = Math.max(found.confidence(), running.confidence());
-    return new Event(
-        found.kind(),
-        found.vessel(),
-        found.time(),
-        found.until(),
-        found.open(),
-        found.fromPaGauge(),
-        found.toPaGauge(),
-        gasKg,
-        confidence,
-        found.why());
-  }
-
-  /** Kinds the later look judges better, or the same movement under another name. */
-  private static boolean isTold(Event event, List<Event> merged) {
-    if (event.kind() == EventKind.MARK || event.kind() == EventKind.LEAK) {
-      return false;
-    }
-    return merged.stream().anyMatch(other -> overlaps(event, other));
-  }
-
-  private static boolean overlaps(Event event, Event other) {
-    boolean gasMoves = event.gasKg() != 0 && other.gasKg() != 0;
-    Instant from = other.time().minus(SAME);
-    Instant until = other.until().plus(SAME);
-    boolean within = !event.time().isBefore(from) && !event.time().isAfter(until);
-    return within && (gasMoves || event.kind() == other.kind());
   }
 }
