@@ -5,6 +5,7 @@ import java.io.PrintWriter;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
+import java.util.Optional;
 import java.util.concurrent.Callable;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
@@ -105,7 +106,7 @@ public final class Main implements Callable<Integer> {
   public Integer call() throws IOException {
     Path cellarFile = Path.of(CellarFile.USUAL_NAME);
     if (Files.exists(cellarFile)) {
-      WatchCommand.watch(cellarFile, screen);
+      WatchCommand.watch(cellarFile, Optional.empty(), screen);
     } else {
       RehearsalDashboard.run(Fronts.of(screen));
     }

@@ -3,6 +3,7 @@ package tunwarden.app;
 import java.io.IOException;
 import java.nio.file.Path;
 import java.time.InstantSource;
+import java.util.Optional;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
@@ -32,16 +33,22 @@ public final class WatchCommand implements Callable<Integer> {
       defaultValue = CellarFile.USUAL_NAME)
   private Path cellarFile;
 
+  @Option(
+      names = "--data",
+      paramLabel = "DIR",
+      description = "Record readings and journal into this folder, as headless does.")
+  private Path data;
+
   @Mixin private ScreenOptions screen = new ScreenOptions();
 
   @Override
   public Integer call() throws IOException {
-    watch(cellarFile, screen);
+    watch(cellarFile, Optional.ofNullable(data), screen);
     return 0;
   }
 
-  static void watch(Path cellarFile, ScreenOptions screen) throws IOException {
+  static void watch(Path cellarFile, Optional<Path> data, ScreenOptions screen) throws IOException {
     Cellar cellar = CellarFile.read(cellarFile);
-    LiveDashboard.run(cellar, Fronts.of(screen), new SerialLinks(), InstantSource.system());
+    LiveDashboard.run(cellar, data, Fronts.of(screen), new SerialLinks(), InstantSource.system());
   }
 }

@@ -1,11 +1,18 @@
 package tunwarden.app.board;
 
+import java.io.IOException;
+import java.nio.file.Path;
 import java.time.InstantSource;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Consumer;
+import tunwarden.alarm.Transition;
 import tunwarden.config.Cellar;
 import tunwarden.config.PortPlans;
+import tunwarden.journal.Entries;
+import tunwarden.journal.Recorder;
+import tunwarden.journal.disk.RealDisk;
 import tunwarden.reading.Quantity;
 import tunwarden.screen.model.Origin;
 import tunwarden.screen.terminal.Dashboard;
@@ -14,26 +21,52 @@ import tunwarden.serial.LinkHealth;
 import tunwarden.serial.LinkWords;
 import tunwarden.serial.PortPlan;
 import tunwarden.serial.PortRunner;
+import tunwarden.station.Sink;
 import tunwarden.station.StationLoop;
 
 /** The dashboard over real instruments: ports, station, screen, started and stopped in order. */
 public final class LiveDashboard {
   private final Cellar cellar;
+  private final ByteLinkFactory links;
   private final InstantSource clock;
   private final List<PortRunner> ports = new ArrayList<>();
 
-  private LiveDashboard(Cellar cellar, InstantSource clock) {
+  private LiveDashboard(Cellar cellar, ByteLinkFactory links, InstantSource clock) {
     this.cellar = cellar;
+    this.links = links;
     this.clock = clock;
   }
 
-  /** Watches until the person quits. Plans are made before anything is opened. */
-  public static void run(Cellar cellar, Front front, ByteLinkFactory links, InstantSource clock) {
-    new LiveDashboard(cellar, clock).watch(front, links);
+  /**
+   * Watches until the person quits. Plans are made before anything is opened.
+   *
+   * @param data folder to record into; nothing is recorded without one
+   * @throws IOException when the folder cannot be used
+   */
+  public static void run(
+      Cellar cellar, Optional<Path> data, Front front, ByteLinkFactory links, InstantSource clock)
+      throws IOException {
+    LiveDashboard dashboard = new LiveDashboard(cellar, links, clock);
+    List<PortPlan> plans = PortPlans.of(cellar);
+    if (data.isEmpty()) {
+      dashboard.watch(plans, front, List.of(), List.of());
+      return;
+    }
+    try (Recorder recorder = Recorder.open(data.get(), new RealDisk(), cellar.recording(), clock)) {
+      recorder.start();
+      dashboard.watch(
+          plans,
+          front,
+          List.of(recorder),
+          List.of(transition -> recorder.write(Entries.of(transition))));
+    }
   }
 
-  private void watch(Front front, ByteLinkFactory links) {
-    List<PortPlan> plans = PortPlans.of(cellar);
+  private void watch(
+      List<PortPlan> plans,
+      Front front,
+      List<Sink> extraSinks,
+      List<Consumer<Transition>> extraListeners) {
     BoardKeeper.Frame frame =
         new BoardKeeper.Frame(
             Origin.LIVE,
@@ -43,7 +76,8 @@ public final class LiveDashboard {
             Optional::empty,
             Optional::empty);
     Assembly assembly =
-        Assembly.of(cellar.vessels(), cellar.alarms(), frame, this::source, List.of(), List.of());
+        Assembly.of(
+            cellar.vessels(), cellar.alarms(), frame, this::source, extraSinks, extraListeners);
     try (StationLoop loop = new StationLoop(assembly.station(), clock)) {
       plans.forEach(plan -> ports.add(new PortRunner(plan, links, loop.inlet(), clock)));
       loop.start();
