@@ -3,15 +3,18 @@ package tunwarden.app;
 import java.io.IOException;
 import java.net.InetSocketAddress;
 import java.nio.file.Path;
+import java.time.Instant;
 import java.time.InstantSource;
 import java.util.Optional;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
+import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Spec;
 import tunwarden.app.headless.HeadlessPlan;
 import tunwarden.app.headless.HeadlessRun;
+import tunwarden.app.headless.NoticeTrial;
 import tunwarden.config.CellarFile;
 import tunwarden.serve.ServeAddress;
 import tunwarden.serve.TokenFile;
@@ -28,7 +31,8 @@ import tunwarden.serve.TokenFile;
     footerHeading = "%nExamples:%n",
     footer = {
       "  tunwarden headless --cellar cellar.toml --data /var/lib/tunwarden",
-      "  tunwarden headless --data data --serve 0.0.0.0:9470 --token-file token.txt"
+      "  tunwarden headless --data data --serve 0.0.0.0:9470 --token-file token.txt",
+      "  tunwarden headless --test-notice"
     })
 public final class HeadlessCommand implements Callable<Integer> {
   private static final String NOWHERE = "none";
@@ -45,7 +49,6 @@ public final class HeadlessCommand implements Callable<Integer> {
   @Option(
       names = "--data",
       paramLabel = "DIR",
-      required = true,
       description = "Folder for everything recorded; made if absent, one program at a time.")
   private Path data;
 
@@ -62,8 +65,21 @@ public final class HeadlessCommand implements Callable<Integer> {
       description = "File with the token that others must give; needed beyond this computer.")
   private Path tokenFile;
 
+  @Option(
+      names = "--test-notice",
+      description = "Send a test by every way of [notice], say what became of it, and end.")
+  private boolean testNotice;
+
   @Override
   public Integer call() throws IOException {
+    if (testNotice) {
+      boolean all = NoticeTrial.run(cellarFile, Instant.now(), spec.commandLine().getOut());
+      return all ? 0 : Faults.FAILED;
+    }
+    if (data == null) {
+      throw new ParameterException(
+          spec.commandLine(), "Say with --data DIR where everything is to be recorded.");
+    }
     Optional<InetSocketAddress> address =
         serve.equals(NOWHERE) ? Optional.empty() : Optional.of(ServeAddress.parse(serve));
     Optional<String> token =

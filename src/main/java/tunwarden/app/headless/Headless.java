@@ -28,6 +28,8 @@ import tunwarden.journal.Recorder;
 import tunwarden.journal.SavedState;
 import tunwarden.journal.disk.Disk;
 import tunwarden.journal.disk.RealDisk;
+import tunwarden.notice.Channel;
+import tunwarden.notice.Notifier;
 import tunwarden.serial.ByteLinkFactory;
 import tunwarden.serve.EventFeed;
 import tunwarden.serve.LatestState;
@@ -60,6 +62,7 @@ public final class Headless implements AutoCloseable {
   private Recorder recorder;
   private AlarmKeeper alarms;
   private Optional<Server> server = Optional.empty();
+  private volatile Optional<Notifier> notifier = Optional.empty();
   private CellarWatch cellarWatch;
   private volatile Watching watching;
   private volatile boolean reloadAsked;
@@ -103,8 +106,10 @@ public final class Headless implements AutoCloseable {
     alarms = new AlarmKeeper(book.retain(ids(cellar)), List.of(this::changed));
     EventFeed events = new EventFeed(Optional.of(reader()));
     recorder.listen(events);
+    recorder.listen((entries, durable) -> notifier.ifPresent(n -> n.recorded(entries, durable)));
     recorder.watchDisk((failing, text) -> report(AlarmKind.DISK, failing, text));
     watching = new Watching(cellar, links, clock, sinks());
+    notifier = notifier(cellar);
     resume(cellar, saved);
     recorder.start();
     say("start", "Watching " + cellar.vessels().size() + " vessels of " + cellar.file() + ".");
@@ -113,8 +118,23 @@ public final class Headless implements AutoCloseable {
       server.ifPresent(s -> console.accept("Serving on http:/" + s.address() + "/"));
     }
     watching.start();
+    notifier.ifPresent(Notifier::start);
     saveState();
     minder.start();
+  }
+
+  private Optional<Notifier> notifier(Cellar cellar) throws IOException {
+    List<Channel> channels = Channels.of(cellar, System.getenv());
+    if (channels.isEmpty()) {
+      return Optional.empty();
+    }
+    return Optional.of(
+        new Notifier(
+            channels,
+            disk,
+            recorder.folder().notices(),
+            clock,
+            (failing, text) -> report(AlarmKind.NOTICE, failing, text)));
   }
 
   private List<Sink> sinks() {
@@ -241,6 +261,7 @@ public final class Headless implements AutoCloseable {
     try {
       Cellar cellar = CellarFile.read(plan.cellarFile());
       Watching next = new Watching(cellar, links, clock, sinks());
+      Channels.of(cellar, System.getenv());
       change(next);
       report(AlarmKind.CONFIGURATION, false, "");
       say("reload", "The cellar file was read again: " + cellar.vessels().size() + " vessels.");
@@ -252,8 +273,13 @@ public final class Headless implements AutoCloseable {
   }
 
   /** Old ports and station end before the new begin; unchanged vessels keep what was learnt. */
-  private void change(Watching next) {
+  private void change(Watching next) throws IOException {
     Watching old = watching;
+    if (!old.cellar().notice().equals(next.cellar().notice())) {
+      notifier.ifPresent(Notifier::close);
+      notifier = notifier(next.cellar());
+      notifier.ifPresent(Notifier::start);
+    }
     old.close();
     Set<Vessel> before = new HashSet<>(old.cellar().vessels());
     Set<String> unchanged = new HashSet<>();
@@ -299,5 +325,6 @@ public final class Headless implements AutoCloseable {
     } catch (IOException e) {
       LOG.warn("closing the recorder", e);
     }
+    notifier.ifPresent(Notifier::close);
   }
 }
