@@ -46,7 +46,13 @@ final class Console extends UnixTerminal {
   @Override
   public void exitPrivateMode() {
     beforeLeaving.run();
-    Patience.within("leaving the screen", () -> super.exitPrivateMode());
+    Patience.within("leaving the screen", this::leaveScreen);
+  }
+
+  /** The terminal library does not flush what it writes on leaving. */
+  private void leaveScreen() throws IOException {
+    super.exitPrivateMode();
+    flush();
   }
 
   @Override

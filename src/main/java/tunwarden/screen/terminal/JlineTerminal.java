@@ -47,6 +47,13 @@ final class JlineTerminal extends ANSITerminal {
         : new TerminalSize(80, 24);
   }
 
+  /** The terminal library does not flush what it writes on leaving. */
+  @Override
+  public void exitPrivateMode() throws IOException {
+    super.exitPrivateMode();
+    flush();
+  }
+
   @Override
   public void close() throws IOException {
     console.setAttributes(before);

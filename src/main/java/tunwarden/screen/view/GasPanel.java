@@ -9,8 +9,6 @@ import tunwarden.estimate.Estimate;
 import tunwarden.estimate.Mode;
 import tunwarden.forecast.Caution;
 import tunwarden.forecast.Outlook;
-import tunwarden.forecast.Projection;
-import tunwarden.forecast.Scenario;
 import tunwarden.screen.model.Board;
 import tunwarden.screen.model.VesselBoard;
 import tunwarden.units.Display;
@@ -24,6 +22,7 @@ final class GasPanel {
   private final Display units;
   private final Assessment assessment;
   private final Standing standing;
+  private final String lately;
   private final List<Line> lines = new ArrayList<>();
   private final int width;
 
@@ -35,6 +34,7 @@ final class GasPanel {
     this.units = units;
     this.assessment = vessel.assessment();
     this.standing = Standing.of(vessel, board);
+    this.lately = Lately.of(vessel, board.now(), units);
   }
 
   static void draw(Canvas canvas, Area area, Display units, VesselBoard vessel, Board board) {
@@ -54,6 +54,9 @@ final class GasPanel {
 
   private void write() {
     assessment.estimate().ifPresentOrElse(this::writeEstimate, this::writeNothingYet);
+    if (!lately.isEmpty()) {
+      named("lately", lately, Role.NORMAL);
+    }
     writeMargin();
     writeOutlook(assessment.outlook());
     for (Caution caution : assessment.outlook().cautions()) {
@@ -65,7 +68,11 @@ final class GasPanel {
         .map(Estimate::ignorance)
         .filter(text -> !text.isEmpty())
         .ifPresent(text -> named("unknown", InUnits.of(text, units), Role.NORMAL));
+    String ignorance = assessment.estimate().map(Estimate::ignorance).orElse("");
     for (String note : assessment.notes()) {
+      if (note.equals(ignorance)) {
+        continue;
+      }
       named("note", InUnits.of(note, units), Role.NORMAL);
     }
   }
@@ -139,16 +146,6 @@ final class GasPanel {
       String at = units.temperature(outlook.liquidFullK().getAsDouble());
       lines.add(new Line("full", "if warmed to " + at, Role.NORMAL));
     }
-    for (Projection p : outlook.projections()) {
-      if (p.scenario() == Scenario.HOLD || p.scenario() == Scenario.REBOUND) {
-        lines.add(
-            new Line(p.scenario() == Scenario.HOLD ? "hold" : "vented", projected(p), Role.NORMAL));
-      }
-    }
-  }
-
-  private String projected(Projection p) {
-    return InUnits.of(p.words(), units) + ": " + units.gauge(p.paGauge());
   }
 
   private void named(String name, String text, Role role) {

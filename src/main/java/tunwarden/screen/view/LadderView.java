@@ -211,12 +211,18 @@ final class LadderView {
 
   private String distance(Rung rung, double nowPa) {
     if (rung.kind() != Rung.Kind.NOW) {
-      return Double.isFinite(nowPa) ? units.signedPressureNumber(rung.paGauge() - nowPa) : "";
+      return Double.isFinite(nowPa) ? signed(rung.paGauge() - nowPa) : "";
     }
     return assessment
         .margins()
         .map(margins -> "±" + units.pressureNumber(margins.readingU95Pa()))
         .orElse("");
+  }
+
+  /** With its sign, unless it rounds to nothing. */
+  private String signed(double pa) {
+    String text = units.signedPressureNumber(pa);
+    return text.chars().anyMatch(c -> c >= '1' && c <= '9') ? text : text.substring(1);
   }
 
   /** The 95 % range of the projection a forecast rung stands for. */

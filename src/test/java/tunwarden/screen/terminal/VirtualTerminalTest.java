@@ -42,7 +42,9 @@ class VirtualTerminalTest {
       Model model = Update.key(start, Key.typed(page.letter())).model();
       Canvas canvas = virtual.show(model);
       assertEquals(canvas.text(), virtual.text(), page + " in " + theme);
-      all.append(page.title()).append('\n').append(virtual.paint()).append('\n');
+      if (page != Page.VENT) {
+        all.append(page.title()).append('\n').append(virtual.paint()).append('\n');
+      }
     }
     GoldenFile.check("paint-80x24-" + theme.name().toLowerCase(Locale.ROOT), all.toString());
   }
