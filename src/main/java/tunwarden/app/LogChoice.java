@@ -1,19 +1,15 @@
 package tunwarden.app;
 
 import java.io.IOException;
-import java.io.InputStream;
-import java.nio.file.Files;
 import java.nio.file.Path;
-import java.security.MessageDigest;
-import java.security.NoSuchAlgorithmException;
 import java.time.ZoneId;
 import java.util.ArrayList;
-import java.util.HexFormat;
 import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
 import picocli.CommandLine.Option;
+import tunwarden.alarm.AlarmSettings;
 import tunwarden.app.options.VesselOptions;
 import tunwarden.config.Cellar;
 import tunwarden.config.CellarFile;
@@ -21,6 +17,7 @@ import tunwarden.replay.LogFile;
 import tunwarden.replay.LogOptions;
 import tunwarden.replay.LogReader;
 import tunwarden.replay.LogRow;
+import tunwarden.report.Inputs;
 import tunwarden.report.Reporter;
 import tunwarden.report.story.Chapter;
 import tunwarden.units.BadInputException;
@@ -105,7 +102,7 @@ final class LogChoice {
     for (Path log : logs) {
       LogOptions options = options().forVessel(id).withAmbient(vessel.site().ambientPaAbsolute());
       files.add(LogFile.open(log, options).reportingTo(this::bytesRead));
-      inputs.add(new Chapter.Input(log.toString(), sha256(log)));
+      inputs.add(Inputs.of(log));
     }
     return new Reporter.Source(title, vessel, files, inputs);
   }
@@ -144,13 +141,7 @@ final class LogChoice {
   private String onlyVessel(List<Path> logs, VesselOptions described) throws IOException {
     Set<String> named = new LinkedHashSet<>();
     for (Path log : logs) {
-      try (LogReader reader = LogFile.open(log, options()).open()) {
-        LogRow row = reader.next();
-        for (int i = 0; row != null && i < ROWS_LOOKED_AT; i++) {
-          named.add(row.vessel());
-          row = reader.next();
-        }
-      }
+      named.addAll(named(LogFile.open(log, options())));
     }
     if (named.size() > 1) {
       throw new BadInputException(
@@ -174,16 +165,64 @@ final class LogChoice {
     return only;
   }
 
-  private static String sha256(Path file) throws IOException {
-    try (InputStream in = Files.newInputStream(file)) {
-      MessageDigest digest = MessageDigest.getInstance("SHA-256");
-      byte[] buffer = new byte[1 << 16];
-      for (int got = in.read(buffer); got >= 0; got = in.read(buffer)) {
-        digest.update(buffer, 0, got);
+  /** The vessels that the first rows name. */
+  private static Set<String> named(LogFile log) throws IOException {
+    Set<String> named = new LinkedHashSet<>();
+    try (LogReader reader = log.open()) {
+      LogRow row = reader.next();
+      for (int i = 0; row != null && i < ROWS_LOOKED_AT; i++) {
+        named.add(row.vessel());
+        row = reader.next();
       }
-      return HexFormat.of().formatHex(digest.digest());
-    } catch (NoSuchAlgorithmException impossible) {
-      throw new IllegalStateException(impossible);
     }
+    return named;
+  }
+
+  /**
+   * A log to be played with every vessel in it that is described and wanted.
+   *
+   * @param log how it is read
+   * @param vessels at least one
+   * @param alarms alarm settings of the cellar file, or the usual ones
+   */
+  record Played(LogFile log, List<Vessel> vessels, AlarmSettings alarms) {}
+
+  /** The log as it is to be played; volume and fill may be left out. */
+  Played played(Path log, VesselOptions described) throws IOException {
+    Optional<Cellar> read =
+        cellar == null ? Optional.empty() : Optional.of(CellarFile.read(cellar));
+    double ambientPa =
+        read.map(Cellar::site)
+            .orElseGet(() -> described.vesselOfAnySize(LogOptions.UNNAMED).site())
+            .ambientPaAbsolute();
+    LogOptions options = options().withAmbient(ambientPa);
+    Optional<String> stated = ids.isEmpty() ? onlyOf(read) : Optional.of(ids.get(0));
+    LogFile file = LogFile.open(log, stated.map(options::forVessel).orElse(options));
+    Set<String> named = named(file);
+    List<Vessel> vessels = new ArrayList<>();
+    for (String id : named) {
+      if (!ids.isEmpty() && !ids.contains(id)) {
+        continue;
+      }
+      if (read.isPresent()) {
+        read.get().vessel(id).ifPresent(vessels::add);
+      } else {
+        vessels.add(described.vesselOfAnySize(id));
+      }
+    }
+    if (vessels.isEmpty()) {
+      throw new BadInputException(
+          log
+              + " speaks of "
+              + String.join(", ", named)
+              + ", of which none is "
+              + (ids.isEmpty() ? "in " + cellar : String.join(", ", ids))
+              + "; name one with --vessel");
+    }
+    return new Played(file, vessels, read.map(Cellar::alarms).orElse(AlarmSettings.DEFAULT));
+  }
+
+  private static Optional<String> onlyOf(Optional<Cellar> read) {
+    return read.map(Cellar::vessels).filter(v -> v.size() == 1).map(v -> v.get(0).id());
   }
 }

@@ -22,9 +22,15 @@ public final class LogDashboard {
    * @param vessels descriptions of the vessels in it that are to be shown
    * @param alarms alarm settings
    * @param pace data seconds per real second
+   * @param reportCommand command line to be quoted in a report of this log
    */
   public static void run(
-      LogFile log, List<Vessel> vessels, AlarmSettings alarms, double pace, Front front)
+      LogFile log,
+      List<Vessel> vessels,
+      AlarmSettings alarms,
+      double pace,
+      String reportCommand,
+      Front front)
       throws IOException {
     try (RowSource rows = log.open()) {
       LogRow first = rows.next();
@@ -36,7 +42,7 @@ public final class LogDashboard {
                 survey::marks,
                 survey::progress,
                 survey::close,
-                vessel -> "to write a report: tunwarden report " + log.path().getFileName());
+                new ReplayReport(log, vessels, reportCommand)::write);
         String name = log.path().getFileName().toString();
         Playback.run(
             new Playback.Show(name, Origin.REPLAY, vessels, log, pace, alarms, Duration.ZERO),
