@@ -8,10 +8,14 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.DoublePredicate;
 import tunwarden.estimate.Estimate.Spread;
+import tunwarden.estimate.ForwardPoint;
+import tunwarden.estimate.ForwardRun;
 import tunwarden.estimate.Mode;
+import tunwarden.estimate.State;
 import tunwarden.units.Constants;
 import tunwarden.vessel.Limits;
 import tunwarden.vessel.ReliefSetting;
+import tunwarden.vessel.Vessel;
 
 /** Everything that is forecast for every vessel all the time. Pure. */
 public final class Forecaster {
@@ -32,18 +36,31 @@ public final class Forecaster {
 
   private Forecaster() {}
 
+  /** The futures of a vessel that an estimator watches; none before it believes anything. */
+  public static Outlook outlook(Vessel vessel, State state) {
+    List<ForwardPoint> ahead = ForwardRun.run(state, Trend.HORIZON, Trend.STEP);
+    return state
+        .estimate()
+        .map(estimate -> outlook(Present.of(vessel, estimate), ahead))
+        .orElse(Outlook.NONE);
+  }
+
   /** The futures of a vessel; {@link Outlook#NONE} where its state makes no sense to the model. */
   public static Outlook outlook(Present present) {
+    return outlook(present, List.of());
+  }
+
+  private static Outlook outlook(Present present, List<ForwardPoint> ahead) {
     if (!(present.pressurePaAbsolute() > 0) || present.vessel().fillM3() <= 0) {
       return Outlook.NONE;
     }
     Ensemble ensemble = Ensemble.of(present);
     double warmK = present.vessel().warmToK().orElse(present.temperatureK());
     Spread[] at = ensemble.ranges(world -> futures(world, warmK));
-    Drift drift = Drift.of(ensemble, at[REST]);
+    Trend trend = new Trend(present.at(), ahead.isEmpty() ? Drift.run(ensemble, at[REST]) : ahead);
     Cautions cautions = new Cautions(present);
     List<Projection> projections = new ArrayList<>();
-    projections.add(trend(drift));
+    projections.add(soon(trend));
     addWarm(projections, cautions, ensemble, at[WARM]);
     addChill(projections, cautions, present, at[CHILL]);
     if (present.pressurePaGauge() > WORTH_VENTING_PA) {
@@ -53,18 +70,18 @@ public final class Forecaster {
       projections.add(projection(Scenario.HOLD, "keeps the gas as it is", at[HOLD]));
     }
     Optional<ReliefSetting> relief = present.vessel().limits().relief();
-    Optional<TimeRange> toLift = relief.flatMap(r -> drift.until(r.earliestLiftPaGauge()));
-    cautions.soonest(toLift, relief.flatMap(r -> drift.soonest(r.earliestLiftPaGauge())));
+    Optional<TimeRange> toLift = relief.flatMap(r -> trend.until(r.earliestLiftPaGauge()));
+    cautions.soonest(toLift, relief.flatMap(r -> trend.soonest(r.earliestLiftPaGauge())));
     OptionalDouble full = liquidFullK(ensemble.middle());
     cautions.liquidFull(full);
     cautions.supersaturation(ensemble.middle());
     return new Outlook(
         projections,
         toLift,
-        Drift.HORIZON,
+        Trend.HORIZON,
         relief.map(r -> liftK(ensemble.middle(), r)).orElse(OptionalDouble.empty()),
         full,
-        drift.points(),
+        trend.points(),
         cautions.list());
   }
 
@@ -78,8 +95,8 @@ public final class Forecaster {
     };
   }
 
-  private static Projection trend(Drift drift) {
-    Spread later = drift.at(LATER);
+  private static Projection soon(Trend trend) {
+    Spread later = trend.at(LATER);
     TimeRange when = new TimeRange(LATER, LATER, Optional.of(LATER));
     return new Projection(
         Scenario.TREND,

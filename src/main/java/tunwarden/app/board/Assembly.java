@@ -9,8 +9,6 @@ import tunwarden.alarm.AlarmSettings;
 import tunwarden.alarm.Transition;
 import tunwarden.estimate.Estimators;
 import tunwarden.forecast.Forecaster;
-import tunwarden.forecast.Outlook;
-import tunwarden.forecast.Present;
 import tunwarden.reading.Quantity;
 import tunwarden.station.AlarmKeeper;
 import tunwarden.station.Forecasts;
@@ -30,11 +28,7 @@ import tunwarden.vessel.Vessel;
 public record Assembly(Station station, AlarmKeeper alarms, BoardKeeper board) {
   /** The futures of a vessel, from what the estimator believes. */
   public static final Forecasts FORECASTS =
-      (vessel, state, now) ->
-          state
-              .estimate()
-              .map(estimate -> Forecaster.outlook(Present.of(vessel, estimate)))
-              .orElse(Outlook.NONE);
+      (vessel, state, now) -> Forecaster.outlook(vessel, state);
 
   /**
    * Puts a station together.
