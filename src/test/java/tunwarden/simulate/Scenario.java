@@ -82,6 +82,13 @@ public enum Scenario {
     return script(world(seed * 31 + ordinal())).run();
   }
 
+  /** The same, logged no more often than every so many seconds. */
+  public Simulation run(long seed, double leastIntervalS) {
+    Script script = script(world(seed * 31 + ordinal()));
+    script.intervalS = Math.max(script.intervalS, leastIntervalS);
+    return script.run();
+  }
+
   private static Script sealedAndWarmed(World w, double paGauge) {
     double change = (w.random.nextBoolean() ? 1 : -1) * w.between(3, 14);
     double target = Math.max(w.startK + change, 272.5);

@@ -1,5 +1,7 @@
 package tunwarden.estimate.bank;
 
+import java.nio.ByteBuffer;
+
 /**
  * The bank at one time: the filters, packed, and their weights. Immutable by agreement: nobody
  * writes to the arrays after construction.
@@ -29,6 +31,43 @@ public final class Bank {
     this.filters = filters;
     this.weights = weights;
     this.setting = setting;
+  }
+
+  /** Bytes that {@link #write} takes. */
+  public static int bytes() {
+    return 8 * (Grid.FILTERS * (Gaussian.STRIDE + 1) + 5);
+  }
+
+  /** Writes every digit. */
+  public void write(ByteBuffer to) {
+    for (double value : filters) {
+      to.putDouble(value);
+    }
+    for (double value : weights) {
+      to.putDouble(value);
+    }
+    to.putDouble(setting.kelvin()).putDouble(setting.paAbsolute());
+    to.putDouble(setting.fillKelvin()).putDouble(setting.unmixedS()).putDouble(setting.drift());
+  }
+
+  /** Reads what {@link #write} wrote. */
+  public static Bank read(ByteBuffer from) {
+    double[] filters = new double[Grid.FILTERS * Gaussian.STRIDE];
+    double[] weights = new double[Grid.FILTERS];
+    for (int i = 0; i < filters.length; i++) {
+      filters[i] = from.getDouble();
+    }
+    for (int i = 0; i < weights.length; i++) {
+      weights[i] = from.getDouble();
+    }
+    Setting setting =
+        new Setting(
+            from.getDouble(),
+            from.getDouble(),
+            from.getDouble(),
+            from.getDouble(),
+            from.getDouble());
+    return new Bank(filters, weights, setting);
   }
 
   public Setting setting() {
