@@ -5,12 +5,17 @@ import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.function.ToDoubleFunction;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
+import tunwarden.physics.Correlation;
 import tunwarden.physics.closed.ClosedState;
 import tunwarden.physics.closed.ClosedVessel;
 import tunwarden.physics.closed.Inventory;
 import tunwarden.physics.gas.Gas;
 import tunwarden.physics.gas.GasMix;
+import tunwarden.physics.gas.Weiss1974Virial;
 import tunwarden.physics.liquid.Liquid;
+import tunwarden.physics.liquid.LiquidDensity;
 import tunwarden.physics.solubility.LiquidSolubility;
 import tunwarden.physics.uncertainty.LinearPropagation;
 import tunwarden.physics.uncertainty.Propagated;
@@ -64,9 +69,22 @@ public final class Warming {
     return new Warming(volumeM3, fillM3, liquid, gas);
   }
 
-  /** Pressure at another temperature, Pa gauge; negative where a vacuum forms. */
+  /**
+   * Pressure at another temperature, Pa gauge; negative where a vacuum forms. Where the vessel is
+   * not full but might be, within the doubt of the fill, the interval leaves the squeeze of a full
+   * vessel out and a remark tells of it.
+   */
   public Answer pressurePaGauge(GaugeState now, double toK, Doubt doubt) {
-    return answer(now, toK, doubt, x -> settled(x, toK).totalPaAbsolute() - x[AMBIENT]);
+    boolean usable = now.unusable().isEmpty() && Double.isFinite(toK);
+    boolean full = usable && settled(values(now), toK).liquidFull();
+    return answer(
+        now,
+        toK,
+        doubt,
+        x -> {
+          ClosedState then = settled(x, toK);
+          return (full ? then.totalPaAbsolute() : then.gasPaAbsolute()) - x[AMBIENT];
+        });
   }
 
   /** CO2 left dissolved at another temperature, kg/m³ of liquid (g/L). */
@@ -96,7 +114,12 @@ public final class Warming {
 
   /** The correlations used. */
   public String model() {
-    return solubility.model(Gas.CO2) + "; closed rigid vessel, real gas";
+    String volumes =
+        Stream.concat(
+                Stream.of(Weiss1974Virial.ABOUT), LiquidDensity.of(liquid).correlations().stream())
+            .map(Correlation::name)
+            .collect(Collectors.joining(", "));
+    return solubility.model(Gas.CO2) + ", " + volumes + "; closed rigid vessel";
   }
 
   private Answer answer(
@@ -117,10 +140,11 @@ public final class Warming {
       course
     };
     Propagated result = LinearPropagation.independent(values(now), standard).through(function);
-    return new Answer(OptionalDouble.of(result.value()), result.u95(), model(), remarks(now, toK));
+    return new Answer(
+        OptionalDouble.of(result.value()), result.u95(), model(), remarks(now, toK, doubt));
   }
 
-  private List<String> remarks(GaugeState now, double toK) {
+  private List<String> remarks(GaugeState now, double toK, Doubt doubt) {
     List<String> remarks =
         new ArrayList<>(solubility.breaches(Gas.CO2, now.paAbsolute(), now.temperatureK()));
     ClosedState then = settled(values(now), toK);
@@ -133,8 +157,17 @@ public final class Warming {
       remarks.add(
           "the liquid fills the whole vessel there; the pressure is that of a rigid shell, and any"
               + " further warming raises it by bars per degree");
+    } else if (fullest(now, doubt).liquidM3(toK) >= volumeM3) {
+      remarks.add(
+          "the fill is not known well enough: within its doubt the liquid may fill the whole vessel"
+              + " there, and then the pressure rises by bars per degree");
     }
     return remarks;
+  }
+
+  private ClosedVessel fullest(GaugeState now, Doubt doubt) {
+    double fill = fillM3 + LinearPropagation.COVERAGE_95 * doubt.fillM3();
+    return new ClosedVessel(volumeM3, Math.min(volumeM3, fill), now.temperatureK(), liquid);
   }
 
   private double[] values(GaugeState now) {

@@ -37,6 +37,15 @@ public final class ClosedState {
     return totalPaAbsolute;
   }
 
+  /** Pressure of gas and vapour alone, Pa absolute: the total without any squeeze of the liquid. */
+  public double gasPaAbsolute() {
+    double sum = vapourPa;
+    for (double each : partialPa) {
+      sum += each;
+    }
+    return sum;
+  }
+
   /** Partial pressure of one gas, Pa. */
   public double partialPa(Gas gas) {
     return partialPa[gas.ordinal()];

@@ -16,8 +16,9 @@ public final class WagnerPruss1993 {
       new Correlation(
           "Wagner and Pruss 1993",
           "W. Wagner, A. Pruss, J. Phys. Chem. Ref. Data 22 (1993) 783",
-          new Validity(273.16, 647.096, 0, CRITICAL_PA),
-          "0.02 %; below 0 C it is continued over supercooled water",
+          new Validity(271.15, 647.096, 0, CRITICAL_PA),
+          "0.02 % from 0 C; continued to -2 C over supercooled water, where drinks are still"
+              + " liquid",
           Correlation.Standing.FROM_MEMORY);
 
   private WagnerPruss1993() {}

@@ -16,6 +16,9 @@ import tunwarden.physics.liquid.WagnerPruss1993;
  */
 final class Drink {
   private static final double REFERENCE_K = 298.15;
+  private static final double COMPOSITION_AT_K = 283.15;
+  private static final double DOUBT_OF_SALT = 0.12; // 2.8 % rms where salt takes about a quarter
+  private static final double DOUBT_OF_COMPOSITION = 0.5; // an estimate of an estimate
   private static final double LEAST_SOLIDS_KG_PER_M3 = 1e-6;
 
   private final LiquidKind kind;
@@ -85,7 +88,19 @@ final class Drink {
         : factor * WeisenbergerSchumpe1996.factor(gas, salts, temperatureK);
   }
 
+  /** The relation's own, and a share of each correction applied to it. */
   double relativeStandardUncertainty(Gas gas) {
+    double salted =
+        salts.isEmpty() ? 0 : 1 - WeisenbergerSchumpe1996.factor(gas, salts, REFERENCE_K);
+    boolean corrected = kind == LiquidKind.BEER && gas == Gas.CO2 && composed;
+    double composition = corrected ? 1 - Composition.beerOverStandard(makeup, COMPOSITION_AT_K) : 0;
+    double ofSalt = DOUBT_OF_SALT * salted;
+    double ofComposition = DOUBT_OF_COMPOSITION * composition;
+    double own = relationUncertainty(gas);
+    return Math.sqrt(own * own + ofSalt * ofSalt + ofComposition * ofComposition);
+  }
+
+  private double relationUncertainty(Gas gas) {
     if (gas != Gas.CO2) {
       boolean water = kind == LiquidKind.WATER || kind == LiquidKind.MINERAL_WATER;
       double own = gas == Gas.N2 || gas == Gas.O2 ? 0.002 : 0.01;

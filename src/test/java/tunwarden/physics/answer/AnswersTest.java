@@ -74,6 +74,14 @@ class AnswersTest {
   }
 
   @Test
+  void aFillThatMightReachTheBrimIsToldSo() {
+    Warming nearly = Warming.of(2, 1.97, BEER, GasMix.CO2);
+    Answer warmed = nearly.pressurePaGauge(COLD, 298.15, Doubt.ofU95(1000, 0.3, 3000, 0, 0.04));
+    assertTrue(warmed.remarks().stream().anyMatch(r -> r.startsWith("the fill is not known")));
+    assertTrue(warmed.u95() < 2e5, () -> "u95 " + warmed.u95());
+  }
+
+  @Test
   void outsideItsRangeACorrelationSaysSo() {
     GaugeState hot = new GaugeState(1.0e5, 318.15, 101_325, 0);
     Answer answer = UNDER_CO2.dissolved(Gas.CO2, hot, DOUBT);
@@ -81,6 +89,12 @@ class AnswersTest {
     assertTrue(
         answer.remarks().stream().anyMatch(r -> r.startsWith("European beer equation is used")),
         () -> answer.remarks().toString());
+  }
+
+  @Test
+  void atFreezingPointNothingIsOutsideItsRange() {
+    GaugeState freezing = new GaugeState(1.0e5, 273.15, 101_325, 0);
+    assertEquals(List.of(), UNDER_CO2.dissolved(Gas.CO2, freezing, DOUBT).remarks());
   }
 
   @ParameterizedTest
