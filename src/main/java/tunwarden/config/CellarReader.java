@@ -82,7 +82,8 @@ final class CellarReader {
     if (!site.has("barometer")) {
       return;
     }
-    Instrument one = ReadingsReader.instrument(site.section("barometer"), "", Quantity.BAROMETER);
+    Instrument one =
+        ReadingsReader.instrument(site.section("barometer"), "", Quantity.BAROMETER, false);
     for (Vessel vessel : vessels) {
       instruments.add(one.forVessel(vessel.id()));
     }

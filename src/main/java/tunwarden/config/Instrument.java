@@ -6,6 +6,7 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import tunwarden.reading.Quantity;
 import tunwarden.units.Kind;
+import tunwarden.wire.signal.Calibration;
 
 /**
  * Where one quantity of a vessel is read, as the cellar file says it.
@@ -18,7 +19,7 @@ import tunwarden.units.Kind;
  * @param address on the line, 1 to 247; empty for a device without one
  * @param every how often to ask; empty for the profile's own period
  * @param baud line speed; empty for the profile's own
- * @param accuracyU95 as a 95 % expanded uncertainty, SI; empty where not stated
+ * @param worth how good it is
  */
 public record Instrument(
     String vessel,
@@ -29,18 +30,32 @@ public record Instrument(
     Optional<Integer> address,
     Optional<Duration> every,
     Optional<Integer> baud,
-    OptionalDouble accuracyU95) {
+    Worth worth) {
+  /**
+   * How good an instrument is.
+   *
+   * @param accuracyU95 as a 95 % expanded uncertainty, SI; empty where not stated
+   * @param calibration what it showed against what was true; empty where not stated
+   * @param check whether it is the second of a pair, which only vouches for the first
+   */
+  public record Worth(
+      OptionalDouble accuracyU95, Optional<Calibration> calibration, boolean check) {}
 
   /** The same instrument read for another vessel. */
   Instrument forVessel(String id) {
-    return new Instrument(id, quantity, device, port, field, address, every, baud, accuracyU95);
+    return new Instrument(id, quantity, device, port, field, address, every, baud, worth);
+  }
+
+  /** Accuracy as a 95 % expanded uncertainty, SI; empty where not stated. */
+  public OptionalDouble accuracyU95() {
+    return worth.accuracyU95;
   }
 
   /** The stated accuracy of the instrument for pressure or for liquid temperature. */
   static OptionalDouble accuracy(List<Instrument> all, Kind kind) {
     Quantity wanted = kind == Kind.PRESSURE ? Quantity.PRESSURE : Quantity.TEMPERATURE;
     return all.stream()
-        .filter(instrument -> instrument.quantity == wanted)
+        .filter(instrument -> instrument.quantity == wanted && !instrument.worth.check)
         .map(Instrument::accuracyU95)
         .findFirst()
         .orElse(OptionalDouble.empty());

@@ -7,6 +7,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import tunwarden.config.profile.Profiles;
+import tunwarden.serial.PairGate;
 import tunwarden.serial.PortPlan;
 import tunwarden.units.BadInputException;
 import tunwarden.wire.profile.Binding;
@@ -71,12 +72,13 @@ public final class PortPlans {
                             + String.join(", ", profile.fields().keySet())));
     Binding.Trim trim =
         new Binding.Trim(
-            Calibration.NONE,
+            instrument.worth().calibration().orElse(Calibration.NONE),
             cellar.site().ambientPaAbsolute(),
-            instrument.every().orElse(profile.polling().period()));
+            instrument.every().orElse(profile.polling().period()),
+            instrument.accuracyU95().orElse(field.trust().u95Si()));
     try {
       return new Binding(
-          instrument.vessel(),
+          instrument.vessel() + (instrument.worth().check() ? PairGate.CHECK : ""),
           instrument.quantity(),
           profile,
           field,

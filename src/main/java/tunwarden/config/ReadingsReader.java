@@ -8,12 +8,19 @@ import java.util.OptionalDouble;
 import tunwarden.reading.Quantity;
 import tunwarden.units.BadQuantityException;
 import tunwarden.units.Kind;
+import tunwarden.units.Pressure;
 import tunwarden.units.Quantities;
+import tunwarden.wire.signal.Calibration;
 
 /** The {@code [vessel.….readings]} table: which instrument gives which quantity. */
 final class ReadingsReader {
   private static final String EXAMPLE =
       "{ device = \"text-line\", port = \"/dev/ttyUSB0\", field = \"P\" }";
+
+  /** Behind a quantity's word: a second instrument that only vouches for the first. */
+  private static final String CHECK = "-check";
+
+  private static final String TWO_POINTS = "0.02 bar = 0 bar, 2.05 bar = 2 bar";
 
   private ReadingsReader() {}
 
@@ -25,8 +32,10 @@ final class ReadingsReader {
     }
     List<Instrument> found = new ArrayList<>();
     for (Quantity quantity : Quantity.values()) {
-      if (readings.has(quantity.word())) {
-        found.add(instrument(readings.section(quantity.word()), id, quantity));
+      for (String key : List.of(quantity.word(), quantity.word() + CHECK)) {
+        if (readings.has(key)) {
+          found.add(instrument(readings.section(key), id, quantity, key.endsWith(CHECK)));
+        }
       }
     }
     readings.require(Quantity.PRESSURE.word(), EXAMPLE);
@@ -36,7 +45,7 @@ final class ReadingsReader {
   }
 
   /** One instrument's table. */
-  static Instrument instrument(Section section, String vessel, Quantity quantity) {
+  static Instrument instrument(Section section, String vessel, Quantity quantity, boolean check) {
     Optional<String> device = section.text("device");
     Optional<String> port = section.text("port");
     Optional<String> field = section.text("field");
@@ -53,7 +62,10 @@ final class ReadingsReader {
             section.whole("address", 1, 247),
             section.parsed("every", ReadingsReader::duration),
             section.whole("baud", 300, 4_000_000),
-            accuracy(section, quantity.kind()));
+            new Instrument.Worth(
+                accuracy(section, quantity.kind()),
+                section.parsed("calibration", text -> calibration(text, quantity.kind())),
+                check));
     section.close();
     return instrument;
   }
@@ -65,6 +77,25 @@ final class ReadingsReader {
       throw new BadQuantityException("'" + text + "' is no time at all");
     }
     return Duration.ofNanos(Math.round(seconds * 1e9));
+  }
+
+  /** Two points, shown = true, such as {@code "0.02 bar = 0 bar, 2.05 bar = 2 bar"}. */
+  private static Calibration calibration(String text, Kind kind) {
+    String[] ends = text.split("[=,]", -1);
+    if (ends.length != 4 || text.indexOf(',') < text.indexOf('=')) {
+      throw new BadQuantityException(
+          "'" + text + "' is no calibration; write shown = true twice: '" + TWO_POINTS + "'");
+    }
+    double[] si = new double[ends.length];
+    for (int i = 0; i < ends.length; i++) {
+      si[i] =
+          kind == Kind.PRESSURE ? Pressure.parse(ends[i]).pa() : Quantities.parse(ends[i], kind);
+    }
+    try {
+      return new Calibration(si[0], si[1], si[2], si[3]);
+    } catch (IllegalArgumentException unfit) {
+      throw new BadQuantityException("'" + text + "': " + unfit.getMessage());
+    }
   }
 
   private static OptionalDouble accuracy(Section section, Kind kind) {

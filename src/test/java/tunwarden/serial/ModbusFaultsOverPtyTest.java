@@ -81,7 +81,7 @@ class ModbusFaultsOverPtyTest {
 
   private Binding.Trim trim() {
     return new Binding.Trim(
-        tunwarden.wire.signal.Calibration.NONE, 100_000, profile.polling().period());
+        tunwarden.wire.signal.Calibration.NONE, 100_000, profile.polling().period(), 1);
   }
 
   private byte[] right(byte[] request) {

@@ -30,7 +30,7 @@ final class Watching implements AutoCloseable {
   /** Pressure and temperature of one unit, put to a vessel named after it. */
   static List<Binding> unit(Profile profile, int slave) {
     List<Binding> bindings = new ArrayList<>();
-    Binding.Trim trim = new Binding.Trim(Calibration.NONE, 100_000, profile.polling().period());
+    Binding.Trim trim = new Binding.Trim(Calibration.NONE, 100_000, profile.polling().period(), 1);
     for (Field field : profile.fields().values()) {
       Quantity quantity = field.kind() == Kind.PRESSURE ? Quantity.PRESSURE : Quantity.TEMPERATURE;
       bindings.add(new Binding("unit" + slave, quantity, profile, field, slave, trim));

@@ -14,11 +14,13 @@ import tunwarden.journal.Entries;
 import tunwarden.journal.Recorder;
 import tunwarden.journal.disk.RealDisk;
 import tunwarden.reading.Quantity;
+import tunwarden.reading.Sample;
 import tunwarden.screen.model.Origin;
 import tunwarden.screen.terminal.Dashboard;
 import tunwarden.serial.ByteLinkFactory;
 import tunwarden.serial.LinkHealth;
 import tunwarden.serial.LinkWords;
+import tunwarden.serial.PairGate;
 import tunwarden.serial.PortPlan;
 import tunwarden.serial.PortRunner;
 import tunwarden.station.Sink;
@@ -79,7 +81,8 @@ public final class LiveDashboard {
         Assembly.of(
             cellar.vessels(), cellar.alarms(), frame, this::source, extraSinks, extraListeners);
     try (StationLoop loop = new StationLoop(assembly.station(), clock)) {
-      plans.forEach(plan -> ports.add(new PortRunner(plan, links, loop.inlet(), clock)));
+      Consumer<Sample> inlet = PairGate.over(plans, loop.inlet());
+      plans.forEach(plan -> ports.add(new PortRunner(plan, links, inlet, clock)));
       loop.start();
       ports.forEach(PortRunner::start);
       LiveDesk.Hands hands =

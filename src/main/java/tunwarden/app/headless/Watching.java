@@ -3,11 +3,14 @@ package tunwarden.app.headless;
 import java.time.InstantSource;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.Consumer;
 import tunwarden.app.board.Assembly;
 import tunwarden.config.Cellar;
 import tunwarden.config.PortPlans;
 import tunwarden.estimate.Estimators;
+import tunwarden.reading.Sample;
 import tunwarden.serial.ByteLinkFactory;
+import tunwarden.serial.PairGate;
 import tunwarden.serial.PortPlan;
 import tunwarden.serial.PortRunner;
 import tunwarden.station.Sink;
@@ -34,8 +37,9 @@ final class Watching implements AutoCloseable {
         new Station(cellar.vessels(), Estimators.standard(), Assembly.FORECASTS, pacing, sinks);
     List<PortPlan> plans = PortPlans.of(cellar);
     this.loop = new StationLoop(station, clock);
+    Consumer<Sample> inlet = PairGate.over(plans, loop.inlet());
     for (PortPlan plan : plans) {
-      ports.add(new PortRunner(plan, links, loop.inlet(), clock));
+      ports.add(new PortRunner(plan, links, inlet, clock));
     }
   }
 

@@ -103,8 +103,9 @@ final class DeviceWatch {
 
   private List<Binding> bindings() {
     List<Binding> bindings = new ArrayList<>();
-    Binding.Trim trim = new Binding.Trim(Calibration.NONE, 0, profile.polling().period());
+    Duration period = profile.polling().period();
     for (Field field : profile.fields().values()) {
+      Binding.Trim trim = new Binding.Trim(Calibration.NONE, 0, period, field.trust().u95Si());
       bindings.add(new Binding(field.name(), quantity(field), profile, field, address, trim));
     }
     return bindings;

@@ -22,8 +22,9 @@ public record Binding(
    * @param calibration two-point calibration
    * @param ambientPa absolute pressure of the atmosphere, Pa, to turn absolute into gauge
    * @param period between readings
+   * @param u95Si accuracy as a 95 % expanded uncertainty, SI difference
    */
-  public record Trim(Calibration calibration, double ambientPa, Duration period) {}
+  public record Trim(Calibration calibration, double ambientPa, Duration period, double u95Si) {}
 
   /**
    * A binding by field name with the profile's period and no calibration.
@@ -33,7 +34,8 @@ public record Binding(
   public static Binding plain(
       String vessel, Quantity quantity, Profile profile, String field, double ambientPa) {
     Field found = profile.field(field).orElseThrow(() -> new IllegalArgumentException(field));
-    Trim trim = new Trim(Calibration.NONE, ambientPa, profile.polling().period());
+    Duration period = profile.polling().period();
+    Trim trim = new Trim(Calibration.NONE, ambientPa, period, found.trust().u95Si());
     return new Binding(vessel, quantity, profile, found, 0, trim);
   }
 
