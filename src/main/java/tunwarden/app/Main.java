@@ -57,7 +57,9 @@ public final class Main implements Callable<Integer> {
           Reckon.class, //
           RehearseCommand.class, //
           InstrumentsCommand.class, //
-          CellarCommand.class);
+          CellarCommand.class, //
+          CompletionCommand.class, //
+          ManualCommand.class);
 
   private static final int HELP_WIDTH = 90;
 
