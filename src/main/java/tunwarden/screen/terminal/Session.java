@@ -25,8 +25,13 @@ import tunwarden.screen.view.ScreenView;
  * thread of its own draws. The model goes from one to the other through one reference.
  */
 final class Session {
-  private static final long DRAW_EVERY_MS = 200;
-  private static final long KEY_POLL_MS = 20;
+  private static final long DRAW_EVERY_MS = 250;
+
+  /** Keys are looked for often while someone types, seldom while nobody does. */
+  private static final long BUSY_POLL_MS = 10;
+
+  private static final long IDLE_POLL_MS = 60;
+  private static final int BUSY_POLLS = 300;
 
   private final Terminal terminal;
   private final TerminalScreen screen;
@@ -85,10 +90,12 @@ final class Session {
 
   private void readKeys() throws IOException {
     try {
+      int quiet = 0;
       while (!over) {
         KeyStroke stroke = screen.pollInput();
+        quiet = stroke == null ? quiet + 1 : 0;
         if (stroke == null) {
-          Thread.sleep(KEY_POLL_MS);
+          Thread.sleep(quiet < BUSY_POLLS ? BUSY_POLL_MS : IDLE_POLL_MS);
         } else if (stroke.getKeyType() == KeyType.EOF) {
           over = true;
         } else {

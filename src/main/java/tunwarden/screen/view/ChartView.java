@@ -136,7 +136,7 @@ final class ChartView {
     Optional<ReliefSetting> relief = vessel.assessment().vessel().limits().relief();
     ChartScale scale = pressureScale(least, most, relief);
     relief.ifPresent(r -> drawLimits(area, scale, r, false));
-    drawBand(area, scale, trend.isEmpty() ? trend : vessel.assessment().outlook().trend());
+    drawBand(area, scale, trend());
     StripChart.Pen pen = new StripChart.Pen(look.glyphs(), Role.TRACE, time.dotMs());
     Area past = area.left(time.pastColumns());
     StripChart.draw(canvas, past, trace, scale, pen, board.staleAfter());
@@ -182,13 +182,14 @@ final class ChartView {
     }
   }
 
+  /** The forecast as far as it reaches into the chart; none while looking at the past. */
   private List<TrendPoint> shownTrend() {
-    if (time.pastColumns() == time.columns()) {
-      return List.of();
-    }
-    return vessel.assessment().outlook().trend().stream()
-        .filter(point -> point.at().isBefore(time.end()))
-        .toList();
+    return trend().stream().filter(point -> point.at().isBefore(time.end())).toList();
+  }
+
+  private List<TrendPoint> trend() {
+    boolean future = time.pastColumns() < time.columns();
+    return future ? TrendLine.fromNow(vessel.assessment()) : List.of();
   }
 
   private void drawBand(Area area, ChartScale scale, List<TrendPoint> trend) {
