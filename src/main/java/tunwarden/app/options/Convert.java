@@ -97,6 +97,13 @@ public abstract class Convert<T> implements ITypeConverter<T> {
     }
   }
 
+  /** Time: s. */
+  public static final class ToSeconds extends Convert<Double> {
+    ToSeconds() {
+      super(Texts.of(Kind.DURATION));
+    }
+  }
+
   /** Rate: 1/s. */
   public static final class ToPerSecond extends Convert<Double> {
     ToPerSecond() {

@@ -3,7 +3,15 @@ package tunwarden.app.reckon;
 import java.util.Optional;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
+import picocli.CommandLine.Option;
+import tunwarden.app.options.Convert;
+import tunwarden.forecast.Ensemble;
+import tunwarden.forecast.Present;
+import tunwarden.forecast.TimeRange;
+import tunwarden.forecast.WarmUp;
 import tunwarden.physics.answer.Answer;
+import tunwarden.units.BadInputException;
+import tunwarden.units.Display;
 import tunwarden.vessel.ReliefSetting;
 
 /** What a closed vessel comes to when it warms, and where its valve lifts. */
@@ -11,10 +19,22 @@ import tunwarden.vessel.ReliefSetting;
     name = "warm",
     description = "Pressure of a closed vessel once it has warmed, and where the valve lifts.")
 final class Warm extends AnswerCommand {
+  private static final double HOUR_S = 3600;
+
+  @Option(
+      names = "--time-constant",
+      paramLabel = "TIME",
+      converter = Convert.ToSeconds.class,
+      description = "How fast it warms: time to close 63 %% of the gap, as '30 h'.")
+  private Double constantS;
+
   @Mixin private WarmingOptions options;
 
   @Override
   void fill(AnswerSheet sheet) {
+    if (constantS != null && !(constantS > 0)) {
+      throw new BadInputException("--time-constant: write a time above zero, as '30 h'");
+    }
     WarmingOptions.Case at = options.read();
     Answer pressure = options.pressure(sheet, at);
     Optional<ReliefSetting> relief = at.vessel().limits().relief();
@@ -29,7 +49,30 @@ final class Warm extends AnswerCommand {
     } else {
       sheet.none("relief_temperature_c", "valve lifts", "no relief setting was given");
     }
+    if (constantS != null && relief.isPresent()) {
+      time(sheet, at, relief.get().earliestLiftPaGauge());
+    }
     ReliefLines.forecast(sheet, at.vessel(), pressure.value().orElseThrow(), pressure.u95());
+  }
+
+  private void time(AnswerSheet sheet, WarmingOptions.Case at, double liftPaGauge) {
+    Present present = Present.atRest(at.vessel(), at.now().paGauge(), at.now().temperatureK());
+    WarmUp warming = new WarmUp(Ensemble.of(present).middle(), at.toK(), constantS);
+    Optional<TimeRange> range = warming.until(liftPaGauge, present.activity().transferPerS());
+    if (range.isEmpty()) {
+      sheet.none("time_to_lift_h", "lifts after", "not reached while it warms");
+      return;
+    }
+    double middle = range.get().middle().toSeconds() / HOUR_S;
+    double low = range.get().low().toSeconds() / HOUR_S;
+    String high =
+        range.get().high().map(t -> Display.number(t.toSeconds() / HOUR_S, 1)).orElse("never");
+    sheet.hidden("time_to_lift_h", middle);
+    sheet.hidden("time_to_lift_low_h", low);
+    range.get().high().ifPresent(t -> sheet.hidden("time_to_lift_high_h", t.toSeconds() / HOUR_S));
+    sheet.line(
+        "lifts after",
+        Display.number(middle, 1) + " h (" + Display.number(low, 1) + " to " + high + ")");
   }
 
   private static void lift(

@@ -107,6 +107,17 @@ class ForecastReckonTest {
   }
 
   @Test
+  void warmingWithATimeConstantSaysWhen() {
+    JsonNode object = json("warm " + TANK + "--to 24C --relief 1.5bar --time-constant 30h");
+    double likely = number(object, "time_to_lift_h");
+    assertTrue(number(object, "time_to_lift_low_h") < likely, object.toString());
+    // at rest with its gas all the time: τ ln((Ta − T0)/(Ta − Tl)), the soonest there is
+    double lift = number(object, "earliest_lift_temperature_c");
+    double soonest = 30 * Math.log((24 - 4) / (24 - lift));
+    assertTrue(number(object, "time_to_lift_low_h") > 0.98 * soonest, object.toString());
+  }
+
+  @Test
   void anInadequateValveIsANo() {
     String valve =
         "relief --relief 1.5bar --orifice 15mm --kd 0.6 --volume 5000L --fill 4500L --liquid beer ";
@@ -146,6 +157,7 @@ class ForecastReckonTest {
     "relief --relief 1bar --orifice 15mm --kd 0.6 --supply 8bar, go together",
     "relief --relief 1bar --orifice 15mm --kd 0.6 --pressure 2bar, below the present pressure",
     "relief --relief 1bar --orifice 3m --kd 0.6 --volume 50L --fill 45L, wider than a vessel",
+    "warm TANK --to 24C --time-constant 0h, above zero",
     "vacuum TANK, say what happens",
     "vacuum TANK --draw 1900L, more than the vessel holds",
     "vent --volume 50L --fill 50L --pressure 1bar --temperature 4C --to 0bar, full to the brim",
