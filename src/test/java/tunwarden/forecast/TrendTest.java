@@ -3,20 +3,32 @@ package tunwarden.forecast;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.io.IOException;
+import java.nio.file.Path;
 import java.time.Duration;
 import java.time.Instant;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.CsvSource;
 import tunwarden.estimate.Estimator;
 import tunwarden.estimate.Estimators;
 import tunwarden.estimate.ForwardPoint;
 import tunwarden.estimate.ForwardRun;
 import tunwarden.estimate.State;
+import tunwarden.physics.liquid.Liquid;
+import tunwarden.physics.liquid.LiquidKind;
 import tunwarden.reading.Quantity;
 import tunwarden.reading.Reading;
+import tunwarden.reading.Sample;
+import tunwarden.replay.LogFile;
+import tunwarden.replay.LogOptions;
+import tunwarden.replay.LogReader;
+import tunwarden.replay.LogRow;
 import tunwarden.simulate.Row;
 import tunwarden.simulate.Scenario;
 import tunwarden.simulate.Simulation;
@@ -67,6 +79,60 @@ class TrendTest {
   void nothingIsForecastBeforeAnythingIsBelieved() {
     Vessel vessel = Scenario.SETTLED.run(3).vessel();
     assertEquals(Outlook.NONE, Forecaster.outlook(vessel, Estimators.standard().begin(vessel)));
+  }
+
+  /**
+   * The shipped day of cooling lost, two hours into the warming and nearly an hour before the
+   * valve's earliest opening: with the ambient stated and without, the time it is reached in the
+   * log lies between the earliest and the latest time forecast.
+   */
+  @ParameterizedTest
+  @CsvSource({"09:30,297.15", "09:30,", "12:00,297.15", "12:00,"})
+  void aWarmingVesselIsForecastToWarmOn(String asked, Double ambientK) throws IOException {
+    double earliestLift = 1.4e5;
+    Instant from = Instant.parse("2026-03-02T" + asked + ":00Z");
+    Estimator estimator = Estimators.standard();
+    State state = estimator.begin(warming(ambientK));
+    State then = null;
+    Instant reached = null;
+    try (LogReader log =
+        LogFile.open(Path.of("replay-logs/cooling-lost.csv"), LogOptions.NONE).open()) {
+      for (LogRow row = log.next(); row != null && reached == null; row = log.next()) {
+        if (then == null && !row.time().isBefore(from)) {
+          then = state;
+        }
+        for (Sample sample : row.samples()) {
+          boolean pressure =
+              sample instanceof Reading reading && reading.quantity() == Quantity.PRESSURE;
+          if (pressure && ((Reading) sample).value() >= earliestLift) {
+            reached = row.time();
+          }
+          state = estimator.step(state, sample).next();
+        }
+      }
+    }
+    Trend trend = new Trend(from, ForwardRun.run(then, Trend.HORIZON, Trend.STEP));
+    double truth = Duration.between(from, reached).toSeconds();
+    double earliest = seconds(trend.soonest(earliestLift));
+    double latest = seconds(trend.until(earliestLift).flatMap(TimeRange::high));
+    assertTrue(earliest <= truth && truth <= latest, truth + ": " + earliest + " to " + latest);
+    assertTrue(trend.until(earliestLift).isPresent(), "the likely path reaches the valve");
+  }
+
+  private static Vessel warming(Double ambientK) {
+    Vessel plain = Vessel.plain("FV2", 2, 1.8, Liquid.of(LiquidKind.BEER));
+    return new Vessel(
+        plain.id(),
+        "",
+        2,
+        1.8,
+        plain.contents(),
+        plain.closure(),
+        plain.limits(),
+        Optional.empty(),
+        plain.site(),
+        ambientK == null ? OptionalDouble.empty() : OptionalDouble.of(ambientK),
+        plain.accuracy());
   }
 
   @Test

@@ -26,6 +26,7 @@ final class Playback {
   private final Show show;
   private final Front front;
   private final AtomicReference<ReplayDriver> driver = new AtomicReference<>();
+  private final AtomicReference<StationTarget> target = new AtomicReference<>();
 
   /**
    * What is played.
@@ -90,14 +91,15 @@ final class Playback {
             (vessel, quantity) -> new SignalSource(quantity.column(), show.name(), () -> ""),
             List.of(),
             List.of());
-    StationTarget target = new StationTarget(assembly);
-    ReplayPlayer player = new ReplayPlayer(show.rows(), target, TICK);
+    StationTarget fed = new StationTarget(assembly);
+    target.set(fed);
+    ReplayPlayer player = new ReplayPlayer(show.rows(), fed, TICK);
     player.playTo(player.start().plus(show.skip()), Long.MAX_VALUE);
     try (ReplayDriver running =
         new ReplayDriver(player, show.pace(), System::nanoTime, ReplayDriver.Waiting.onMonitor())) {
       driver.set(running);
       running.start();
-      PlaybackDesk desk = new PlaybackDesk(assembly, target, running, helpers, front.looks()::keep);
+      PlaybackDesk desk = new PlaybackDesk(assembly, fed, running, helpers, front.looks()::keep);
       Dashboard.run(assembly.board()::latest, desk, front.options());
     }
   }
@@ -107,7 +109,7 @@ final class Playback {
         show.origin(),
         front.zone(),
         show.alarms().stale(),
-        () -> driver.get().status().at(),
+        () -> target.get().reached(),
         () -> status(helpers),
         helpers.progress());
   }
@@ -118,15 +120,10 @@ final class Playback {
     if (show.origin() != Origin.REPLAY) {
       return Optional.empty();
     }
-    Instant end = helpers.last().get().filter(now.at()::isBefore).orElse(now.at());
+    Instant at = target.get().reached();
+    Instant end = helpers.last().get().filter(at::isBefore).orElse(at);
     return Optional.of(
         new ReplayStatus(
-            show.name(),
-            now.pace(),
-            now.paused(),
-            now.start(),
-            end,
-            now.at(),
-            helpers.marks().get()));
+            show.name(), now.pace(), now.paused(), now.start(), end, at, helpers.marks().get()));
   }
 }

@@ -12,14 +12,13 @@ import tunwarden.station.Station;
  */
 final class StationTarget implements ReplayTarget {
   private final Assembly assembly;
+  private volatile Instant reached = Instant.MIN;
 
   StationTarget(Assembly assembly) {
     this.assembly = assembly;
   }
 
   private record Place(Station.Checkpoint station, AlarmBook alarms, Instant time) {}
-
-  private Instant reached = Instant.MIN;
 
   @Override
   public synchronized void accept(Sample sample) {
@@ -45,6 +44,11 @@ final class StationTarget implements ReplayTarget {
     assembly.alarms().restore(place.alarms());
     assembly.board().backTo(place.time());
     reached = place.time();
+  }
+
+  /** Data time reached, never behind the newest assessment; safe from any thread. */
+  Instant reached() {
+    return reached;
   }
 
   /** Does something to the station between two samples. */

@@ -13,11 +13,13 @@ public final class Ahead {
   private final Gaussian[] filters;
   private final double[] row = new double[Gaussian.STATES];
   private final Motion motion = new Motion();
+  private Bank.Setting now;
 
   /** Starts at the bank's own time. */
   public Ahead(BankFilter filter, Bank bank) {
     this.filter = filter;
     this.bank = bank;
+    this.now = bank.setting;
     int[] all = new int[Grid.FILTERS];
     int n = 0;
     for (int f = 0; f < Grid.FILTERS; f++) {
@@ -33,9 +35,19 @@ public final class Ahead {
     }
   }
 
-  /** Moves on by some seconds at a constant temperature. */
-  public void advance(double seconds) {
-    Passage way = filter.passage(bank.setting, bank.setting, seconds);
+  /**
+   * Moves on.
+   *
+   * @param seconds how long
+   * @param kelvin liquid temperature then; it changes evenly until then
+   * @param paAbsolute pressure about then, for the slopes of gas and solubility
+   */
+  public void advance(double seconds, double kelvin, double paAbsolute) {
+    Bank.Setting next =
+        new Bank.Setting(kelvin, paAbsolute, now.fillKelvin(), now.unmixedS(), now.drift());
+    Passage way = filter.passage(now, next, seconds);
+    double warmed = Math.abs(kelvin - now.kelvin());
+    now = next;
     for (int i = 0; i < kept.length; i++) {
       int mode = Grid.modeOf(kept[i]);
       if (mode == Grid.HELD) {
@@ -43,7 +55,7 @@ public final class Ahead {
       } else {
         motion.sealed(filters[i], Grid.transferPerS(kept[i]), way);
       }
-      BankFilter.disturb(filters[i], mode, way, 0);
+      BankFilter.disturb(filters[i], mode, way, warmed);
     }
   }
 
