@@ -59,8 +59,9 @@ final class StateReader {
     Track barometer = track();
     double smoothK = number();
     double smoothS = number();
+    double slowK = number();
     Noise noise = new Noise(in.getInt(), number(), number(), number(), number());
-    return new Senses(pressure, temperature, barometer, smoothK, smoothS, noise);
+    return new Senses(pressure, temperature, barometer, smoothK, smoothS, slowK, noise);
   }
 
   Watch watch() {

@@ -50,7 +50,7 @@ final class StateWriter {
     track(s.pressure());
     track(s.temperature());
     track(s.barometer());
-    numbers(s.smoothK(), s.smoothS());
+    numbers(s.smoothK(), s.smoothS(), s.slowK());
     Noise n = s.noise();
     out.putInt(n.count());
     numbers(n.last(), n.before(), n.scatter(), n.step());
