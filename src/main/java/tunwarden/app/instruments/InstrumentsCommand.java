@@ -1,21 +1,16 @@
 package tunwarden.app.instruments;
 
+import java.util.List;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Spec;
+import tunwarden.app.options.Group;
 
 /** Everything about instruments that needs no cellar file. */
 @Command(
     name = "instruments",
     description = "Device profiles, serial ports, and what a line says.",
     mixinStandardHelpOptions = true,
-    subcommands = {
-      ListCommand.class,
-      PortsCommand.class,
-      CheckCommand.class,
-      ListenCommand.class,
-      ProbeCommand.class
-    },
     footerHeading = "%nExamples:%n",
     footer = {
       "  tunwarden instruments ports",
@@ -23,8 +18,18 @@ import picocli.CommandLine.Spec;
       "  tunwarden instruments listen /dev/ttyUSB0 --guess > devices/my-gauge.json",
       "  tunwarden instruments check devices/my-gauge.json"
     })
-public final class InstrumentsCommand implements Runnable {
+public final class InstrumentsCommand implements Runnable, Group {
   @Spec private CommandSpec spec;
+
+  @Override
+  public List<Class<?>> members() {
+    return List.of(
+        ListCommand.class,
+        PortsCommand.class,
+        CheckCommand.class,
+        ListenCommand.class,
+        ProbeCommand.class);
+  }
 
   @Override
   public void run() {

@@ -22,8 +22,8 @@ import tunwarden.wire.modbus.RtuRequest;
 @Command(
     name = "probe",
     description = {
-      "Reads registers of a Modbus instrument and shows every way to understand them:",
-      "whole or floating, either word order, either byte order. It can only read."
+      "Shows every way to understand the registers of a Modbus instrument.",
+      "Whole or floating, either word order, either byte order. It can only read."
     },
     mixinStandardHelpOptions = true,
     footerHeading = "%nExamples:%n",

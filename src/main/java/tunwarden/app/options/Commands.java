@@ -1,6 +1,7 @@
 package tunwarden.app.options;
 
 import static picocli.CommandLine.Model.UsageMessageSpec.SECTION_KEY_FOOTER;
+import static picocli.CommandLine.Model.UsageMessageSpec.SECTION_KEY_FOOTER_HEADING;
 
 import java.util.List;
 import picocli.CommandLine;
@@ -27,6 +28,7 @@ public final class Commands {
     for (Class<?> type : classes) {
       if (!known || nameOf(type).equals(named)) {
         CommandLine added = new CommandLine(type);
+        added.getHelpSectionMap().put(SECTION_KEY_FOOTER_HEADING, help -> "");
         added.getHelpSectionMap().put(SECTION_KEY_FOOTER, WorkedExamples::footer);
         if (added.getCommand() instanceof Group group) {
           add(added, group.members(), args, place + 1);
