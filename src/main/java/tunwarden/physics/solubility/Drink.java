@@ -2,7 +2,6 @@ package tunwarden.physics.solubility;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Map;
 import tunwarden.physics.Correlation;
 import tunwarden.physics.gas.Gas;
 import tunwarden.physics.liquid.BeerMethod;
@@ -24,7 +23,8 @@ final class Drink {
   private final LiquidKind kind;
   private final Makeup makeup;
   private final boolean composed;
-  private final Map<String, Double> salts;
+  private final boolean salted;
+  private final WeisenbergerSchumpe1996 salts;
   private final TradeRelation relation;
   private final double[] constantFactor = new double[Gas.all().size()];
 
@@ -32,15 +32,13 @@ final class Drink {
     this.kind = liquid.kind();
     this.makeup = Makeup.of(liquid);
     this.composed = liquid.alcoholByVolume().isPresent() || liquid.extractPlato().isPresent();
-    this.salts = liquid.saltMolPerM3();
+    this.salted = !liquid.saltMolPerM3().isEmpty();
+    this.salts = WeisenbergerSchumpe1996.of(liquid.saltMolPerM3());
     this.relation = relation;
     for (Gas gas : Gas.all()) {
       boolean inRelation = gas == Gas.CO2 && relation != null;
       constantFactor[gas.ordinal()] =
           inRelation ? 1 : Composition.sugar(gas, makeup.sugarKgPerM3());
-    }
-    if (!salts.isEmpty()) {
-      WeisenbergerSchumpe1996.factor(Gas.CO2, salts, REFERENCE_K); // refuses an unknown salt
     }
   }
 
@@ -48,6 +46,7 @@ final class Drink {
     this.kind = other.kind;
     this.makeup = other.makeup;
     this.composed = other.composed;
+    this.salted = other.salted;
     this.salts = other.salts;
     this.relation = other.relation;
     System.arraycopy(other.constantFactor, 0, constantFactor, 0, constantFactor.length);
@@ -83,18 +82,14 @@ final class Drink {
     if (kind == LiquidKind.BEER && gas == Gas.CO2 && composed) {
       factor *= Composition.beerOverStandard(makeup, temperatureK);
     }
-    return salts.isEmpty()
-        ? factor
-        : factor * WeisenbergerSchumpe1996.factor(gas, salts, temperatureK);
+    return salted ? factor * salts.factor(gas, temperatureK) : factor;
   }
 
   /** The relation's own, and a share of each correction applied to it. */
   double relativeStandardUncertainty(Gas gas) {
-    double salted =
-        salts.isEmpty() ? 0 : 1 - WeisenbergerSchumpe1996.factor(gas, salts, REFERENCE_K);
     boolean corrected = kind == LiquidKind.BEER && gas == Gas.CO2 && composed;
     double composition = corrected ? 1 - Composition.beerOverStandard(makeup, COMPOSITION_AT_K) : 0;
-    double ofSalt = DOUBT_OF_SALT * salted;
+    double ofSalt = DOUBT_OF_SALT * (1 - salts.factor(gas, REFERENCE_K));
     double ofComposition = DOUBT_OF_COMPOSITION * composition;
     double own = relationUncertainty(gas);
     return Math.sqrt(own * own + ofSalt * ofSalt + ofComposition * ofComposition);
@@ -135,7 +130,7 @@ final class Drink {
     if (sugared && makeup.sugarKgPerM3() > LEAST_SOLIDS_KG_PER_M3) {
       list.add(Composition.ABOUT_SUGAR);
     }
-    if (!salts.isEmpty()) {
+    if (salted) {
       list.add(WeisenbergerSchumpe1996.ABOUT);
     }
     return list;

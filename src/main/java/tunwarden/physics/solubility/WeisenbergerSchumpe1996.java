@@ -54,23 +54,36 @@ public final class WeisenbergerSchumpe1996 {
   /** Sum of the ion parameters and number of ions of each salt. */
   private static final Map<String, double[]> SALT = salts();
 
-  private WeisenbergerSchumpe1996() {}
+  private final double ions;
+  private final double count;
+
+  private WeisenbergerSchumpe1996(double ions, double count) {
+    this.ions = ions;
+    this.count = count;
+  }
 
   /**
-   * Solubility over that in pure water.
+   * The salting out by a mixture of salts.
    *
    * @param saltMolPerM3 salts by formula, mol/m³
    * @throws BadQuantityException when a salt is not known
    */
-  public static double factor(Gas gas, Map<String, Double> saltMolPerM3, double temperatureK) {
-    double[] g = GAS[gas.ordinal()];
-    double own = g[0] + g[1] * (temperatureK - REFERENCE_K); // Eq. 3
-    double sum = 0;
+  public static WeisenbergerSchumpe1996 of(Map<String, Double> saltMolPerM3) {
+    double ions = 0;
+    double count = 0;
     for (Map.Entry<String, Double> entry : saltMolPerM3.entrySet()) {
       double[] salt = saltOf(entry.getKey());
-      sum += entry.getValue() / MOL_PER_KMOL * (salt[0] + salt[1] * own); // Eq. 2
+      ions += entry.getValue() / MOL_PER_KMOL * salt[0];
+      count += entry.getValue() / MOL_PER_KMOL * salt[1];
     }
-    return Math.pow(10, -sum);
+    return new WeisenbergerSchumpe1996(ions, count);
+  }
+
+  /** Solubility over that in pure water. */
+  public double factor(Gas gas, double temperatureK) {
+    double[] g = GAS[gas.ordinal()];
+    double own = g[0] + g[1] * (temperatureK - REFERENCE_K); // Eq. 3
+    return Math.pow(10, -(ions + count * own)); // Eq. 2
   }
 
   private static double[] saltOf(String formula) {

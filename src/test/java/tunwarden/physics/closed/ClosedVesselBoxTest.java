@@ -16,7 +16,7 @@ import tunwarden.physics.liquid.LiquidKind;
  * fills from empty to brim, CO2 with and without nitrogen and air. Random states, fixed seed.
  */
 class ClosedVesselBoxTest {
-  private static final int STATES = 4000;
+  private static final int STATES = 2000;
   private static final double VOLUME = 2;
   private static final double[] FILLS = {0, 0.3, 0.8, 0.95, 0.99, 0.999, 1};
   private static final GasMix[] GASES = {

@@ -42,13 +42,13 @@ class NearFullTest {
       ClosedSolver solver = vessel.solver();
       double last = 0;
       boolean wasFull = fill == 1;
-      for (double t = 279.15; t <= 333.15; t += 0.01) {
+      for (double t = 279.15; t <= 333.15; t += 0.03) {
         solver.settle(held, t);
         double now = solver.totalPaAbsolute();
         String where = fill + " of " + gas + " at " + t;
         assertTrue(Double.isFinite(now) && now > last, where);
         if (last > 0) {
-          assertTrue(now - last < 0.2e5, where + " rose by " + (now - last));
+          assertTrue(now - last < 0.4e5, where + " rose by " + (now - last));
         }
         assertTrue(solver.liquidFull() || !wasFull, where);
         wasFull = solver.liquidFull();

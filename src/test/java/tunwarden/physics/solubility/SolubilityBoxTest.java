@@ -26,13 +26,14 @@ class SolubilityBoxTest {
   @EnumSource(LiquidKind.class)
   void risesWithPressureAndComesBackThroughTheInverse(LiquidKind kind) {
     LiquidSolubility solubility = LiquidSolubility.of(Liquid.of(kind));
-    for (Gas gas : Gas.values()) {
+    Gas[] drinks = {Gas.CO2, Gas.N2, Gas.O2};
+    for (Gas gas : kind == LiquidKind.WATER ? Gas.values() : drinks) {
       GasLine line = solubility.line(gas);
       for (double c = -2; c <= 60; c += 3.1) {
         line.prepareAt(273.15 + c);
         for (double share : SHARES) {
           double below = 0;
-          for (double bar = 0.05; bar <= 20; bar += 0.35) {
+          for (double bar = 0.05; bar <= 20; bar += 0.95) {
             double total = bar * 1e5;
             double partial = share * total;
             double dissolved = line.dissolvedKgPerM3(partial, total);
@@ -51,7 +52,7 @@ class SolubilityBoxTest {
   @EnumSource(LiquidKind.class)
   void isContinuousOverTheWholeBox(LiquidKind kind) {
     GasLine line = LiquidSolubility.of(Liquid.of(kind)).line(Gas.CO2);
-    for (double bar = 0.1; bar <= 20; bar += 0.1) {
+    for (double bar = 0.1; bar <= 20; bar += 0.85) {
       double before = Double.NaN;
       for (double c = -2; c <= 60; c += 0.05) {
         line.prepareAt(273.15 + c);
