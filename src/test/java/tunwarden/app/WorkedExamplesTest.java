@@ -28,6 +28,7 @@ class WorkedExamplesTest {
     for (CommandLine line : leaves(Main.commandLine())) {
       String help = line.getUsageMessage();
       assertTrue(help.contains("Example") && help.contains("tunwarden "), nameOf(line));
+      assertEquals(1, help.split("Examples?:\\R").length - 1, nameOf(line));
       assertTrue(help.lines().allMatch(WorkedExamplesTest::fits), nameOf(line));
     }
   }

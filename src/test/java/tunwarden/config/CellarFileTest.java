@@ -79,6 +79,43 @@ class CellarFileTest {
     assertEquals(Optional.of(19_200), level.baud());
   }
 
+  /** The file that the description of the program shows, word for word. */
+  @Test
+  void theFileOfTheInterfaceIsRead() {
+    Cellar cellar =
+        Cellars.parse(
+            """
+            [site]
+            altitude = "120 m"                      # or barometer = { … }
+            room = { volume = "180 m3", air-changes = "2 /h" }
+
+            [vessel.FV2]
+            title = "pale ale"
+            volume = "2000 L"
+            fill = "1800 L"
+            liquid = { kind = "beer", abv = "5.2 %", extract = "3.9 P" }
+            gas = "CO2"
+            closure = "infer"
+            limits = { relief = "1.5 bar", tolerance = "0.1 bar", vessel = "2.0 bar", vacuum = "-0.02 bar" }
+            relief-valve = { orifice = "15 mm", kd = "0.6" }
+            ambient = "24 C"                        # what it would warm to with cooling lost
+
+            [vessel.FV2.readings]
+            pressure = { device = "text-line", port = "/dev/ttyUSB0", field = "P", accuracy = "10 mbar" }
+            temperature = { device = "text-line", port = "/dev/ttyUSB0", field = "T", accuracy = "0.2 C" }
+
+            [alarms]
+            margin-low = "0.2 bar"
+            time-to-relief = "4 h"
+            stale = "30 s"
+
+            [notice]
+            command = ["ring-bell", "--loud"]
+            """);
+    assertEquals(List.of("ring-bell", "--loud"), cellar.notice().command());
+    assertEquals(1, PortPlans.of(cellar).size());
+  }
+
   @Test
   void theLeastThatIsRequiredIsEnough() {
     Vessel vessel = Cellars.parse(Cellars.LEAST).vessel("FV2").orElseThrow();

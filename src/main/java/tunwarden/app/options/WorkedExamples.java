@@ -34,12 +34,12 @@ public final class WorkedExamples {
     }
   }
 
-  /** The footer of a help page: the examples, or what the command itself says. */
+  /** The footer of a help page: the examples, then what the command itself says. */
   static String footer(Help help) {
-    String end = help.commandSpec().usageMessage().footer().length > 0 ? help.footer() : "";
+    String heading = help.footerHeading().isEmpty() ? String.format("%nExamples:%n%n") : "";
     return of(help.commandSpec().qualifiedName())
-        .map(text -> String.format("%nExamples:%n%n") + indented(text) + end)
-        .orElseGet(() -> help.footerHeading() + help.footer());
+        .map(text -> heading + indented(text) + help.footer())
+        .orElseGet(help::footer);
   }
 
   private static String indented(String text) {

@@ -1,0 +1,2 @@
+/** Runs what the pages for users show. */
+package tunwarden.docs;
