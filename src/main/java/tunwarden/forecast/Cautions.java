@@ -19,6 +19,7 @@ final class Cautions {
   private static final double STOUT_SHELL = 100;
   private static final double NEAR_FULL_K = 15;
   private static final double BAR = 1e5;
+  private static final double HOUR_S = 3600;
 
   private final Present present;
   private final List<Caution> list = new ArrayList<>();
@@ -110,6 +111,20 @@ final class Cautions {
               Math.round(100 * excess)
                   + " % more gas in the liquid than it holds at rest: it foams when moved or"
                   + " vented, and foam blocks vents and valves."));
+    }
+  }
+
+  /** The gauge rises faster than the estimator can explain. */
+  void contradiction(boolean isThere, double paPerS) {
+    if (isThere) {
+      list.add(
+          new Caution(
+              false,
+              String.format(
+                  Locale.ROOT,
+                  "It rises by %.3f bar an hour, faster than the estimate explains (gas being"
+                      + " made, a supply?): the trend follows the gauge.",
+                  paPerS * HOUR_S / BAR)));
     }
   }
 

@@ -36,29 +36,39 @@ public final class Forecaster {
 
   private Forecaster() {}
 
-  /** The futures of a vessel that an estimator watches; none before it believes anything. */
-  public static Outlook outlook(Vessel vessel, State state) {
+  /**
+   * The futures of a vessel that an estimator watches; none before it believes anything.
+   *
+   * @param vessel its description
+   * @param state the estimator's
+   * @param rise how the gauge itself has been rising
+   */
+  public static Outlook outlook(Vessel vessel, State state, RecentRise rise) {
     List<ForwardPoint> ahead = ForwardRun.run(state, Trend.HORIZON, Trend.STEP);
     return state
         .estimate()
-        .map(estimate -> outlook(Present.of(vessel, estimate), ahead))
+        .map(estimate -> outlook(Present.of(vessel, estimate), ahead, rise))
         .orElse(Outlook.NONE);
   }
 
   /** The futures of a vessel; {@link Outlook#NONE} where its state makes no sense to the model. */
   public static Outlook outlook(Present present) {
-    return outlook(present, List.of());
+    return outlook(present, List.of(), RecentRise.NONE);
   }
 
-  private static Outlook outlook(Present present, List<ForwardPoint> ahead) {
+  private static Outlook outlook(Present present, List<ForwardPoint> ahead, RecentRise rise) {
     if (!(present.pressurePaAbsolute() > 0) || present.vessel().fillM3() <= 0) {
       return Outlook.NONE;
     }
     Ensemble ensemble = Ensemble.of(present);
     double warmK = present.vessel().warmToK().orElse(present.temperatureK());
     Spread[] at = ensemble.ranges(world -> futures(world, warmK));
-    Trend trend = new Trend(present.at(), ahead.isEmpty() ? Drift.run(ensemble, at[REST]) : ahead);
+    List<ForwardPoint> run = ahead.isEmpty() ? Drift.run(ensemble, at[REST]) : ahead;
+    double rising = rise.paPerS().orElse(0);
+    boolean contradicted = Contradiction.isThere(run, rising);
+    Trend trend = new Trend(present.at(), contradicted ? Contradiction.resolved(run, rising) : run);
     Cautions cautions = new Cautions(present);
+    cautions.contradiction(contradicted, rising);
     List<Projection> projections = new ArrayList<>();
     projections.add(soon(trend));
     addWarm(projections, cautions, ensemble, at[WARM]);

@@ -2,33 +2,44 @@ package tunwarden.station;
 
 import java.time.Instant;
 import tunwarden.estimate.State;
+import tunwarden.forecast.RecentRise;
 
 /** All that the station remembers of one vessel; immutable, so that it can be kept and restored. */
 record VesselMemory(
     State state,
     LatestReading pressure,
     LatestReading temperature,
+    RecentRise rise,
     PacedOutlook outlook,
     Instant assessedAt) {
 
   static VesselMemory fresh(State state) {
     return new VesselMemory(
-        state, LatestReading.NONE, LatestReading.NONE, PacedOutlook.NEVER, Instant.MIN);
+        state,
+        LatestReading.NONE,
+        LatestReading.NONE,
+        RecentRise.NONE,
+        PacedOutlook.NEVER,
+        Instant.MIN);
   }
 
   VesselMemory withState(State next) {
-    return new VesselMemory(next, pressure, temperature, outlook, assessedAt);
+    return new VesselMemory(next, pressure, temperature, rise, outlook, assessedAt);
   }
 
   VesselMemory withPressure(LatestReading next) {
-    return new VesselMemory(state, next, temperature, outlook, assessedAt);
+    return new VesselMemory(state, next, temperature, rise, outlook, assessedAt);
   }
 
   VesselMemory withTemperature(LatestReading next) {
-    return new VesselMemory(state, pressure, next, outlook, assessedAt);
+    return new VesselMemory(state, pressure, next, rise, outlook, assessedAt);
+  }
+
+  VesselMemory withRise(RecentRise next) {
+    return new VesselMemory(state, pressure, temperature, next, outlook, assessedAt);
   }
 
   VesselMemory assessed(PacedOutlook next, Instant at) {
-    return new VesselMemory(state, pressure, temperature, next, at);
+    return new VesselMemory(state, pressure, temperature, rise, next, at);
   }
 }

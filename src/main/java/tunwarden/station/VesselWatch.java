@@ -108,7 +108,8 @@ final class VesselWatch {
       return kept;
     }
     try {
-      return new PacedOutlook(now, paGauge, forecasts.outlook(vessel, memory.state(), now));
+      return new PacedOutlook(
+          now, paGauge, forecasts.outlook(vessel, memory.state(), memory.rise()));
     } catch (RuntimeException e) {
       LOG.warn("{}: the futures could not be computed", vessel.id(), e);
       return new PacedOutlook(now, paGauge, Outlook.NONE);
@@ -126,9 +127,13 @@ final class VesselWatch {
 
   private void remember(Reading reading, Quality quality) {
     switch (reading.quantity()) {
-      case PRESSURE ->
-          memory =
-              memory.withPressure(memory.pressure().seen(reading.value(), reading.time(), quality));
+      case PRESSURE -> {
+        memory =
+            memory.withPressure(memory.pressure().seen(reading.value(), reading.time(), quality));
+        if (!quality.isBad()) {
+          memory = memory.withRise(memory.rise().seen(reading.time(), reading.value()));
+        }
+      }
       case TEMPERATURE ->
           memory =
               memory.withTemperature(

@@ -66,7 +66,7 @@ class TrendTest {
   void theOutlookOfAWatchedVesselCarriesTheEstimatorsOwnRun() {
     Simulation log = Scenario.SETTLED.run(3);
     State state = stateAt(log, 6 * 3600);
-    Outlook outlook = Forecaster.outlook(log.vessel(), state);
+    Outlook outlook = Forecaster.outlook(log.vessel(), state, RecentRise.NONE);
     List<ForwardPoint> run = ForwardRun.run(state, Trend.HORIZON, Trend.STEP);
     assertEquals(run.size(), outlook.trend().size());
     for (int i = 0; i < run.size(); i++) {
@@ -78,7 +78,9 @@ class TrendTest {
   @Test
   void nothingIsForecastBeforeAnythingIsBelieved() {
     Vessel vessel = Scenario.SETTLED.run(3).vessel();
-    assertEquals(Outlook.NONE, Forecaster.outlook(vessel, Estimators.standard().begin(vessel)));
+    assertEquals(
+        Outlook.NONE,
+        Forecaster.outlook(vessel, Estimators.standard().begin(vessel), RecentRise.NONE));
   }
 
   /**
@@ -159,8 +161,7 @@ class TrendTest {
       if (Double.isNaN(reached) || reached - log.judgedFrom() < 3600) {
         continue;
       }
-      Trend trend =
-          new Trend(START, ForwardRun.run(stateAt(log, asked), Trend.HORIZON, Trend.STEP));
+      Trend trend = trendAt(log, asked);
       double truth = reached - asked;
       double earliest = seconds(trend.soonest(lift));
       double latest = seconds(trend.until(lift).flatMap(TimeRange::high));
@@ -176,6 +177,19 @@ class TrendTest {
 
   private static double seconds(Optional<Duration> time) {
     return time.map(Duration::toSeconds).map(Long::doubleValue).orElse(Double.POSITIVE_INFINITY);
+  }
+
+  private static Trend trendAt(Simulation log, double asked) {
+    RecentRise rise = RecentRise.NONE;
+    for (Row row : log.rows()) {
+      if (row.seconds() <= asked) {
+        rise = rise.seen(START.plusMillis(Math.round(1000 * row.seconds())), row.paGauge());
+      }
+    }
+    List<ForwardPoint> run = ForwardRun.run(stateAt(log, asked), Trend.HORIZON, Trend.STEP);
+    double rising = rise.paPerS().orElse(0);
+    boolean contradicted = Contradiction.isThere(run, rising);
+    return new Trend(START, contradicted ? Contradiction.resolved(run, rising) : run);
   }
 
   private static double reached(Simulation log, double paGauge) {

@@ -73,7 +73,7 @@ class StationTest {
     return new Station(
         List.of(KEG),
         estimator,
-        (vessel, state, now) -> Outlook.NONE,
+        (vessel, state, rise) -> Outlook.NONE,
         StationSettings.USUAL,
         List.of(sinks));
   }

@@ -27,8 +27,7 @@ import tunwarden.vessel.Vessel;
  */
 public record Assembly(Station station, AlarmKeeper alarms, BoardKeeper board) {
   /** The futures of a vessel, from what the estimator believes. */
-  public static final Forecasts FORECASTS =
-      (vessel, state, now) -> Forecaster.outlook(vessel, state);
+  public static final Forecasts FORECASTS = Forecaster::outlook;
 
   /**
    * Puts a station together.

@@ -53,7 +53,7 @@ final class Survey implements AutoCloseable {
         new Station(
             vessels,
             Estimators.standard(),
-            (vessel, state, now) -> Outlook.NONE,
+            (vessel, state, rise) -> Outlook.NONE,
             StationSettings.USUAL,
             List.of(new Marker()));
     thread.setDaemon(true);
