@@ -30,7 +30,7 @@ import tunwarden.units.BadInputException;
       "  tunwarden rehearse",
       "  tunwarden rehearse cooling-lost --log day.csv",
       "  tunwarden rehearse settled --port /dev/ttyUSB1 --device modbus-rtu-float --address 3",
-      "  tunwarden rehearse slow-leak --seed 7 --log - | tunwarden report - --volume '1000 L' ..."
+      "  tunwarden rehearse slow-leak --seed 7 --log leak.csv"
     })
 final class RehearseCommand implements Callable<Integer> {
   @Spec private CommandSpec spec;

@@ -8,7 +8,6 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.LongConsumer;
-import tunwarden.estimate.Estimate;
 import tunwarden.estimate.Estimator;
 import tunwarden.estimate.Event;
 import tunwarden.estimate.EventKind;
@@ -130,10 +129,7 @@ public final class Reporter {
   }
 
   private Optional<Smoother> smoother(Analysis analysis) {
-    Optional<Estimate> last = analysis.state().estimate();
-    return settings.causal() || last.isEmpty()
-        ? Optional.empty()
-        : Smoother.over(analysis.bins(), last.get());
+    return settings.causal() ? Optional.empty() : Smoother.over(analysis);
   }
 
   private void writeSeries(Appendable out, RowSpool spool, Analysis analysis, Belief belief)

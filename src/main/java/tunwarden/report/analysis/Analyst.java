@@ -125,7 +125,11 @@ public final class Analyst {
 
   private void keep(ReportRow row) {
     bins = bins == null ? new Bins(row.time().toEpochMilli()) : bins;
-    bins.add(row, state.estimate().map(Estimate::gasMadeKgPerM3PerS).orElse(0.0));
+    Optional<Estimate> estimate = state.estimate();
+    bins.add(
+        row,
+        estimate.map(Estimate::gasMadeKgPerM3PerS).orElse(0.0),
+        estimate.map(Estimate::mode).filter(mode -> mode == Mode.SEALED).isPresent());
     if (!Double.isNaN(row.paGauge()) && row.quality().level() != Quality.Level.BAD) {
       finder.add(new Point(row.time().toEpochMilli(), row.paGauge(), row.temperatureK()));
     }

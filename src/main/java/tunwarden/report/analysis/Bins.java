@@ -10,13 +10,14 @@ public final class Bins {
   /** Most stretches kept. */
   public static final int MOST = 2048;
 
-  private static final int SUMS = 6;
+  private static final int SUMS = 7;
   private static final int PRESSURE = 0;
   private static final int TEMPERATURE = 1;
   private static final int DISSOLVED = 2;
   private static final int U95 = 3;
   private static final int EQUILIBRIUM = 4;
   private static final int MADE = 5;
+  private static final int SEALED = 6;
 
   private final double[][] sum = new double[SUMS][MOST];
   private final int[][] count = new int[SUMS][MOST];
@@ -33,8 +34,13 @@ public final class Bins {
     Arrays.fill(high, Double.NEGATIVE_INFINITY);
   }
 
-  /** Takes in a row and the rate of gas being made (kg/m³/s, 0 where unknown). */
-  void add(ReportRow row, double madeKgPerM3PerS) {
+  /**
+   * Takes in a row.
+   *
+   * @param madeKgPerM3PerS rate of gas being made, 0 where unknown
+   * @param sealed whether the headspace is believed shut
+   */
+  void add(ReportRow row, double madeKgPerM3PerS, boolean sealed) {
     long offset = row.time().toEpochMilli() - originMs;
     if (offset < 0) {
       return;
@@ -54,6 +60,7 @@ public final class Bins {
     put(U95, bin, row.u95KgPerM3());
     put(EQUILIBRIUM, bin, row.equilibriumKgPerM3());
     put(MADE, bin, madeKgPerM3PerS);
+    put(SEALED, bin, sealed ? 1 : 0);
   }
 
   private void put(int what, int bin, double value) {
@@ -131,6 +138,11 @@ public final class Bins {
   /** Mean rate of gas being made, kg/m³/s; 0 where unknown. */
   public double made(int bin) {
     return count[MADE][bin] == 0 ? 0 : mean(MADE, bin);
+  }
+
+  /** Whether the headspace was believed shut all the time. */
+  public boolean isSealed(int bin) {
+    return mean(SEALED, bin) == 1;
   }
 
   private double mean(int what, int bin) {

@@ -2,54 +2,58 @@ package tunwarden.report.analysis;
 
 import java.util.Optional;
 import tunwarden.estimate.Estimate;
+import tunwarden.forecast.Present;
 
 /**
  * Looks back with the whole log in hand. Whatever a valve does, the liquid follows the headspace at
- * first order: dC/dt = kLa (C* − C) + gas made, and C* is known at all times from pressure and
- * temperature. Held pressure hides C while it lasts; once the vessel is closed C becomes known. So
- * the histories that start from anywhere the first belief allows, at any rate the last belief
- * allows, are weighed by how well they arrive at what is known at the best moment afterwards; the
- * belief before that moment is their weighted mean and spread.
+ * first order: dC/dt = kLa (C* − C), and C* is known at all times from pressure and temperature.
+ * Held pressure hides C while it lasts; once the vessel is shut, the headspace shows it. So the
+ * histories that start anywhere, at any rate, are weighed by how well they explain the headspace
+ * while it was shut ({@link ShutStretches}) and how well they arrive at the running estimate's last
+ * belief; what the liquid held is their weighted mean and spread.
  */
 public final class Smoother {
   private static final int STARTS = 41;
   private static final int RATES = 41;
-  private static final double TO_SIGMA = 1 / 1.96;
-  private static final double WORTH_IT = 1.3;
+  private static final int PASSES = 3;
+  private static final double SIGMA_TO_U95 = 1.96;
   private static final double MODEL_SHARE = 0.03;
+  private static final double RELATION_SHARE = 0.012;
+  private static final double MOST_MADE_PER_DAY = 0.3;
+  private static final double MOST_AIR = 0.02;
+  private static final double WORTH_IT = 1.3;
+
+  /** Spread of kLa before anything is seen: a factor of 25 either way (95 %), in logarithms. */
+  private static final double RATE_SIGMA = Math.log(25) / 1.96;
 
   private final Bins bins;
-  private final double[] dissolved;
+  private final ShutStretches shut;
+  private final int first;
+  private final double usualLnRate;
+  private final double[] mean;
   private final double[] sigma;
-  private final int anchor;
 
-  private Smoother(Bins bins, int anchor) {
-    this.bins = bins;
-    this.anchor = anchor;
-    this.dissolved = new double[anchor + 1];
-    this.sigma = new double[anchor + 1];
+  private Smoother(Analysis analysis, ShutStretches shut, int first) {
+    this.bins = analysis.bins();
+    this.usualLnRate = Math.log(Present.usualTransfer(analysis.vessel().fillM3()).middle());
+    this.shut = shut;
+    this.first = first;
+    this.mean = new double[bins.size()];
+    this.sigma = new double[bins.size()];
   }
 
-  /**
-   * The backward look; empty where it would add nothing.
-   *
-   * @param bins the forward beliefs
-   * @param last belief at the end of the log
-   */
-  public static Optional<Smoother> over(Bins bins, Estimate last) {
+  /** The backward look; empty where it would add nothing, or while something ferments. */
+  public static Optional<Smoother> over(Analysis analysis) {
+    Bins bins = analysis.bins();
+    Optional<Estimate> last = analysis.state().estimate();
     int first = firstKnown(bins);
-    int widest = extreme(bins, first, true);
-    if (widest < 0) {
+    boolean possible = last.isPresent() && first + 10 <= bins.size() && varies(bins, first);
+    if (!possible || isFermenting(last.get()) || hasUnstatedAir(last.get())) {
       return Optional.empty();
     }
-    int anchor = extreme(bins, widest, false);
-    boolean worth = bins.u95(widest) > WORTH_IT * bins.u95(anchor) && anchor > first + 3;
-    if (!worth || !(last.transferPerS().middle() > 0)) {
-      return Optional.empty();
-    }
-    Smoother smoother = new Smoother(bins, anchor);
-    smoother.weigh(first, last.transferPerS());
-    return Optional.of(smoother);
+    ShutStretches shut = ShutStretches.of(analysis);
+    Smoother smoother = new Smoother(analysis, shut, first);
+    return shut.isEmpty() || !smoother.weigh(last.get()) ? Optional.empty() : Optional.of(smoother);
   }
 
   private static int firstKnown(Bins bins) {
@@ -61,107 +65,169 @@ public final class Smoother {
     return bins.size();
   }
 
-  /** The stretch with the greatest, or the least, half-width from {@code from} on; -1 for none. */
-  private static int extreme(Bins bins, int from, boolean greatest) {
-    int best = -1;
-    for (int i = from; i < bins.size(); i++) {
-      double u95 = bins.u95(i);
-      boolean better = best < 0 || (greatest ? u95 > bins.u95(best) : u95 < bins.u95(best));
-      if (!Double.isNaN(u95) && better) {
-        best = i;
-      }
-    }
-    return best;
+  private static boolean isFermenting(Estimate last) {
+    return last.gasMadeKgPerM3PerS() * 86_400 > MOST_MADE_PER_DAY;
   }
 
-  private void weigh(int first, Estimate.Spread rate) {
-    double[] mean = new double[anchor + 1];
-    double[] square = new double[anchor + 1];
-    double[] path = new double[anchor + 1];
-    double total = 0;
-    double startSigma = Math.max(bins.u95(first) * TO_SIGMA, 1e-6);
-    double rateSigma = Math.max(0.05, Math.log(rate.high() / rate.low()) / 2 * TO_SIGMA);
-    double endSigma = Math.hypot(bins.u95(anchor) * TO_SIGMA, 0.005 * bins.dissolved(anchor));
-    for (int i = 0; i < STARTS; i++) {
-      double startDeviate = -3 + 6.0 * i / (STARTS - 1);
-      double start = bins.dissolved(first) + startDeviate * startSigma;
-      if (start < 0) {
-        continue;
+  /** The balance here knows only the air that was stated. */
+  private static boolean hasUnstatedAir(Estimate last) {
+    return last.airFraction() - last.airFractionU95() > MOST_AIR;
+  }
+
+  /** Where the belief was equally narrow all along, there is nothing to gain. */
+  private static boolean varies(Bins bins, int first) {
+    double least = Double.POSITIVE_INFINITY;
+    double most = 0;
+    for (int i = first; i < bins.size(); i++) {
+      if (!Double.isNaN(bins.u95(i))) {
+        least = Math.min(least, bins.u95(i));
+        most = Math.max(most, bins.u95(i));
       }
+    }
+    return most > WORTH_IT * least;
+  }
+
+  /** The part of the plane of starts and rates that is looked at, ever closer. */
+  private record Field(double start, double startHalf, double lnRate, double lnRateHalf) {}
+
+  private boolean weigh(Estimate last) {
+    double most = 1.3 * Math.max(shut.rest(first), bins.dissolved(first));
+    Field field = new Field(most / 2, most / 2, usualLnRate, 3 * RATE_SIGMA);
+    for (int pass = 0; pass < PASSES; pass++) {
+      field = look(field, last, pass == PASSES - 1);
+      if (field == null) {
+        return false;
+      }
+    }
+    return true;
+  }
+
+  /** Weighs a grid over the field; returns the field to look at next, or null if nothing fits. */
+  private Field look(Field field, Estimate last, boolean keep) {
+    double[][] logWeight = new double[STARTS][RATES];
+    double best = Double.NEGATIVE_INFINITY;
+    double[] path = new double[bins.size()];
+    for (int i = 0; i < STARTS; i++) {
       for (int j = 0; j < RATES; j++) {
-        double rateDeviate = -3 + 6.0 * j / (RATES - 1);
-        double perS = rate.middle() * Math.exp(rateDeviate * rateSigma);
-        run(first, start, perS, path);
-        double endDeviate = (path[anchor] - bins.dissolved(anchor)) / endSigma;
-        double weight =
-            Math.exp(
-                -0.5
-                    * (startDeviate * startDeviate
-                        + rateDeviate * rateDeviate
-                        + endDeviate * endDeviate));
-        total += weight;
-        for (int k = first; k <= anchor; k++) {
-          mean[k] += weight * path[k];
-          square[k] += weight * path[k] * path[k];
+        run(start(field, i), Math.exp(lnRate(field, j)), path);
+        double unusual = (lnRate(field, j) - usualLnRate) / RATE_SIGMA;
+        logWeight[i][j] =
+            start(field, i) < 0
+                ? Double.NEGATIVE_INFINITY
+                : fit(path, last) - unusual * unusual / 2;
+        best = Math.max(best, logWeight[i][j]);
+      }
+    }
+    if (!Double.isFinite(best)) {
+      return null;
+    }
+    Moments starts = new Moments();
+    Moments rates = new Moments();
+    double[] square = new double[bins.size()];
+    java.util.Arrays.fill(mean, 0);
+    for (int i = 0; i < STARTS; i++) {
+      for (int j = 0; j < RATES; j++) {
+        double weight = Math.exp(logWeight[i][j] - best);
+        starts.add(start(field, i), weight);
+        rates.add(lnRate(field, j), weight);
+        if (keep && weight > 1e-6) {
+          run(start(field, i), Math.exp(lnRate(field, j)), path);
+          for (int k = first; k < path.length; k++) {
+            mean[k] += weight * path[k];
+            square[k] += weight * path[k] * path[k];
+          }
         }
       }
     }
-    settle(first, total, mean, square);
+    if (keep) {
+      settle(starts.weight, square);
+    }
+    double startHalf = Math.min(field.startHalf(), 3.2 * starts.sigma() + field.startHalf() / 15);
+    double rateHalf = Math.min(field.lnRateHalf(), 3.2 * rates.sigma() + field.lnRateHalf() / 15);
+    return new Field(starts.mean(), startHalf, rates.mean(), rateHalf);
+  }
+
+  private static double start(Field field, int i) {
+    return field.start() + field.startHalf() * (2.0 * i / (STARTS - 1) - 1);
+  }
+
+  private static double lnRate(Field field, int j) {
+    return field.lnRate() + field.lnRateHalf() * (2.0 * j / (RATES - 1) - 1);
+  }
+
+  private double fit(double[] path, Estimate last) {
+    double end = path[path.length - 1];
+    double endSigma =
+        Math.hypot(last.dissolvedU95KgPerM3() / SIGMA_TO_U95, RELATION_SHARE * Math.abs(end));
+    double off = (end - last.dissolvedKgPerM3()) / endSigma;
+    return -off * off / 2 + shut.fit(path);
   }
 
   /** One history: the exact step of a first-order lag over each stretch. */
-  private void run(int first, double start, double perS, double[] path) {
-    double seconds = bins.widthMs() / 1000.0;
-    double keep = Math.exp(-perS * seconds);
+  private void run(double start, double perS, double[] path) {
+    double keep = Math.exp(-perS * bins.widthMs() / 1000.0);
     double c = start;
-    double rest = bins.equilibrium(first);
-    path[first] = c;
-    for (int k = first + 1; k < path.length; k++) {
-      double next = bins.equilibrium(k);
-      rest = Double.isNaN(next) ? rest : next;
-      c = rest + (c - rest) * keep + bins.made(k) * seconds;
+    double rest = shut.rest(first);
+    for (int k = 0; k < path.length; k++) {
+      if (k > first) {
+        double next = shut.rest(k);
+        double middle = Double.isNaN(next) ? rest : (rest + next) / 2;
+        rest = Double.isNaN(next) ? rest : next;
+        c = middle + (c - middle) * keep;
+      }
       path[k] = c;
     }
   }
 
-  private void settle(int first, double total, double[] mean, double[] square) {
-    for (int k = 0; k <= anchor; k++) {
-      if (k < first || !(total > 1e-12)) {
-        dissolved[k] = Double.NaN;
-        continue;
-      }
+  private void settle(double total, double[] square) {
+    for (int k = first; k < mean.length; k++) {
       double m = mean[k] / total;
       double spread = Math.sqrt(Math.max(0, square[k] / total - m * m));
-      double model = MODEL_SHARE * Math.abs(m - bins.equilibrium(k));
-      double relation = bins.u95(anchor) * TO_SIGMA * m / bins.dissolved(anchor);
-      dissolved[k] = m;
-      sigma[k] = Math.sqrt(spread * spread + model * model + relation * relation);
+      double rest = Double.isNaN(shut.rest(k)) ? m : shut.rest(k);
+      mean[k] = m;
+      sigma[k] = Math.hypot(spread, Math.hypot(MODEL_SHARE * (m - rest), 2 * RELATION_SHARE * m));
     }
   }
 
   /** The row with the belief the whole log gives, where that is narrower than the running one. */
   public ReportRow smooth(ReportRow row) {
-    double at = place(row.time().toEpochMilli());
-    int bin = (int) Math.floor(at);
-    if (Double.isNaN(row.dissolvedKgPerM3()) || bin < 0 || bin + 1 > anchor) {
+    double at = (row.time().toEpochMilli() - bins.middleMs(0)) / (double) bins.widthMs();
+    int bin = (int) Math.floor(Math.min(at, bins.size() - 1.000001));
+    if (Double.isNaN(row.dissolvedKgPerM3()) || bin < first) {
       return row;
     }
-    double share = at - bin;
-    double c = dissolved[bin] + share * (dissolved[bin + 1] - dissolved[bin]);
-    double u95 = (sigma[bin] + share * (sigma[bin + 1] - sigma[bin])) / TO_SIGMA;
-    boolean narrower = u95 < row.u95KgPerM3();
-    return narrower ? row.withDissolved(c, u95) : row;
+    double share = Math.min(1, at - bin);
+    double c = mean[bin] + share * (mean[bin + 1] - mean[bin]);
+    double u95 = SIGMA_TO_U95 * (sigma[bin] + share * (sigma[bin + 1] - sigma[bin]));
+    return u95 < row.u95KgPerM3() ? row.withDissolved(c, u95) : row;
   }
 
   /** The belief for a stretch: content and half-width; the running one where that is narrower. */
   public double[] at(int bin) {
-    boolean better = bin <= anchor && sigma[bin] / TO_SIGMA < bins.u95(bin);
+    boolean better = bin >= first && SIGMA_TO_U95 * sigma[bin] < bins.u95(bin);
     return better
-        ? new double[] {dissolved[bin], sigma[bin] / TO_SIGMA}
+        ? new double[] {mean[bin], SIGMA_TO_U95 * sigma[bin]}
         : new double[] {bins.dissolved(bin), bins.u95(bin)};
   }
 
-  private double place(long ms) {
-    return (ms - bins.middleMs(0)) / (double) bins.widthMs();
+  /** Weighted mean and spread. */
+  private static final class Moments {
+    private double weight;
+    private double sum;
+    private double squares;
+
+    void add(double value, double w) {
+      weight += w;
+      sum += w * value;
+      squares += w * value * value;
+    }
+
+    double mean() {
+      return sum / weight;
+    }
+
+    double sigma() {
+      return Math.sqrt(Math.max(0, squares / weight - mean() * mean()));
+    }
   }
 }
