@@ -78,7 +78,7 @@ public final class LogReader implements RowSource {
       finished = true;
       order.finish();
       notes.noteSkippedHour(parser.skippedHours());
-      refuseAnEmptyLog();
+      refuseAUselessLog();
       return;
     }
     if (line.number() < layout.firstRow() || line.isComment() || line.isBlank()) {
@@ -137,7 +137,15 @@ public final class LogReader implements RowSource {
         && (line.fields() < layout.fields() || line.length(lastColumn) < lastColumnLength);
   }
 
-  private void refuseAnEmptyLog() {
+  private void refuseAUselessLog() {
+    if (notes.late() > notes.rows() + RowOrder.WINDOW) {
+      throw new BadLogException(
+          file,
+          0,
+          "time",
+          "most rows are older than the ones above them; turn the log round so that the oldest row"
+              + " comes first below the line of names");
+    }
     if (anyValue) {
       return;
     }

@@ -197,6 +197,19 @@ class ForeignLogTest {
     assertEquals("--columns", refused.field());
   }
 
+  @Test
+  void aLogWrittenNewestFirstIsRefused() throws IOException {
+    StringBuilder text = new StringBuilder("time,P [bar],T [C]\n");
+    for (int i = 400; i > 0; i--) {
+      text.append(START.plusSeconds(10L * i)).append(",0.9,5\n");
+    }
+    Path file = Files.writeString(folder.resolve("log.csv"), text);
+    try (LogReader reader = LogFile.open(file, LogOptions.NONE).open()) {
+      BadLogException refused = assertThrows(BadLogException.class, () -> all(reader));
+      assertTrue(refused.getMessage().contains("turn the log round"), refused.getMessage());
+    }
+  }
+
   private List<LogRow> read(String... lines) throws IOException {
     return read(LogOptions.NONE, lines);
   }

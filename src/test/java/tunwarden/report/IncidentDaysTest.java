@@ -32,7 +32,7 @@ class IncidentDaysTest {
 
   @Test
   void eventsAreFoundOnAFewDays() {
-    judge(6);
+    judge(4);
   }
 
   @Test

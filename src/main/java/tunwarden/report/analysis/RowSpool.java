@@ -19,17 +19,15 @@ import tunwarden.reading.Quality;
 public final class RowSpool implements Closeable {
   private static final Quality[] QUALITIES = Quality.values();
 
-  private final Path file;
+  private Path file;
   private DataOutputStream out;
 
-  /** Opens an empty spool in the folder for temporary files. */
-  public RowSpool() throws IOException {
-    file = Files.createTempFile("tunwarden-series", ".rows");
-    out = new DataOutputStream(new BufferedOutputStream(Files.newOutputStream(file), 1 << 16));
-  }
-
-  /** Parks one row. */
+  /** Parks one row; the first opens a file in the folder for temporary files. */
   public void add(ReportRow row) throws IOException {
+    if (out == null) {
+      file = Files.createTempFile("tunwarden-series", ".rows");
+      out = new DataOutputStream(new BufferedOutputStream(Files.newOutputStream(file), 1 << 16));
+    }
     out.writeLong(row.time().getEpochSecond());
     out.writeInt(row.time().getNano());
     out.writeDouble(row.paGauge());
@@ -49,6 +47,9 @@ public final class RowSpool implements Closeable {
 
   /** Gives every row back in order. */
   public void replay(Taker taker) throws IOException {
+    if (out == null) {
+      return;
+    }
     out.close();
     try (DataInputStream in =
         new DataInputStream(new BufferedInputStream(Files.newInputStream(file), 1 << 16))) {
@@ -76,7 +77,9 @@ public final class RowSpool implements Closeable {
 
   @Override
   public void close() throws IOException {
-    out.close();
-    Files.deleteIfExists(file);
+    if (out != null) {
+      out.close();
+      Files.deleteIfExists(file);
+    }
   }
 }

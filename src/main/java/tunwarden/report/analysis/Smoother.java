@@ -17,6 +17,13 @@ public final class Smoother {
   private static final int RATES = 41;
   private static final int PASSES = 3;
   private static final double SIGMA_TO_U95 = 1.96;
+
+  /**
+   * The grid is coarse and the errors of gauge, fill and relation are shared by all points, which
+   * the weights do not know; set so that the interval covers on simulated vessels (SmootherTest).
+   */
+  private static final double WIDEN = 1.35;
+
   private static final double MODEL_SHARE = 0.03;
   private static final double RELATION_SHARE = 0.012;
   private static final double MOST_MADE_PER_DAY = 0.3;

@@ -12,6 +12,8 @@ import tunwarden.vessel.Vessel;
 
 /** Fed every row of one vessel, it names the events once the log has ended. Memory is bounded. */
 public final class EventFinder {
+  private static final double SLOWEST_CHARGE_PA_PER_S = 40;
+
   private final Vessel vessel;
   private final GapTracker gaps = new GapTracker();
   private final MovementTracker movements = new MovementTracker();
@@ -47,6 +49,7 @@ public final class EventFinder {
     List<StillTracker.Stretch> frozen = frozen();
     Echoes.without(movements.movements()).stream()
         .filter(m -> frozen.stream().noneMatch(s -> s.explains(m)))
+        .filter(m -> !isGivenOff(m))
         .forEach(m -> events.add(naming.movement(m)));
     movements.spikes().forEach(m -> events.add(naming.spike(m)));
     gaps.gaps().forEach(g -> events.add(naming.gap(g)));
@@ -55,6 +58,12 @@ public final class EventFinder {
     addOver(events, naming);
     events.sort(Comparator.comparing(Event::time).thenComparing(Event::kind));
     return events;
+  }
+
+  /** A rise this slow is what a liquid gives off once it is shut in, not gas let in. */
+  private static boolean isGivenOff(Movement movement) {
+    double seconds = Math.max(1, (movement.untilMs() - movement.fromMs()) / 1000.0);
+    return movement.changePa() > 0 && movement.changePa() / seconds < SLOWEST_CHARGE_PA_PER_S;
   }
 
   private double usualU95Pa() {

@@ -66,7 +66,7 @@ public final class Rerun {
   private Course run(ZoneId zone) {
     Instant begin = analysis.extremes().from();
     Optional<Instant> ventAt = whatIf.vent().map(vent -> vent.after(begin, zone));
-    Instant from = whatIf.reliefPaGauge().isPresent() ? begin : ventAt.orElse(begin);
+    Instant from = begins(ventAt).orElse(begin);
     Instant until = analysis.extremes().until();
     if (ventAt.isPresent() && (ventAt.get().isBefore(begin) || ventAt.get().isAfter(until))) {
       throw new BadInputException(
@@ -96,6 +96,22 @@ public final class Rerun {
     }
     return new Course(
         whatIf.words(), points, limits, sentences(simulated.lostKg() - before, points));
+  }
+
+  /** Until the log reaches the other setting, or the vent, nothing would have been different. */
+  private Optional<Instant> begins(Optional<Instant> ventAt) {
+    if (whatIf.reliefPaGauge().isEmpty()) {
+      return ventAt;
+    }
+    double set = whatIf.reliefPaGauge().getAsDouble();
+    for (int bin = 0; bin < bins.size(); bin++) {
+      Instant at = Instant.ofEpochMilli(bins.middleMs(bin));
+      boolean vented = ventAt.isPresent() && !at.isBefore(ventAt.get());
+      if (bins.highPa(bin) >= set || vented) {
+        return Optional.of(at.minusMillis(bins.widthMs()));
+      }
+    }
+    return ventAt;
   }
 
   private int firstKnown(Instant from) {

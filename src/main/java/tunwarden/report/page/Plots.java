@@ -15,6 +15,9 @@ import tunwarden.vessel.Limits;
 
 /** The plots of one chapter. */
 final class Plots {
+  /** A thermometer's noise is not to fill the picture. */
+  private static final double LEAST_SPAN_K = 2;
+
   private final Chapter chapter;
   private final Bins bins;
   private final TimeScale time;
@@ -54,7 +57,9 @@ final class Plots {
     RestBand rest = new RestBand(chapter.analysis().vessel(), bins);
     plot.band(i -> rest.bar(i, low(i)), i -> rest.bar(i, high(i)), "band");
     if (coldest <= warmest) {
-      Scale right = plot.rightAxis(celsius(coldest), celsius(warmest), "temperature, °C");
+      double room = Math.max(0, LEAST_SPAN_K - (warmest - coldest)) / 2;
+      Scale right =
+          plot.rightAxis(celsius(coldest - room), celsius(warmest + room), "temperature, °C");
       plot.course(i -> celsius(bins.temperatureK(i)), right, "temperature");
     }
     plot.extremes(i -> bins.lowPa(i) / 1e5, i -> bins.highPa(i) / 1e5, "span");
