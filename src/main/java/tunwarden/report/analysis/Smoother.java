@@ -27,7 +27,7 @@ public final class Smoother {
   private static final double MODEL_SHARE = 0.03;
   private static final double RELATION_SHARE = 0.012;
   private static final double MOST_MADE_PER_DAY = 0.3;
-  private static final double MOST_AIR = 0.02;
+  private static final double MOST_AIR = 0.10;
   private static final double WORTH_IT = 1.3;
 
   /** Spread of kLa before anything is seen: a factor of 25 either way (95 %), in logarithms. */
@@ -192,7 +192,8 @@ public final class Smoother {
       double spread = Math.sqrt(Math.max(0, square[k] / total - m * m));
       double rest = Double.isNaN(shut.rest(k)) ? m : shut.rest(k);
       mean[k] = m;
-      sigma[k] = Math.hypot(spread, Math.hypot(MODEL_SHARE * (m - rest), 2 * RELATION_SHARE * m));
+      double model = Math.hypot(MODEL_SHARE * (m - rest), 2 * RELATION_SHARE * m);
+      sigma[k] = WIDEN * Math.hypot(spread, model);
     }
   }
 
