@@ -1,6 +1,7 @@
 package tunwarden.physics.gas;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
 import static tunwarden.physics.Reference.kelvin;
 import static tunwarden.physics.Reference.number;
 import static tunwarden.physics.Reference.rows;
@@ -114,6 +115,25 @@ class RealGasValidation {
 
   private static double lnPhi(Gas gas, GasMix mix, double pa, double t) {
     return Math.log(RealGas.fugacityCoefficient(gas, mix, pa, t));
+  }
+
+  /** Densities at the standard conditions in use, reference equations computed elsewhere. */
+  @Test
+  void densitiesAtStandardConditionsAreMet() {
+    int compared = 0;
+    for (NamedCsvRecord row : rows("gas_standard_conditions")) {
+      var gas = Gas.ofSymbol(row.getField("gas"));
+      if (gas.isPresent()) {
+        double t = kelvin(number(row, "T_degC"));
+        double pa = number(row, "p_Pa");
+        double z = RealGas.z(gas.get(), pa, t);
+        double density = pa * gas.get().molarMass() / (z * Constants.GAS_CONSTANT * t);
+        double tabulated = number(row, "rho_kg_m3");
+        assertEquals(tabulated, density, 0.0003 * tabulated, row::toString);
+        compared++;
+      }
+    }
+    assertTrue(compared >= 12, "rows compared: " + compared);
   }
 
   /** One litre of CO2 at 0 °C and 1 atm weighs 1.97681 g: the trade's real-gas volume. */

@@ -54,6 +54,16 @@ class WaterValidation {
     assertTrue(compared >= 20, "rows compared: " + compared);
   }
 
+  /** Henry fugacities on the mole fraction computed elsewhere from the same constants. */
+  @Test
+  void henryFugacityIsThatOfTheTable() {
+    for (NamedCsvRecord row : rows("co2_water_henry")) {
+      double tabulated = number(row, "H_Weiss1974_MPa_molefrac");
+      double ours = WATER.henryPa(Gas.CO2, kelvin(number(row, "t_C"))) / 1e6;
+      assertEquals(tabulated, ours, 0.0001 * tabulated, row::toString);
+    }
+  }
+
   /** Handbook g per 100 g at 1 atm total; four digits from memory, within 1.2 % to 50 °C. */
   @Test
   void isNearTheHandbookAtOneAtmosphere() {
