@@ -108,7 +108,7 @@ final class PressureStep {
 
   private double jumpLimit() {
     double absolute = point.paGauge() + state.ambientPa();
-    double coarse = Math.min(noise.step(), 2000);
+    double coarse = noise.coarsePa();
     double random = Math.max(JUMP_SDS * Math.sqrt(noise.scatter()), 2.5 * coarse);
     return Math.max(random, Math.max(LEAST_JUMP_PA, JUMP_SHARE * absolute));
   }
@@ -255,5 +255,6 @@ final class PressureStep {
       bank = filter.valveWorked(bank);
     }
     front = front.flowing(null);
+    noise = noise.afterJump();
   }
 }

@@ -60,7 +60,7 @@ final class StateReader {
     double smoothK = number();
     double smoothS = number();
     double slowK = number();
-    Noise noise = new Noise(in.getInt(), number(), number(), number(), number());
+    Noise noise = new Noise(in.getInt(), in.getInt(), number(), number(), number(), number());
     return new Senses(pressure, temperature, barometer, smoothK, smoothS, slowK, noise);
   }
 

@@ -52,7 +52,7 @@ final class StateWriter {
     track(s.barometer());
     numbers(s.smoothK(), s.smoothS(), s.slowK());
     Noise n = s.noise();
-    out.putInt(n.count());
+    out.putInt(n.count()).putInt(n.run());
     numbers(n.last(), n.before(), n.scatter(), n.step());
   }
 

@@ -57,7 +57,7 @@ public enum Scenario {
 
     @Override
     World world(long seed) {
-      return new World(seed, 0.05, 0.97);
+      return new World(seed, 0.05, 0.97, false);
     }
   },
   /** A laboratory value entered half-way while the pressure is held. */
@@ -74,7 +74,7 @@ public enum Scenario {
   abstract Script script(World world);
 
   World world(long seed) {
-    return new World(seed, 0, 0);
+    return new World(seed, 0, 0, this == FERMENTING);
   }
 
   /** The log of this situation drawn from a seed. */

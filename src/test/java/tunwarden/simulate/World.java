@@ -21,7 +21,7 @@ final class World {
   private static final double GAUGE_U95_PA = 1000;
   private static final double THERMOMETER_U95_K = 0.3;
   private static final double AMBIENT_U95_PA = 3000;
-  private static final double RELATION_U = 0.012;
+  private static final double RELATION_U = 0.01;
 
   final Random random;
   final double volumeM3;
@@ -36,6 +36,10 @@ final class World {
   private final double ambientPa;
 
   World(long seed, double volumeM3, double fillShare) {
+    this(seed, volumeM3, fillShare, false);
+  }
+
+  World(long seed, double volumeM3, double fillShare, boolean ferments) {
     random = new Random(seed * 7919 + 17);
     random.nextDouble();
     this.volumeM3 = volumeM3 > 0 ? volumeM3 : 0.05 * Math.pow(100, random.nextDouble());
@@ -46,7 +50,7 @@ final class World {
     relief = between(1.2, 3) * BAR;
     transfer = Math.pow(10, between(-6.3, -3.5));
     startK = 273.15 + between(1, 18);
-    beer = random.nextBoolean();
+    beer = random.nextBoolean() || ferments;
     ambientPa = 101_325 + AMBIENT_U95_PA / 2 * random.nextGaussian();
     instruments = Instruments.draw(random, GAUGE_U95_PA, THERMOMETER_U95_K);
     double gasTime = Math.pow(10, between(1.5, 2.7));

@@ -69,6 +69,10 @@ public final class BankFilter {
         medium.co2Share());
   }
 
+  private double solubility(Bank.Setting setting) {
+    return medium.solubility(setting.kelvin(), setting.paAbsolute());
+  }
+
   /** Lets time pass up to a reading, and weighs and corrects every filter by it. */
   public Bank step(Bank bank, Look look) {
     Bank.Setting before = bank.setting;
@@ -78,7 +82,7 @@ public final class BankFilter {
     double[] weights = bank.weights.clone();
     boolean shaken = mixes && Math.abs(before.drift()) > DRIFT_LIMIT;
     if (mixes) {
-      Mixer mixer = new Mixer();
+      Mixer mixer = new Mixer(solubility(before));
       mixer.mix(
           filters, weights, shaken ? prior.whenNothingFits() : prior.transitions(unmixed), shaken);
       mixer.mixPaces(filters, weights, unmixed);
@@ -249,7 +253,7 @@ public final class BankFilter {
   public Bank valveWorked(Bank bank) {
     double[] filters = bank.filters.clone();
     double[] weights = bank.weights.clone();
-    new Mixer().mix(filters, weights, prior.afterValve(), true);
+    new Mixer(solubility(bank.setting)).mix(filters, weights, prior.afterValve(), true);
     return new Bank(filters, weights, bank.setting);
   }
 }

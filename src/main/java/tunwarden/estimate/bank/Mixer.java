@@ -26,7 +26,13 @@ final class Mixer {
   private final Gaussian into = new Gaussian();
   private final double[] share = new double[MODES];
   private final double[] total = new double[MODES];
+  private final double solubility;
   private final double[] shift = new double[Gaussian.STATES];
+
+  /** Works at a solubility, kg/m3/Pa. */
+  Mixer(double solubility) {
+    this.solubility = solubility;
+  }
 
   /**
    * Mixes every cell of the bank in place.
@@ -50,7 +56,7 @@ final class Mixer {
     double[] next = new double[MODES];
     for (int target = 0; target < MODES; target++) {
       for (int m = 0; m < MODES; m++) {
-        next[target] += weights[cell + m] * transitions[m][target];
+        next[target] += weights[cell + m] * transitions[m][target] * purged(cell, m, target);
       }
     }
     boolean[] yields = new boolean[MODES];
@@ -72,6 +78,12 @@ final class Mixer {
       }
       weights[cell + m] = Math.max(next[m], FLOOR);
     }
+  }
+
+  /** Whoever makes gas has mostly swept the air out already. */
+  private static double purged(int cell, int mode, int target) {
+    boolean begins = target == Grid.MAKING && mode != target;
+    return begins && Grid.airOf(cell) > 0 ? 0.1 : 1;
   }
 
   /** Moment-matched mixture of what comes from the other modes. */
@@ -108,6 +120,9 @@ final class Mixer {
             || (mode == Grid.HELD && target == Grid.MAKING && one.mean[Gaussian.SOURCE] > 0);
     if (!keeps) {
       Prior.beginSource(one, target);
+    }
+    if (mode == Grid.HELD && target == Grid.MAKING) {
+      Prior.nearRest(one, solubility);
     }
   }
 

@@ -22,8 +22,14 @@ final class Prior {
   private static final double KL_LN_SD = 1.6;
   private static final double EVEN_SHARE = 0.8;
   private static final double[] AIR_SHARE = {0.97, 0.01, 0.01, 0.01};
+
+  /** No drink follows a relation better than this, whatever the relation claims. */
+  private static final double LEAST_RELATION_U = 0.013;
+
   private static final double SOLUBILITY_PER_K = 0.03;
   private static final double FIRST_READING_PA = 200;
+  private static final double MAKING_SURPLUS = 0.06;
+  private static final double MAKING_SURPLUS_SD = 0.08;
   private static final double NEAR_ATMOSPHERE_PA = 8_000;
   private static final double DAY_S = 86_400;
 
@@ -66,7 +72,7 @@ final class Prior {
   }
 
   private double[] modes() {
-    double making = ferments() ? 0.02 : 0;
+    double making = 0.02 * makingShare();
     double leaking = 0.002;
     double held =
         switch (vessel.closure()) {
@@ -81,6 +87,11 @@ final class Prior {
     modes[CLOSED] = (1 - held) * 0.005;
     modes[STILL] = (1 - held) * (0.995 - making - leaking);
     return modes;
+  }
+
+  /** A drink that should not ferment may do so all the same. */
+  private double makingShare() {
+    return ferments() ? 1 : 0.1;
   }
 
   boolean ferments() {
@@ -100,7 +111,9 @@ final class Prior {
     double gasPa = Math.max(dryPa - airPa, 0.02 * dryPa);
     double headU = 0.5 * accuracy.fillU95M3() / headspaceM3();
     double relationU =
-        Math.hypot(medium.relationU(), SOLUBILITY_PER_K * 0.5 * accuracy.temperatureU95K());
+        Math.hypot(
+            Math.max(medium.relationU(), LEAST_RELATION_U),
+            SOLUBILITY_PER_K * 0.5 * accuracy.temperatureU95K());
     double biasU = 0.5 * Math.hypot(accuracy.pressureU95Pa(), vessel.site().ambientU95Pa());
     x.addVariance(Gaussian.FILL, square(Math.min(headU, 0.5)));
     x.addVariance(Gaussian.RELATION, square(relationU));
@@ -127,6 +140,20 @@ final class Prior {
     } else if (mode == LEAKING) {
       x.addVariance(Gaussian.SOURCE, LEAK_SD * LEAK_SD);
     }
+  }
+
+  /** A drink that makes gas under a held pressure is never far from rest, a little above it. */
+  static void nearRest(Gaussian x, double solubility) {
+    double share = 1 + MAKING_SURPLUS;
+    double slope = share * solubility * Math.exp(x.mean[Gaussian.RELATION]);
+    double[] gas = new double[Gaussian.STATES];
+    double[] liquid = new double[Gaussian.STATES];
+    gas[Gaussian.GAS] = 1;
+    liquid[Gaussian.GAS] = slope;
+    liquid[Gaussian.RELATION] = slope * x.mean[Gaussian.GAS];
+    x.mixRows(gas, liquid);
+    x.mean[Gaussian.LIQUID] = slope * x.mean[Gaussian.GAS];
+    x.addVariance(Gaussian.LIQUID, square(MAKING_SURPLUS_SD * x.mean[Gaussian.LIQUID]));
   }
 
   /** The first reading fixes the sum of CO2, air and bias. */
@@ -160,7 +187,7 @@ final class Prior {
       return new double[] {1, 0.004};
     }
     if (mode == MAKING) {
-      return new double[] {1.1, 0.15};
+      return new double[] {1.06, 0.1};
     }
     return switch (vessel.closure()) {
       case SPUNDING -> new double[] {1.05, 0.2};
@@ -170,7 +197,7 @@ final class Prior {
         if (paGauge < NEAR_ATMOSPHERE_PA) {
           yield new double[] {1.2, 0.5};
         }
-        yield ferments() ? new double[] {0.8, 0.4} : new double[] {0.6, 0.33};
+        yield ferments() ? new double[] {0.75, 0.37} : new double[] {0.6, 0.33};
       }
     };
   }
@@ -183,36 +210,36 @@ final class Prior {
   double[][] transitions(double seconds) {
     double slow = Math.min(0.2, seconds / (5 * DAY_S));
     double toHeld = vessel.closure() == Closure.SEALED ? 0.1 * slow : slow;
-    double toMaking = ferments() ? 0.3 * slow : 0;
+    double toMaking = 0.3 * slow * makingShare();
     return rows(
         new double[] {0, toHeld, toMaking, 0.05 * slow, 0},
-        new double[] {0, 0, 3 * toMaking, 0.01 * slow, 3 * slow},
+        new double[] {0, 0, 6 * toMaking, 0, 3 * slow},
         new double[] {slow, toHeld, 0, 0, 0},
         new double[] {slow, toHeld, 0, 0, 0},
-        new double[] {0.1 * slow, toHeld, toMaking, 0.01 * slow, 0});
+        new double[] {0.1 * slow, toHeld, toMaking, 0, 0});
   }
 
   /** The same after somebody has worked a valve. */
   double[][] afterValve() {
-    double making = ferments() ? 0.05 : 0;
+    double making = 0.05 * makingShare();
     double held = vessel.closure() == Closure.SEALED ? 0.05 : 0.38;
     return rows(
         new double[] {0, held, 0.4 * making, 0.001, 0},
-        new double[] {0, 0, making, 0.001, 0.6},
+        new double[] {0, 0, making, 0, 0.6},
         new double[] {0.05, held, 0, 0, 0},
         new double[] {0.5, held, 0, 0, 0},
-        new double[] {0.05, held, 0.4 * making, 0.001, 0});
+        new double[] {0.05, held, 0.4 * making, 0, 0});
   }
 
   /** The same when no filter explains the readings any more. */
   double[][] whenNothingFits() {
-    double making = ferments() ? 0.05 : 0;
+    double making = 0.05 * makingShare();
     return rows(
         new double[] {0, 0.02, making, 0.02, 0},
-        new double[] {0, 0, 2 * making, 0.001, 0.2},
+        new double[] {0, 0, 6 * making, 0, 0.15},
         new double[] {0.05, 0.05, 0, 0, 0.05},
         new double[] {0.05, 0.05, 0, 0, 0},
-        new double[] {0, 0.02, making, 0.002, 0});
+        new double[] {0, 0.02, making, 0, 0});
   }
 
   private static double[][] rows(double[]... rows) {

@@ -7,8 +7,8 @@ package tunwarden.estimate.gate;
  * @param timeMs time of the newest accepted reading
  * @param value its value
  * @param earlier the value before it
- * @param restless share of readings that differed from both before them, learnt while it moved; a
- *     coarse signal that flickers between two steps stays at zero
+ * @param restless share of readings that turned back on the one before to a new value, learnt while
+ *     it moved; a coarse signal that flickers between two steps or only drifts stays at zero
  * @param sameRun readings in a row without any change
  * @param sameSinceMs when that run began
  * @param strayMs time of the newest reading refused for its time or rate; 0 for none
@@ -37,8 +37,8 @@ public record Track(
       return new Track(true, newTimeMs, newValue, newValue, 0, 0, newTimeMs, 0, 0, 0);
     }
     boolean same = newValue == value;
-    boolean flickers = same || newValue == earlier;
-    double learnt = restless + LEARNING * ((flickers ? 0 : 1) - restless);
+    boolean turns = (newValue - value) * (value - earlier) < 0 && newValue != earlier;
+    double learnt = restless + LEARNING * ((turns ? 1 : 0) - restless);
     return new Track(
         true,
         newTimeMs,
