@@ -24,7 +24,7 @@ import tunwarden.serve.TokenFile;
     name = "headless",
     description = {
       "Watches, records, raises alarms and sends word with nobody at the screen, until stopped.",
-      "Reads the cellar file again when it changes or on SIGHUP."
+      "Reads the cellar file again when it changes."
     },
     mixinStandardHelpOptions = true,
     sortOptions = false,

@@ -40,12 +40,7 @@ public final class Server implements Closeable {
    */
   public Server(InetSocketAddress address, Optional<String> token, Served served)
       throws IOException {
-    if (!address.getAddress().isLoopbackAddress() && token.isEmpty()) {
-      throw new BadInputException(
-          address.getAddress().getHostAddress()
-              + " can be reached from other computers; give --token-file, or serve on "
-              + ServeAddress.USUAL);
-    }
+    check(address, token);
     limit("sun.net.httpserver.maxReqTime", "5");
     limit("sun.net.httpserver.maxRspTime", "30");
     limit("sun.net.httpserver.maxReqHeaders", "60");
@@ -74,6 +69,20 @@ public final class Server implements Closeable {
     http.setExecutor(threads);
     http.createContext("/", this::answer);
     http.start();
+  }
+
+  /**
+   * Whether an address may be served on at all.
+   *
+   * @throws BadInputException when it is open to others without a token
+   */
+  public static void check(InetSocketAddress address, Optional<String> token) {
+    if (!address.getAddress().isLoopbackAddress() && token.isEmpty()) {
+      throw new BadInputException(
+          address.getAddress().getHostAddress()
+              + " can be reached from other computers; give --token-file, or serve on "
+              + ServeAddress.USUAL);
+    }
   }
 
   private static void limit(String property, String value) {

@@ -90,6 +90,7 @@ public final class Headless implements AutoCloseable {
   public void start() throws IOException {
     Cellar cellar = CellarFile.read(plan.cellarFile());
     cellarWatch = new CellarWatch(plan.cellarFile());
+    plan.serve().ifPresent(address -> Server.check(address, plan.token()));
     recorder = Recorder.open(plan.data(), disk, cellar.recording(), clock);
     try {
       begin(cellar);
@@ -112,7 +113,7 @@ public final class Headless implements AutoCloseable {
     notifier = notifier(cellar);
     resume(cellar, saved);
     recorder.start();
-    say("start", "Watching " + cellar.vessels().size() + " vessels of " + cellar.file() + ".");
+    say("start", "Watching " + cellar.vessels().size() + " vessel(s) of " + cellar.file() + ".");
     if (plan.serve().isPresent()) {
       server = Optional.of(new Server(plan.serve().get(), plan.token(), served(events)));
       server.ifPresent(s -> console.accept("Serving on http:/" + s.address() + "/"));
@@ -264,7 +265,7 @@ public final class Headless implements AutoCloseable {
       Channels.of(cellar, System.getenv());
       change(next);
       report(AlarmKind.CONFIGURATION, false, "");
-      say("reload", "The cellar file was read again: " + cellar.vessels().size() + " vessels.");
+      say("reload", "The cellar file was read again: " + cellar.vessels().size() + " vessel(s).");
     } catch (BadInputException | IOException bad) {
       String text = "The cellar file was not taken: " + bad.getMessage();
       report(AlarmKind.CONFIGURATION, true, text);

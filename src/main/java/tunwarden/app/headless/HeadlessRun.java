@@ -24,20 +24,16 @@ public final class HeadlessRun {
             });
     headless.start();
     CountDownLatch stopped = new CountDownLatch(1);
-    Runtime.getRuntime()
-        .addShutdownHook(
-            new Thread(
-                () -> {
-                  headless.close();
-                  stopped.countDown();
-                },
-                "stop"));
-    HangUp.onSignal(headless::reload);
+    // Ending begins here, before the virtual machine's own shutdown: the serial library closes its
+    // ports in a shutdown hook, which would look like a pulled plug.
+    Signals.on("TERM", stopped::countDown);
+    Signals.on("INT", stopped::countDown);
+    Runtime.getRuntime().addShutdownHook(new Thread(headless::close, "stop"));
     try {
       stopped.await();
     } catch (InterruptedException e) {
       Thread.currentThread().interrupt();
-      headless.close();
     }
+    headless.close();
   }
 }

@@ -24,6 +24,7 @@ final class Watching implements AutoCloseable {
   private final Station station;
   private final StationLoop loop;
   private final List<PortRunner> ports = new ArrayList<>();
+  private volatile boolean closing;
 
   /**
    * Prepares everything; nothing is opened yet.
@@ -37,9 +38,17 @@ final class Watching implements AutoCloseable {
         new Station(cellar.vessels(), Estimators.standard(), Assembly.FORECASTS, pacing, sinks);
     List<PortPlan> plans = PortPlans.of(cellar);
     this.loop = new StationLoop(station, clock);
-    Consumer<Sample> inlet = PairGate.over(plans, loop.inlet());
+    Consumer<Sample> open = loop.inlet();
+    Consumer<Sample> inlet = PairGate.over(plans, sample -> take(sample, open));
     for (PortPlan plan : plans) {
       ports.add(new PortRunner(plan, links, inlet, clock));
+    }
+  }
+
+  /** A port that is being closed has nothing to say about its instruments. */
+  private void take(Sample sample, Consumer<Sample> inlet) {
+    if (!closing) {
+      inlet.accept(sample);
     }
   }
 
@@ -63,6 +72,7 @@ final class Watching implements AutoCloseable {
   /** Ports first, side by side, so that nothing more comes in; then the loop, which empties. */
   @Override
   public void close() {
+    closing = true;
     List<Thread> closers = new ArrayList<>();
     for (PortRunner port : ports) {
       Thread closer = new Thread(port::close, "close port");

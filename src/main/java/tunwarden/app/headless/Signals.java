@@ -6,22 +6,23 @@ import org.slf4j.Logger;
 import org.slf4j.LoggerFactory;
 
 /**
- * Runs a task on SIGHUP where the system knows that signal. Reached by reflection, since the class
- * is not part of the standard library and may be absent.
+ * Runs a task on a signal where the system knows it. Reached by reflection, since the class is not
+ * part of the standard library and may be absent.
  */
-final class HangUp {
-  private static final Logger LOG = LoggerFactory.getLogger(HangUp.class);
+final class Signals {
+  private static final Logger LOG = LoggerFactory.getLogger(Signals.class);
 
-  private HangUp() {}
+  private Signals() {}
 
-  static void onSignal(Runnable task) {
+  /** Runs the task, on a thread of its own, whenever the signal {@code TERM}, {@code INT} comes. */
+  static void on(String name, Runnable task) {
     try {
       Class<?> signal = Class.forName("sun.misc.Signal");
       Class<?> handler = Class.forName("sun.misc.SignalHandler");
-      Object hangUp = signal.getConstructor(String.class).newInstance("HUP");
+      Object wanted = signal.getConstructor(String.class).newInstance(name);
       Object doer =
           Proxy.newProxyInstance(
-              HangUp.class.getClassLoader(),
+              Signals.class.getClassLoader(),
               new Class<?>[] {handler},
               (proxy, method, arguments) -> {
                 if (method.getName().equals("handle")) {
@@ -29,11 +30,11 @@ final class HangUp {
                 }
                 return null;
               });
-      signal.getMethod("handle", signal, handler).invoke(null, hangUp, doer);
+      signal.getMethod("handle", signal, handler).invoke(null, wanted, doer);
     } catch (ReflectiveOperationException | IllegalArgumentException absent) {
       Throwable cause =
           absent instanceof InvocationTargetException e ? e.getTargetException() : absent;
-      LOG.info("no reload on SIGHUP here: {}", cause.toString());
+      LOG.info("SIG{} is not listened to here: {}", name, cause.toString());
     }
   }
 }
