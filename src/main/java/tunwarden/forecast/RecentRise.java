@@ -11,10 +11,12 @@ import java.util.OptionalDouble;
  *
  * @param before the completed hour; null before there is one
  * @param present the hour that goes on; null before any reading
+ * @param keptPaPerS what the hours before told, Pa/s, until the present one is long enough; NaN
+ *     before that
  */
-public record RecentRise(Hour before, Hour present) {
+public record RecentRise(Hour before, Hour present, double keptPaPerS) {
   /** Nothing seen yet. */
-  public static final RecentRise NONE = new RecentRise(null, null);
+  public static final RecentRise NONE = new RecentRise(null, null, Double.NaN);
 
   private static final Duration LENGTH = Duration.ofHours(1);
   private static final Duration LEAST = Duration.ofMinutes(20);
@@ -52,25 +54,22 @@ public record RecentRise(Hour before, Hour present) {
   /** With one more reading, Pa gauge. */
   public RecentRise seen(Instant at, double paGauge) {
     if (present == null || at.isBefore(present.start) || paGauge < present.meanPa() - FALL_PA) {
-      return new RecentRise(null, Hour.of(at, paGauge));
+      return new RecentRise(null, Hour.of(at, paGauge), Double.NaN);
     }
     Duration since = Duration.between(present.start, at);
     if (since.compareTo(LENGTH.multipliedBy(2)) > 0) {
-      return new RecentRise(null, Hour.of(at, paGauge));
+      return new RecentRise(null, Hour.of(at, paGauge), Double.NaN);
     }
     return since.compareTo(LENGTH) < 0
-        ? new RecentRise(before, present.with(at, paGauge))
-        : new RecentRise(present, Hour.of(at, paGauge));
+        ? new RecentRise(before, present.with(at, paGauge), keptPaPerS)
+        : new RecentRise(present, Hour.of(at, paGauge), paPerS().orElse(Double.NaN));
   }
 
   /** Pa/s; empty until an hour and a third have been seen without a fall. */
   public OptionalDouble paPerS() {
-    if (before == null || present == null || present.lastS < LEAST.toSeconds()) {
-      return OptionalDouble.empty();
-    }
-    double seconds = before.secondsUntil(present);
-    return seconds > 0
-        ? OptionalDouble.of((present.meanPa() - before.meanPa()) / seconds)
-        : OptionalDouble.empty();
+    boolean tooShort = before == null || present == null || present.lastS < LEAST.toSeconds();
+    double rate =
+        tooShort ? keptPaPerS : (present.meanPa() - before.meanPa()) / before.secondsUntil(present);
+    return Double.isFinite(rate) ? OptionalDouble.of(rate) : OptionalDouble.empty();
   }
 }

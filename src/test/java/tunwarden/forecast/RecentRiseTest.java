@@ -32,6 +32,11 @@ class RecentRiseTest {
   }
 
   @Test
+  void anHourThatHasJustBegunGoesByTheHoursBefore() {
+    assertEquals(2400.0 / 3600, after(5.1, 2400, 0).paPerS().orElseThrow(), 1e-9);
+  }
+
+  @Test
   void nothingIsSaidTooEarlyOrAfterAFallOrAGap() {
     assertTrue(after(1.2, 2400, 0).paPerS().isEmpty());
     RecentRise rise = after(5.5, 2400, 0);
