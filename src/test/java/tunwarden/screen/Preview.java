@@ -3,7 +3,6 @@ package tunwarden.screen;
 import java.io.OutputStream;
 import java.time.Instant;
 import java.time.temporal.ChronoUnit;
-import java.util.concurrent.atomic.AtomicInteger;
 import tunwarden.screen.model.Board;
 import tunwarden.screen.model.Glyphs;
 import tunwarden.screen.model.Look;
@@ -15,8 +14,6 @@ import tunwarden.units.Display;
 
 /** The dashboard on an invented board, to look at: arguments are origin, theme and glyphs. */
 public final class Preview {
-  private static final AtomicInteger asked = new AtomicInteger();
-
   private Preview() {}
 
   /** Runs until left. */
@@ -28,16 +25,8 @@ public final class Preview {
     Instant start = Instant.now().truncatedTo(ChronoUnit.SECONDS);
     Board board = Boards.three(origin, start);
     Dashboard.run(
-        () -> next(board),
+        () -> Boards.at(board, Instant.now()),
         new RecordingDesk(),
         new DashboardOptions(look, false, true, OutputStream.nullOutputStream()));
-  }
-
-  /** The board at this moment; after the {@code preview.failAfter}th one it breaks, to be tried. */
-  private static Board next(Board board) {
-    if (asked.incrementAndGet() == Integer.getInteger("preview.failAfter", -1)) {
-      throw new IllegalStateException("the invented board broke");
-    }
-    return Boards.at(board, Instant.now());
   }
 }

@@ -18,13 +18,12 @@ final class Console extends UnixTerminal {
   private static final Pattern ROWS_AND_COLUMNS = Pattern.compile("(\\d+)\\s+(\\d+)\\s*");
 
   private volatile Runnable beforeLeaving = () -> {};
+  private volatile TerminalSize known;
 
   Console(InputStream in, OutputStream out) throws IOException {
     super(in, out, StandardCharsets.UTF_8, CtrlCBehaviour.TRAP);
     // Without these, Control-Z would leave a shell inside our screen, and Control-S would stop it.
-    runSTTYCommand("susp", "undef");
-    runSTTYCommand("quit", "undef");
-    runSTTYCommand("-ixon");
+    runSTTYCommand("susp", "undef", "quit", "undef", "-ixon");
   }
 
   /** What must have stopped before the terminal is given back. */
@@ -32,8 +31,27 @@ final class Console extends UnixTerminal {
     beforeLeaving = action;
   }
 
+  /** Asking the driver starts a process, so it is asked again only when it says so. */
+  @Override
+  protected void registerTerminalResizeListener(Runnable listener) throws IOException {
+    super.registerTerminalResizeListener(
+        () -> {
+          known = null;
+          listener.run();
+        });
+  }
+
   @Override
   protected TerminalSize findTerminalSize() throws IOException {
+    TerminalSize size = known;
+    if (size == null) {
+      size = askDriver();
+      known = size;
+    }
+    return size;
+  }
+
+  private TerminalSize askDriver() throws IOException {
     Matcher size = ROWS_AND_COLUMNS.matcher(runSTTYCommand("size"));
     if (!size.matches()) {
       return super.findTerminalSize();

@@ -80,7 +80,6 @@ class ByteBudgetTest {
       }
     }
     int mean = sent / (SECONDS - 1);
-    System.out.println(page + ": " + mean + " bytes/s on average, " + most + " at most");
     assertTrue(mean <= MOST_BYTES_PER_S, page + ": " + mean + " bytes/s, most " + most);
   }
 
