@@ -4,7 +4,6 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 import tunwarden.reading.Quantity;
-import tunwarden.units.Constants;
 import tunwarden.units.Extract;
 import tunwarden.units.Kind;
 import tunwarden.units.Unit;
@@ -148,16 +147,5 @@ public record CellUnit(
       return symbol + (absolute ? " absolute" : " gauge");
     }
     return kind == Kind.TEMPERATURE && offset != 0 || symbol.equals("F") ? "°" + symbol : symbol;
-  }
-
-  /** Plausible range in SI for a quantity of this kind in a cellar; outside it is a misreading. */
-  static boolean isPlausible(Quantity quantity, double si) {
-    return switch (quantity) {
-      case PRESSURE -> si > -1.1e5 && si < 1e7;
-      case BAROMETER -> si > 4e4 && si < 1.2e5;
-      case TEMPERATURE, HEADSPACE_TEMPERATURE ->
-          si > Constants.ZERO_CELSIUS_K - 60 && si < Constants.ZERO_CELSIUS_K + 160;
-      default -> true;
-    };
   }
 }

@@ -38,8 +38,6 @@ final class RoleWords {
           "recorded",
           "when",
           "czas");
-  private static final Set<String> CLOCK =
-      Set.of("time", "uhrzeit", "heure", "hora", "ora", "tijd");
   private static final Set<String> PRESSURE =
       Set.of(
           "pressure",
@@ -146,10 +144,6 @@ final class RoleWords {
 
   static boolean isTime(String header) {
     return any(HeaderText.wordsOf(header), TIME);
-  }
-
-  static boolean isClock(String header) {
-    return any(HeaderText.wordsOf(header), CLOCK);
   }
 
   static boolean isVessel(String header) {
