@@ -12,6 +12,7 @@ import org.slf4j.Logger;
 import org.slf4j.LoggerFactory;
 import tunwarden.reading.Quality;
 import tunwarden.reading.Quantity;
+import tunwarden.reading.Reading;
 import tunwarden.reading.Sample;
 import tunwarden.wire.measure.Measure;
 import tunwarden.wire.measure.Samples;
@@ -96,7 +97,7 @@ final class Desk {
     }
     Duration half = slot.binding.trim().period().dividedBy(2);
     return Duration.between(slot.latest.time(), now).compareTo(half) < 0
-        && slot.latest instanceof tunwarden.reading.Reading;
+        && slot.latest instanceof Reading;
   }
 
   private void emit(Slot slot, Sample sample) {

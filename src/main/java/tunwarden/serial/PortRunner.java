@@ -88,6 +88,7 @@ public final class PortRunner implements AutoCloseable {
       } catch (RuntimeException e) {
         LOG.error("reading {} failed", plan.port(), e);
         tally.trouble(Trouble.BROKEN, String.valueOf(e.getMessage()), clock.instant());
+        become(LinkState.LOST, "reading failed, trying again: " + e.getMessage());
       }
       pauseMs = tally.messages() > messagesBefore ? FIRST_PAUSE_MS : longer(pauseMs);
       pause(pauseMs);

@@ -1,6 +1,7 @@
 package tunwarden.serial;
 
 import com.fazecast.jSerialComm.SerialPort;
+import java.util.Arrays;
 
 /**
  * One opening of one port. After an unplug the library goes on saying "open", reads −1 and writes
@@ -51,7 +52,7 @@ final class SerialLink implements ByteLink {
   public void write(byte[] bytes) throws PortException {
     int sent = 0;
     for (int tries = 0; sent < bytes.length; tries++) {
-      byte[] rest = java.util.Arrays.copyOfRange(bytes, sent, bytes.length);
+      byte[] rest = Arrays.copyOfRange(bytes, sent, bytes.length);
       int count = port.writeBytes(rest, rest.length);
       if (count <= 0 || tries > bytes.length) {
         throw gone();

@@ -36,11 +36,11 @@ import tunwarden.wire.simulate.PlayedInstrument;
  * Pressure and temperature stand far apart here, so that two requests of one instrument are needed.
  */
 class ModbusFaultsOverPtyTest {
-  private static final Duration SOON = Duration.ofSeconds(4);
+  private static final Duration SOON = Duration.ofSeconds(8);
   private static final String PROFILE =
       """
       {"name": "far", "title": "two blocks", "speaks": "modbus-rtu", "period": "100 ms",
-       "timeout": "80 ms", "retries": 1,
+       "timeout": "150 ms", "retries": 1,
        "fields": {
         "P": {"measures": "pressure", "unit": "bar", "accuracy": "1 mbar",
               "range": ["0 bar", "10 bar"],
@@ -143,8 +143,8 @@ class ModbusFaultsOverPtyTest {
               byte[] answer = right(r);
               return List.of(
                   Piece.now(Arrays.copyOfRange(answer, 0, 3)),
-                  new Piece(30, Arrays.copyOfRange(answer, 3, 4)),
-                  new Piece(30, Arrays.copyOfRange(answer, 4, answer.length)));
+                  new Piece(10, Arrays.copyOfRange(answer, 3, 4)),
+                  new Piece(10, Arrays.copyOfRange(answer, 4, answer.length)));
             });
     assertTrue(health.traffic().troubles().isEmpty(), health.traffic()::toString);
   }
@@ -178,7 +178,7 @@ class ModbusFaultsOverPtyTest {
   }
 
   @ParameterizedTest
-  @ValueSource(ints = {90, 140, 200, 260, 330})
+  @ValueSource(ints = {170, 260, 380, 490, 620})
   void aLateAnswerIsNeverTakenForAnotherRegister(int delayMs) {
     survives((n, r) -> List.of(new Piece(n % 4 == 1 ? delayMs : 0, right(r))));
   }

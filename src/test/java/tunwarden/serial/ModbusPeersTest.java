@@ -46,10 +46,7 @@ class ModbusPeersTest {
    * Whole numbers in mbar and hundredths of a degree, on the line settings of the float profile.
    */
   private static Profile scaled() {
-    String text =
-        Profiles.shippedText("modbus-rtu-scaled")
-            .replace("9600", "19200")
-            .replace("\"scale\": 0.1", "\"scale\": 0.1");
+    String text = Profiles.shippedText("modbus-rtu-scaled").replace("9600", "19200");
     return ProfileReader.read(text, "scaled");
   }
 

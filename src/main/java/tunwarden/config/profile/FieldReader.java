@@ -5,6 +5,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import tunwarden.units.BadQuantityException;
 import tunwarden.units.Kind;
 import tunwarden.units.Pressure;
 import tunwarden.units.Quantities;
@@ -139,7 +140,7 @@ final class FieldReader {
   private Pressure pressure(String key, String text) {
     try {
       return Pressure.parse(text);
-    } catch (tunwarden.units.BadQuantityException e) {
+    } catch (BadQuantityException e) {
       throw at.bad(key, "is wrong: " + e.getMessage());
     }
   }

@@ -7,6 +7,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.TreeSet;
 import tunwarden.units.BadInputException;
+import tunwarden.units.BadQuantityException;
 import tunwarden.units.Kind;
 import tunwarden.units.Pressure;
 import tunwarden.units.Quantities;
@@ -104,17 +105,6 @@ record JsonAt(String file, String path, JsonNode node) {
     return (int) value;
   }
 
-  boolean flag(String key, boolean otherwise) {
-    JsonNode value = node.get(key);
-    if (value == null) {
-      return otherwise;
-    }
-    if (!value.isBoolean()) {
-      throw bad(key, "must be true or false");
-    }
-    return value.booleanValue();
-  }
-
   /** The choice with that word, out of a table from word to choice. */
   <T> T choice(String key, Map<String, T> choices, String otherwise) {
     String word = otherwise == null ? text(key) : text(key, otherwise);
@@ -156,7 +146,7 @@ record JsonAt(String file, String path, JsonNode node) {
         throw bad(key, "is " + text + "; write it as the unit of the field does, as in " + letter);
       }
       return pressure.pa();
-    } catch (tunwarden.units.BadQuantityException e) {
+    } catch (BadQuantityException e) {
       throw bad(key, "is wrong: " + e.getMessage());
     }
   }
@@ -164,7 +154,7 @@ record JsonAt(String file, String path, JsonNode node) {
   double quantity(String key, String text, Kind kind) {
     try {
       return Quantities.parse(text, kind);
-    } catch (tunwarden.units.BadQuantityException e) {
+    } catch (BadQuantityException e) {
       throw bad(key, "is wrong: " + e.getMessage());
     }
   }

@@ -114,7 +114,7 @@ public final class ProfileReader {
   }
 
   private static LineSettings line(JsonAt at) {
-    at.allow("baud", "data-bits", "parity", "stop-bits", "flow", "dtr", "rs485", "echo", "settle");
+    at.allow("baud", "data-bits", "parity", "stop-bits", "flow", "dtr", "rs485", "settle");
     Map<String, LineSettings.Flow> flows =
         Map.of(
             "none", LineSettings.Flow.NONE,
@@ -128,8 +128,7 @@ public final class ProfileReader {
         at.choice("flow", flows, "none"),
         new LineSettings.Wires(
             at.choice("dtr", Map.of("on", true, "off", false), "on"),
-            at.choice("rs485", table(LineSettings.Rs485.values(), ProfileReader::lower), "leave"),
-            at.flag("echo", false)),
+            at.choice("rs485", table(LineSettings.Rs485.values(), ProfileReader::lower), "leave")),
         duration(at, "settle", "0 s", 0));
   }
 

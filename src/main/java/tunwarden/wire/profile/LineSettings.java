@@ -49,11 +49,10 @@ public record LineSettings(
    * @param dtr whether DTR and RTS are raised on opening; lowering them keeps some boards from
    *     restarting
    * @param rs485 who switches the RS-485 driver
-   * @param echo whether the adapter sends back what is written
    */
-  public record Wires(boolean dtr, Rs485 rs485, boolean echo) {
-    /** DTR raised, RS-485 left alone, no echo. */
-    public static final Wires USUAL = new Wires(true, Rs485.LEAVE, false);
+  public record Wires(boolean dtr, Rs485 rs485) {
+    /** DTR raised, RS-485 left alone. */
+    public static final Wires USUAL = new Wires(true, Rs485.LEAVE);
   }
 
   /** Bits on the wire for one character: start, data, parity, stop. */
