@@ -38,8 +38,8 @@ class CrashTest {
   private int killedWhileWriting;
 
   @Test
-  void nothingReportedIsLostInThirtyKills() throws Exception {
-    killMany(30, 20260302);
+  void nothingReportedIsLostInTwentyKills() throws Exception {
+    killMany(20, 20260302);
   }
 
   @Test
