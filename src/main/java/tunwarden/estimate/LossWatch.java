@@ -12,6 +12,7 @@ import tunwarden.estimate.bank.Reader;
 final class LossWatch {
   private static final double CERTAIN = 0.9;
   private static final double PATIENCE_S = 1800;
+  private static final double LEAST_FALL_PA_PER_HOUR = 200;
   private static final double STRAIN = 3.0;
   private static final double STRAIN_S = 3600;
 
@@ -51,7 +52,7 @@ final class LossWatch {
     double lasted = watch.lossS() + dt;
     double lost = watch.lostKgPerM3() + Math.max(0, rate) * dt;
     watch = watch.withLoss(lasted, lost);
-    if (lasted < PATIENCE_S) {
+    if (lasted < PATIENCE_S || fallPaPerHour(rate) < LEAST_FALL_PA_PER_HOUR) {
       return;
     }
     double kg = lost * medium.fillM3();
@@ -63,6 +64,15 @@ final class LossWatch {
       book =
           book.put(event(EventKind.LEAK, point, point.atS() - startS(old), kg, old.why()), silent);
     }
+  }
+
+  /** How fast the pressure of a vessel at rest falls by such a loss. */
+  private double fallPaPerHour(double rate) {
+    Bank.Setting s = bank.setting();
+    double perPa =
+        medium.solubility(s.kelvin(), s.paAbsolute())
+            + medium.headspace(s.kelvin(), s.paAbsolute(), s.fillKelvin());
+    return 3600 * rate / perPa;
   }
 
   private static double startS(Event event) {
