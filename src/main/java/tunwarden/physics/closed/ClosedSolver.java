@@ -19,7 +19,7 @@ import tunwarden.physics.solubility.PureWater;
 public final class ClosedSolver {
   private static final int GASES = Gas.all().size();
   private static final int MOST_STEPS = 80;
-  private static final double CLOSE_ENOUGH = 1e-10;
+  private static final double CLOSE_ENOUGH = 1e-9;
   private static final double START_PA = 2e5;
   private static final double[] MOLAR_MASS =
       Gas.all().stream().mapToDouble(Gas::molarMass).toArray();
