@@ -36,10 +36,11 @@ public final class WorkedExamples {
 
   /** The footer of a help page: the examples, then what the command itself says. */
   static String footer(Help help) {
-    String heading = help.footerHeading().isEmpty() ? String.format("%nExamples:%n%n") : "";
-    return of(help.commandSpec().qualifiedName())
-        .map(text -> heading + indented(text) + help.footer())
-        .orElseGet(help::footer);
+    String stated = help.footerHeading();
+    String heading = stated.isEmpty() ? String.format("%nExamples:%n%n") : stated;
+    String own = of(help.commandSpec().qualifiedName()).map(WorkedExamples::indented).orElse("");
+    String all = own + help.footer();
+    return all.isEmpty() ? "" : heading + all;
   }
 
   private static String indented(String text) {
