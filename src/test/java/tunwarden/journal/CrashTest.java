@@ -38,8 +38,8 @@ class CrashTest {
   private int killedWhileWriting;
 
   @Test
-  void nothingReportedIsLostInTwentyKills() throws Exception {
-    killMany(20, 20260302);
+  void nothingReportedIsLostInTwoHundredKills() throws Exception {
+    killMany(200, 20260302);
   }
 
   @Test
