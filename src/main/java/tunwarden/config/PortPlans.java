@@ -12,7 +12,6 @@ import tunwarden.serial.PortPlan;
 import tunwarden.units.BadInputException;
 import tunwarden.wire.profile.Binding;
 import tunwarden.wire.profile.Field;
-import tunwarden.wire.profile.LineSettings;
 import tunwarden.wire.profile.Profile;
 import tunwarden.wire.signal.Calibration;
 
@@ -101,21 +100,11 @@ public final class PortPlans {
   }
 
   private static Profile atSpeed(Profile profile, int baud) {
-    LineSettings line = profile.line();
-    LineSettings faster =
-        new LineSettings(
-            baud,
-            line.dataBits(),
-            line.parity(),
-            line.stopBits(),
-            line.flow(),
-            line.wires(),
-            line.settle());
     return new Profile(
         profile.name(),
         profile.title(),
         profile.speaks(),
-        faster,
+        profile.line().atBaud(baud),
         profile.framing(),
         profile.polling(),
         profile.fields());

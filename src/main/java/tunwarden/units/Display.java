@@ -36,7 +36,8 @@ public record Display(Unit pressure, Unit temperature, Unit gasContent) {
   /** Pressure difference with a leading sign, for distances on the ladder. */
   public String signedPressureNumber(double pa) {
     String text = pressureNumber(Math.abs(pa));
-    return (pa < 0 ? "-" : "+") + text;
+    boolean zero = text.chars().noneMatch(c -> c >= '1' && c <= '9');
+    return (pa < 0 && !zero ? "-" : "+") + text;
   }
 
   /** Gauge pressure with its unit: {@code 0.88 bar g}. */

@@ -87,6 +87,8 @@ class QuantitiesTest {
   @Test
   void nothingIsEverMinusZeroOrNotANumber() {
     assertEquals("0.00", Display.number(-0.001, 2));
+    assertEquals("+0.00", Display.METRIC.signedPressureNumber(-10));
+    assertEquals("-0.01", Display.METRIC.signedPressureNumber(-1000));
     assertEquals("?", Display.number(Double.NaN, 2));
   }
 

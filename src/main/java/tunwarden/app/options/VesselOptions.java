@@ -83,7 +83,7 @@ public final class VesselOptions {
     if (fillM3 > volumeM3) {
       throw new BadInputException("--fill: the fill is larger than the volume; check both");
     }
-    return build(id, volumeM3, fillM3, instruments.accuracy(volumeM3));
+    return build(id, "", volumeM3, fillM3, instruments.accuracy(volumeM3));
   }
 
   /**
@@ -94,7 +94,7 @@ public final class VesselOptions {
     if (volumeM3 != null || fillM3 != null) {
       return vessel(id);
     }
-    return build(id, 1, NOMINAL_FILL, instruments.accuracy(1));
+    return build(id, "size not stated", 1, NOMINAL_FILL, instruments.accuracy(1));
   }
 
   /**
@@ -116,7 +116,7 @@ public final class VesselOptions {
     return pressure.gaugePa(site.site().ambientPaAbsolute());
   }
 
-  private Vessel build(String id, double volume, double fill, Accuracy accuracy) {
+  private Vessel build(String id, String title, double volume, double fill, Accuracy accuracy) {
     double ambient = site.site().ambientPaAbsolute();
     Limits stated = limits.limits(ambient);
     Vessel.Contents contents =
@@ -126,7 +126,7 @@ public final class VesselOptions {
             airPaAbsolute == null ? 0 : airPaAbsolute);
     return new Vessel(
         id,
-        "",
+        title,
         volume,
         fill,
         contents,
