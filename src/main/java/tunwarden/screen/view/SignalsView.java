@@ -54,6 +54,38 @@ final class SignalsView {
       }
       y++;
     }
+    whole(canvas, area, y + 1, model);
+  }
+
+  /** Below the table, in whole, what its last column had to cut. */
+  private static void whole(Canvas canvas, Area area, int from, Model model) {
+    int y = from;
+    int room = area.right() - whyColumn(area);
+    for (Instrument i : model.board().instruments()) {
+      if (i.words().length() <= room) {
+        continue;
+      }
+      String text = i.vessel() + " " + i.quantity().word() + ": " + i.words();
+      for (String line : Words.wrap(text, area.columns() - 4)) {
+        if (y >= area.bottom()) {
+          return;
+        }
+        canvas.put(area.x() + 2, y++, line, Role.NORMAL);
+      }
+    }
+  }
+
+  private static int whyColumn(Area area) {
+    int x = area.x() + 2 + VESSEL + QUANTITY + VALUE + GRADE + AGE;
+    return x + (showsCounts(area) ? COUNTS : 0) + (showsSource(area) ? SOURCE : 0);
+  }
+
+  private static boolean showsCounts(Area area) {
+    return area.columns() >= 110;
+  }
+
+  private static boolean showsSource(Area area) {
+    return area.columns() >= 150;
   }
 
   private static String[] cells(Instrument i, Model model) {
@@ -99,8 +131,8 @@ final class SignalsView {
   private static void row(
       Canvas canvas, Area area, int y, String[] cells, Role role, Role gradeRole) {
     int[] widths = {VESSEL, QUANTITY, VALUE, GRADE, AGE, COUNTS, SOURCE};
-    boolean counts = area.columns() >= 110;
-    boolean source = area.columns() >= 150;
+    boolean counts = showsCounts(area);
+    boolean source = showsSource(area);
     int x = area.x() + 2;
     for (int i = 0; i < widths.length; i++) {
       boolean shown = (i != 5 || counts) && (i != 6 || source);
