@@ -18,6 +18,9 @@ import tunwarden.vessel.Closure;
  * refuses what cannot be with a {@link BadInputException} that says what would be right.
  */
 public final class Texts {
+  private static final double LEAST_PLATO = -5;
+  private static final double MOST_PLATO = 50;
+
   private Texts() {}
 
   /** Pa, absolute whatever its unit says: for pressures that have no gauge form. */
@@ -55,6 +58,16 @@ public final class Texts {
       throw new BadQuantityException("'" + text + "' is no opening; write a diameter above zero");
     }
     return metres;
+  }
+
+  /** Extract or gravity of a drink, degrees Plato; finished ferments may lie below water. */
+  public static double gravityPlato(String text) {
+    double plato = Quantities.parse(text, Kind.EXTRACT);
+    if (!(plato >= LEAST_PLATO && plato <= MOST_PLATO)) {
+      throw new BadQuantityException(
+          "'" + text + "' is no drink's extract; write from -5 to 50 P or 0.980 to 1.230 SG");
+    }
+    return plato;
   }
 
   /** Share of a whole, 0..1. */

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import tunwarden.forecast.vent.OrificeFit;
 import tunwarden.physics.gas.GasMix;
 import tunwarden.physics.liquid.BeerMethod;
 import tunwarden.physics.liquid.Liquid;
@@ -59,10 +60,11 @@ final class VesselReader {
         contents,
         section.parsed("closure", Texts::closure).orElse(Closure.INFER),
         limits(),
-        orifice(),
+        orifice(volume),
         site,
         section.quantity("ambient", Texts::kelvin),
-        accuracy(volume, readings));
+        accuracy(volume, readings),
+        ProspectsReader.read(section, site, volume));
   }
 
   private double volume() {
@@ -142,7 +144,7 @@ final class VesselReader {
     return limits.quantity(key, text -> Pressure.parse(text).gaugePa(site.ambientPaAbsolute()));
   }
 
-  private Optional<ReliefOrifice> orifice() {
+  private Optional<ReliefOrifice> orifice(double volume) {
     if (!section.has("relief-valve")) {
       return Optional.empty();
     }
@@ -151,8 +153,17 @@ final class VesselReader {
     OptionalDouble discharge = valve.quantity("kd", Texts::coefficient);
     valve.require("orifice", "\"15 mm\"");
     valve.require("kd", "\"0.6\"");
+    refuseWide(valve, diameter, volume);
     valve.close();
     return Optional.of(new ReliefOrifice(diameter.orElse(0), discharge.orElse(0)));
+  }
+
+  /** An opening that does not go into the vessel. */
+  static void refuseWide(Section section, OptionalDouble diameterM, double volumeM3) {
+    if (diameterM.isPresent()) {
+      OrificeFit.fault(diameterM.getAsDouble(), volumeM3)
+          .ifPresent(sentence -> section.problem("orifice", sentence));
+    }
   }
 
   private Accuracy accuracy(double volume, List<Instrument> readings) {

@@ -11,6 +11,7 @@ import tunwarden.units.Constants;
 import tunwarden.vessel.Accuracy;
 import tunwarden.vessel.Closure;
 import tunwarden.vessel.Limits;
+import tunwarden.vessel.Prospects;
 import tunwarden.vessel.ReliefOrifice;
 import tunwarden.vessel.ReliefSetting;
 import tunwarden.vessel.Room;
@@ -92,7 +93,8 @@ final class Scripts {
           Optional.of(orifice()),
           site,
           OptionalDouble.of(WARM_C + Constants.ZERO_CELSIUS_K),
-          Accuracy.usual(volumeM3));
+          Accuracy.usual(volumeM3),
+          Prospects.NONE);
     }
   }
 

@@ -20,6 +20,7 @@ import tunwarden.physics.liquid.Liquid;
  * @param site where it stands
  * @param warmToK what it would warm to with cooling lost, K, if stated
  * @param accuracy of the instruments and the fill
+ * @param prospects what was told so that more can be forecast
  */
 public record Vessel(
     String id,
@@ -32,7 +33,8 @@ public record Vessel(
     Optional<ReliefOrifice> orifice,
     Site site,
     OptionalDouble warmToK,
-    Accuracy accuracy) {
+    Accuracy accuracy,
+    Prospects prospects) {
 
   /**
    * Liquid and gas of a vessel.
@@ -78,24 +80,35 @@ public record Vessel(
         Optional.empty(),
         Site.SEA_LEVEL,
         OptionalDouble.empty(),
-        Accuracy.usual(volumeM3));
+        Accuracy.usual(volumeM3),
+        Prospects.NONE);
   }
 
   /** The same vessel, differently connected. */
   public Vessel withClosure(Closure other) {
     return new Vessel(
-        id, title, volumeM3, fillM3, contents, other, limits, orifice, site, warmToK, accuracy);
+        id, title, volumeM3, fillM3, contents, other, limits, orifice, site, warmToK, accuracy,
+        prospects);
   }
 
   /** The same vessel with other limits. */
   public Vessel withLimits(Limits other) {
     return new Vessel(
-        id, title, volumeM3, fillM3, contents, closure, other, orifice, site, warmToK, accuracy);
+        id, title, volumeM3, fillM3, contents, closure, other, orifice, site, warmToK, accuracy,
+        prospects);
   }
 
   /** The same vessel with another atmosphere around it. */
   public Vessel withSite(Site other) {
     return new Vessel(
-        id, title, volumeM3, fillM3, contents, closure, limits, orifice, other, warmToK, accuracy);
+        id, title, volumeM3, fillM3, contents, closure, limits, orifice, other, warmToK, accuracy,
+        prospects);
+  }
+
+  /** The same vessel with more told of it. */
+  public Vessel withProspects(Prospects other) {
+    return new Vessel(
+        id, title, volumeM3, fillM3, contents, closure, limits, orifice, site, warmToK, accuracy,
+        other);
   }
 }

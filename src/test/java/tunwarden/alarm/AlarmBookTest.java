@@ -290,7 +290,8 @@ class AlarmBookTest {
             Optional.empty(),
             vessel.site(),
             OptionalDouble.of(297.15),
-            vessel.accuracy());
+            vessel.accuracy(),
+            vessel.prospects());
     fold(Assessments.of(warmed).at(0).warmTo(1.9));
     fold(Assessments.of(warmed).at(60).warmTo(1.9));
     assertEquals(AlarmState.UNACKNOWLEDGED, state(AlarmKind.WARM_UP_WOULD_LIFT));

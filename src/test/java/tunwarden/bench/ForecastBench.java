@@ -75,7 +75,8 @@ public class ForecastBench {
             plain.orifice(),
             plain.site(),
             OptionalDouble.of(COLD_K + 20),
-            plain.accuracy());
+            plain.accuracy(),
+            plain.prospects());
     present =
         new Present(
             vessel,

@@ -21,7 +21,7 @@ class CellarFaultsTest {
         "liquid = \"beer\" | liquid = \"beer\"\\nzzzzzzzzzzzzzz = 1 | line 5,"
             + " vessel.FV2.zzzzzzzzzzzzzz: there is no such key here; known here: readings, title,"
             + " volume, fill, liquid, gas, air, closure, limits, relief-valve, ambient,"
-            + " fill-accuracy",
+            + " fill-accuracy, time-constant, ferment, target, supply, fire-area",
         "fill = \"1800 L\" | fill = \"2100 L\" | line 3, vessel.FV2.fill: the fill is larger than"
             + " the volume; check both",
         "fill = \"1800 L\" | fill = 1800 | line 3, vessel.FV2.fill: write the number with its unit"

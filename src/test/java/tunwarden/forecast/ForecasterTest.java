@@ -39,7 +39,8 @@ class ForecasterTest {
         plain.orifice(),
         plain.site(),
         OptionalDouble.of(WARM_K),
-        plain.accuracy());
+        plain.accuracy(),
+        plain.prospects());
   }
 
   private static Present believed(double bar, double dissolved, double u95, Mode mode) {

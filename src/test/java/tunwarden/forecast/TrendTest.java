@@ -134,7 +134,8 @@ class TrendTest {
         Optional.empty(),
         plain.site(),
         ambientK == null ? OptionalDouble.empty() : OptionalDouble.of(ambientK),
-        plain.accuracy());
+        plain.accuracy(),
+        plain.prospects());
   }
 
   @Test

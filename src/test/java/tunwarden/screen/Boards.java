@@ -193,7 +193,8 @@ public final class Boards {
         plain.orifice(),
         plain.site(),
         plain.warmToK(),
-        plain.accuracy());
+        plain.accuracy(),
+        plain.prospects());
   }
 
   private static VesselBoard noRelief(String id, String title, Instant now) {

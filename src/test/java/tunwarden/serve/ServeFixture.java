@@ -68,7 +68,8 @@ final class ServeFixture {
         plain.orifice(),
         plain.site(),
         plain.warmToK(),
-        plain.accuracy());
+        plain.accuracy(),
+        plain.prospects());
   }
 
   private void give(Assessments assessments) {

@@ -95,6 +95,7 @@ final class World {
         plain.orifice(),
         new Site(101_325, AMBIENT_U95_PA, Optional.empty()),
         OptionalDouble.empty(),
-        new Accuracy(GAUGE_U95_PA, THERMOMETER_U95_K, 0.02 * volumeM3));
+        new Accuracy(GAUGE_U95_PA, THERMOMETER_U95_K, 0.02 * volumeM3),
+        plain.prospects());
   }
 }

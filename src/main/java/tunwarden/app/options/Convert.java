@@ -125,6 +125,13 @@ public abstract class Convert<T> implements ITypeConverter<T> {
     }
   }
 
+  /** Gravity or apparent extract, which may lie below water's: degrees Plato. */
+  public static final class ToGravity extends Convert<Double> {
+    ToGravity() {
+      super(Texts::gravityPlato);
+    }
+  }
+
   /** Share: 0..1. */
   public static final class ToShare extends Convert<Double> {
     ToShare() {

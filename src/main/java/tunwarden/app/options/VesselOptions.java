@@ -10,6 +10,7 @@ import tunwarden.units.Pressure;
 import tunwarden.vessel.Accuracy;
 import tunwarden.vessel.Closure;
 import tunwarden.vessel.Limits;
+import tunwarden.vessel.Prospects;
 import tunwarden.vessel.Vessel;
 
 /** A vessel described on the command line, in place of a cellar file. */
@@ -135,7 +136,8 @@ public final class VesselOptions {
         Optional.empty(),
         site.site(),
         OptionalDouble.empty(),
-        accuracy);
+        accuracy,
+        Prospects.NONE);
   }
 
   private static void require(String option, Object value) {

@@ -25,7 +25,7 @@ final class ReliefSources {
   @Option(
       names = "--extract-drop",
       paramLabel = "EXTRACT",
-      converter = Sealing.ToGravity.class,
+      converter = Convert.ToGravity.class,
       description = {
         "Fermentation: fall of the apparent extract in a day, as '6 P'. Default for a vessel",
         "of a drink that ferments: 10 P, which no ordinary brew exceeds."

@@ -3,7 +3,6 @@ package tunwarden.app.reckon;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import picocli.CommandLine.Command;
-import picocli.CommandLine.ITypeConverter;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 import tunwarden.app.options.Convert;
@@ -16,8 +15,6 @@ import tunwarden.forecast.seal.SealAnswer;
 import tunwarden.forecast.seal.SealQuestion;
 import tunwarden.units.BadInputException;
 import tunwarden.units.Display;
-import tunwarden.units.Kind;
-import tunwarden.units.Quantities;
 
 /** A fermenting vessel closed on paper. */
 @Command(
@@ -28,7 +25,7 @@ final class Sealing extends AnswerCommand {
       names = "--gravity",
       required = true,
       paramLabel = "EXTRACT",
-      converter = ToGravity.class,
+      converter = Convert.ToGravity.class,
       description = "Apparent extract now, as '1.014 SG' or '3.5 P'.")
   private double nowPlato;
 
@@ -36,21 +33,21 @@ final class Sealing extends AnswerCommand {
       names = "--final-gravity",
       required = true,
       paramLabel = "EXTRACT",
-      converter = ToGravity.class,
+      converter = Convert.ToGravity.class,
       description = "Apparent extract when it will have ended.")
   private double finalPlato;
 
   @Option(
       names = "--original-gravity",
       paramLabel = "EXTRACT",
-      converter = ToGravity.class,
+      converter = Convert.ToGravity.class,
       description = "Extract before fermentation. Default: as now.")
   private Double originalPlato;
 
   @Option(
       names = "--extract-drop",
       paramLabel = "EXTRACT",
-      converter = ToGravity.class,
+      converter = Convert.ToGravity.class,
       description = "Fall of the apparent extract in a day, as '1.5 P'. Default: a wide range.")
   private Double dropPlato;
 
@@ -69,22 +66,6 @@ final class Sealing extends AnswerCommand {
   private Double targetK;
 
   @Mixin private PresentOptions present;
-
-  /** Degrees Plato; finished ferments may lie below that of water. */
-  static final class ToGravity implements ITypeConverter<Double> {
-    private static final double LEAST_PLATO = -5;
-    private static final double MOST_PLATO = 50;
-
-    @Override
-    public Double convert(String text) {
-      double plato = Quantities.parse(text, Kind.EXTRACT);
-      if (!(plato >= LEAST_PLATO && plato <= MOST_PLATO)) {
-        throw new BadInputException(
-            "'" + text + "' is no drink's extract; write from -5 to 50 P or 0.980 to 1.230 SG");
-      }
-      return plato;
-    }
-  }
 
   @Override
   void fill(AnswerSheet sheet) {

@@ -100,7 +100,8 @@ class VentTest {
             Optional.empty(),
             TANK.site(),
             TANK.warmToK(),
-            TANK.accuracy());
+            TANK.accuracy(),
+            TANK.prospects());
     VentAnswer answer =
         Vent.of(Ensemble.of(Present.atRest(stout, 2 * BAR, COLD_K)), into(new Room(20, 0), 0));
     double left = answer.room().orElseThrow().leastOxygen();
