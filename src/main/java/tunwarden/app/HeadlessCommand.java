@@ -84,8 +84,7 @@ public final class HeadlessCommand implements Callable<Integer> {
         serve.equals(NOWHERE) ? Optional.empty() : Optional.of(ServeAddress.parse(serve));
     Optional<String> token =
         tokenFile == null ? Optional.empty() : Optional.of(TokenFile.read(tokenFile));
-    HeadlessPlan plan =
-        new HeadlessPlan(cellarFile, data, address, token, HeadlessPlan.USUAL_RESUME);
+    HeadlessPlan plan = new HeadlessPlan(cellarFile, data, address, token);
     HeadlessRun.untilStopped(plan, InstantSource.system(), spec.commandLine().getOut());
     return 0;
   }

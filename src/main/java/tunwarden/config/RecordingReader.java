@@ -21,8 +21,12 @@ final class RecordingReader {
             megabytes(recording, "keep-megabytes").orElse(keep.bytes()),
             megabytes(recording, "leave-free-megabytes").orElse(keep.leastFreeBytes()),
             recording.flag("delete-oldest-for-room").orElse(keep.mayDeleteForRoom()));
+    Optional<Duration> resume = recording.parsed("resume-within", ReadingsReader::duration);
     recording.close();
-    return usual.withFlush(flush.orElse(usual.flush())).withKeep(stated);
+    return usual
+        .withFlush(flush.orElse(usual.flush()))
+        .withKeep(stated)
+        .withResumeWithin(resume.orElse(usual.resumeWithin()));
   }
 
   private static Optional<Long> megabytes(Section recording, String key) {

@@ -83,8 +83,19 @@ public final class DataFolder implements Closeable {
     return root.resolve("notices");
   }
 
+  /** Alarms and shelves as last saved. */
   public Path state() {
     return root.resolve("state.json");
+  }
+
+  /** What the estimator remembers as last saved. */
+  public Path estimatorState() {
+    return root.resolve("estimates.state");
+  }
+
+  /** Where people leave what they want done, see {@link tunwarden.journal.request}. */
+  public Path requests() {
+    return root.resolve("requests");
   }
 
   /** {@code readings/VESSEL/2026-03-02.csv}. */

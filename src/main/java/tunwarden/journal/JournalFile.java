@@ -48,8 +48,14 @@ final class JournalFile {
     return numbered;
   }
 
-  boolean hasWaiting() {
-    return !waiting.isEmpty();
+  /** Entries that are not on the disk yet, oldest first. */
+  List<JournalLines.Numbered> waiting() {
+    return List.copyOf(waiting);
+  }
+
+  /** The number the next entry gets. */
+  long next() {
+    return next;
   }
 
   /** Lines given up for good. */

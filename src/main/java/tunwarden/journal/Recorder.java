@@ -61,6 +61,17 @@ public final class Recorder implements Sink, Closeable {
     void recorded(List<JournalLines.Numbered> entries, boolean durable);
   }
 
+  /** Turns a state into bytes, on the recorder's thread. */
+  @FunctionalInterface
+  public interface StateMaker {
+    /**
+     * The content of the state file.
+     *
+     * @param unwritten journal entries up to this state that are not known to be on the disk
+     */
+    byte[] bytes(List<JournalLines.Numbered> unwritten);
+  }
+
   /** Hears when recording stops and resumes. Called on the recorder's thread. */
   @FunctionalInterface
   public interface DiskWatch {
@@ -90,6 +101,10 @@ public final class Recorder implements Sink, Closeable {
     this.pace = new EstimatePace(settings.estimateEvery());
     this.worker = new RecorderThread(folder, disk, settings, clock, queue);
     this.thread = new Thread(worker::run, "journal");
+    int again = worker.writeAgain(SavedState.unwritten(disk, folder.state()));
+    if (again > 0) {
+      repairs.add(again + " journal line(s) were kept with the state and are written now.");
+    }
     for (String repair : repairs) {
       LOG.warn("{}", repair);
       write(JournalEntry.station(clock.instant(), "repair", repair));
@@ -120,15 +135,31 @@ public final class Recorder implements Sink, Closeable {
 
   /** Puts an entry in the journal as soon as it can be done. Never blocks, never drops. */
   public void write(JournalEntry entry) {
-    worker.urgent(entry);
+    worker.urgent(List.of(entry), null);
+  }
+
+  /**
+   * Puts entries in the journal together with the state that they lead to: after a crash both are
+   * there or neither is. Never blocks, never drops.
+   */
+  public void write(List<JournalEntry> entries, StateMaker state) {
+    worker.urgent(entries, state);
   }
 
   /**
    * Gives the newest state to be saved with the next flush; an older one not yet saved is
-   * forgotten.
+   * forgotten. All that led to it must have been handed in before.
    */
-  public void keepState(Supplier<byte[]> state) {
-    worker.keepState(state);
+  public void keepState(StateMaker state) {
+    worker.urgent(List.of(), state);
+  }
+
+  /**
+   * Gives what the estimator remembers, to be saved with the next flush; made into bytes on the
+   * recorder's thread.
+   */
+  public void keepEstimates(Supplier<byte[]> estimates) {
+    worker.keepEstimates(estimates);
   }
 
   @Override

@@ -10,17 +10,27 @@ import java.time.Duration;
  * @param estimateEvery how often the estimate of a vessel is recorded
  * @param retry how long to wait before a failed disk is tried again
  * @param keep what is kept
+ * @param resumeWithin how old a saved estimate may be to go on from it
  */
 public record RecorderSettings(
-    Duration flush, int queue, Duration estimateEvery, Duration retry, Keep keep) {
-  /** Five seconds, an hour's worth of a small cellar in memory, a minute, half a minute. */
+    Duration flush,
+    int queue,
+    Duration estimateEvery,
+    Duration retry,
+    Keep keep,
+    Duration resumeWithin) {
+  /**
+   * Five seconds, an hour's worth of a small cellar in memory, a minute, half a minute; a night's
+   * silence is bridged, a week's is not.
+   */
   public static final RecorderSettings USUAL =
       new RecorderSettings(
           Duration.ofSeconds(5),
           1 << 16,
           Duration.ofMinutes(1),
           Duration.ofSeconds(30),
-          Keep.USUAL);
+          Keep.USUAL,
+          Duration.ofHours(6));
 
   /**
    * What is kept on the disk.
@@ -37,10 +47,14 @@ public record RecorderSettings(
   }
 
   public RecorderSettings withFlush(Duration other) {
-    return new RecorderSettings(other, queue, estimateEvery, retry, keep);
+    return new RecorderSettings(other, queue, estimateEvery, retry, keep, resumeWithin);
   }
 
   public RecorderSettings withKeep(Keep other) {
-    return new RecorderSettings(flush, queue, estimateEvery, retry, other);
+    return new RecorderSettings(flush, queue, estimateEvery, retry, other, resumeWithin);
+  }
+
+  public RecorderSettings withResumeWithin(Duration other) {
+    return new RecorderSettings(flush, queue, estimateEvery, retry, keep, other);
   }
 }

@@ -10,13 +10,11 @@ import java.util.Deque;
 import java.util.List;
 import java.util.concurrent.BlockingQueue;
 import java.util.concurrent.CopyOnWriteArrayList;
-import java.util.concurrent.atomic.AtomicReference;
 import java.util.concurrent.locks.Condition;
 import java.util.concurrent.locks.ReentrantLock;
 import java.util.function.Supplier;
 import org.slf4j.Logger;
 import org.slf4j.LoggerFactory;
-import tunwarden.journal.disk.AtomicFile;
 import tunwarden.journal.disk.Disk;
 
 /** The one thread that writes. Everything private here is used by it alone, unless said. */
@@ -32,13 +30,16 @@ final class RecorderThread {
   private final RecordFiles files;
   private final Housekeeping housekeeping;
   private final List<Recorder.Listener> listeners = new CopyOnWriteArrayList<>();
-  private final AtomicReference<Supplier<byte[]>> state = new AtomicReference<>();
+  private final StateFiles states;
 
   private final ReentrantLock lock = new ReentrantLock();
   private final Condition woken = lock.newCondition();
 
   /** Guarded by {@link #lock}. */
   private final Deque<JournalEntry> urgent = new ArrayDeque<>();
+
+  /** That which follows from {@link #urgent}; guarded by {@link #lock}. */
+  private Recorder.StateMaker newestState;
 
   /** Guarded by {@link #lock}. */
   private boolean stopping;
@@ -61,6 +62,7 @@ final class RecorderThread {
     this.clock = clock;
     this.queue = queue;
     this.journal = new JournalFile(disk, folder);
+    this.states = new StateFiles(disk, folder);
     this.files = new RecordFiles(disk, folder);
     this.housekeeping = new Housekeeping(disk, folder, settings.keep(), files, clock);
   }
@@ -77,20 +79,39 @@ final class RecorderThread {
     diskWatch = watch;
   }
 
-  /** Any thread. */
-  void urgent(JournalEntry entry) {
+  /**
+   * Entries that an earlier run kept with the state but may not have written.
+   *
+   * @return how many the journal lacks; they are first in line now
+   */
+  int writeAgain(List<JournalLines.Numbered> kept) {
+    List<JournalEntry> lacking = new ArrayList<>();
+    for (JournalLines.Numbered entry : kept) {
+      if (entry.number() == journal.next() + lacking.size()) {
+        lacking.add(entry.entry());
+      }
+    }
+    urgent(lacking, null);
+    return lacking.size();
+  }
+
+  /** Any thread; what is handed in together is taken out together. */
+  void urgent(List<JournalEntry> entries, Recorder.StateMaker state) {
     lock.lock();
     try {
-      urgent.add(entry);
-      woken.signal();
+      urgent.addAll(entries);
+      newestState = state == null ? newestState : state;
+      if (!entries.isEmpty()) {
+        woken.signal();
+      }
     } finally {
       lock.unlock();
     }
   }
 
   /** Any thread. */
-  void keepState(Supplier<byte[]> newest) {
-    state.set(newest);
+  void keepEstimates(Supplier<byte[]> newest) {
+    states.keepEstimates(newest);
   }
 
   /** Any thread. */
@@ -114,10 +135,10 @@ final class RecorderThread {
     long nextFlush = System.nanoTime();
     boolean last = false;
     while (!last) {
-      List<JournalEntry> entries = new ArrayList<>();
-      last = waitFor(nextFlush, entries);
+      Batch batch = waitFor(nextFlush);
+      last = batch.last();
       try {
-        commit(entries);
+        commit(batch);
         if (last || System.nanoTime() - nextFlush >= 0) {
           nextFlush = System.nanoTime() + settings.flush().toNanos();
           flush(last);
@@ -128,9 +149,7 @@ final class RecorderThread {
     }
     housekeeping.close();
     // The last flush may have had something to say itself.
-    List<JournalEntry> entries = new ArrayList<>();
-    waitFor(System.nanoTime(), entries);
-    commit(entries);
+    commit(waitFor(System.nanoTime()));
     try {
       files.close();
       journal.close();
@@ -139,43 +158,58 @@ final class RecorderThread {
     }
   }
 
-  /** Waits for entries, the next flush or the end. Returns whether this is the end. */
-  private boolean waitFor(long nextFlush, List<JournalEntry> entries) {
+  /** What was handed in since the last look, and whether this is the end. */
+  private record Batch(List<JournalEntry> entries, Recorder.StateMaker state, boolean last) {}
+
+  /** Waits for entries, the next flush or the end. */
+  private Batch waitFor(long nextFlush) {
     lock.lock();
     try {
       long left = nextFlush - System.nanoTime();
       while (urgent.isEmpty() && !stopping && left > 0) {
         left = woken.awaitNanos(left);
       }
-      entries.addAll(urgent);
-      urgent.clear();
-      return stopping;
+      return take(stopping);
     } catch (InterruptedException e) {
-      return true;
+      return take(true);
     } finally {
       lock.unlock();
     }
   }
 
-  /** Forces entries to disk, then tells of them; a refused entry is told of all the same. */
-  private void commit(List<JournalEntry> entries) {
-    if (entries.isEmpty()) {
+  /** With the lock held. */
+  private Batch take(boolean last) {
+    Batch batch = new Batch(List.copyOf(urgent), newestState, last);
+    urgent.clear();
+    newestState = null;
+    return batch;
+  }
+
+  /**
+   * The state goes to disk first, with the entries that led to it; then the entries to the journal;
+   * then they are told of. A refused entry is told of all the same.
+   */
+  private void commit(Batch batch) {
+    List<JournalLines.Numbered> numbered = batch.entries().stream().map(journal::add).toList();
+    saveState(batch.state());
+    if (numbered.isEmpty()) {
       return;
     }
-    List<JournalLines.Numbered> numbered = new ArrayList<>();
-    for (JournalEntry entry : entries) {
-      numbered.add(journal.add(entry));
-    }
     boolean durable = flushJournal();
-    if (durable) {
-      saveState();
-    }
     for (Recorder.Listener listener : listeners) {
       try {
         listener.recorded(numbered, durable);
       } catch (RuntimeException e) {
         LOG.error("a listener of the journal failed", e);
       }
+    }
+  }
+
+  private void saveState(Recorder.StateMaker state) {
+    try {
+      states.save(state, journal.waiting());
+    } catch (IOException e) {
+      failed(e);
     }
   }
 
@@ -199,29 +233,17 @@ final class RecorderThread {
         files.add(next);
       }
       files.flush(today());
+      states.saveAgain(journal.waiting());
       journal.flush(clock.instant());
-      saveState();
+      states.saveEstimates();
       worksAgain();
     } catch (IOException e) {
       failed(e);
     }
   }
 
-  private void saveState() {
-    Supplier<byte[]> newest = state.getAndSet(null);
-    if (newest == null) {
-      return;
-    }
-    try {
-      AtomicFile.write(disk, folder.state(), newest.get());
-    } catch (IOException e) {
-      state.compareAndSet(null, newest);
-      failed(e);
-    }
-  }
-
   private void deleted(String text) {
-    urgent(JournalEntry.station(clock.instant(), "retention", text));
+    urgent(List.of(JournalEntry.station(clock.instant(), "retention", text)), null);
   }
 
   private void failed(IOException e) {
@@ -244,7 +266,9 @@ final class RecorderThread {
     if (failing) {
       failing = false;
       failure = "";
-      urgent(JournalEntry.station(clock.instant(), "recording", "Recording has resumed."));
+      urgent(
+          List.of(JournalEntry.station(clock.instant(), "recording", "Recording has resumed.")),
+          null);
       diskWatch.disk(false, "Recording has resumed.");
     }
   }

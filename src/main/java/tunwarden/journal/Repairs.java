@@ -22,8 +22,9 @@ final class Repairs {
     directories.add(folder.journal());
     directories.addAll(disk.list(folder.readings()));
     directories.addAll(disk.list(folder.estimates()));
-    Path unfinishedState = folder.root().resolve(folder.state().getFileName() + ".new");
-    disk.delete(unfinishedState);
+    for (Path state : List.of(folder.state(), folder.estimatorState())) {
+      disk.delete(state.resolveSibling(state.getFileName() + ".new"));
+    }
     for (Path directory : directories) {
       for (Path file : disk.list(directory)) {
         String name = file.getFileName().toString();

@@ -4,12 +4,15 @@ import com.fasterxml.jackson.core.JsonProcessingException;
 import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.ObjectMapper;
 import com.fasterxml.jackson.databind.json.JsonMapper;
+import com.fasterxml.jackson.databind.node.ArrayNode;
 import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.io.IOException;
 import java.io.InputStream;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
 import java.time.Instant;
+import java.util.ArrayList;
+import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.TreeMap;
@@ -19,8 +22,9 @@ import tunwarden.journal.disk.Disk;
 
 /**
  * What a restart begins with: the alarm book, and how each vessel was described when its readings
- * were taken in. The estimator's memory is not in it: it is had again by taking in the recorded
- * readings.
+ * were taken in. The journal entries that led to the book stand in the same file until they are in
+ * the journal, so that book and journal agree wherever the power fails. What the estimator
+ * remembers is in {@link SavedEstimates}.
  *
  * @param savedAt when it was saved
  * @param book the alarms
@@ -36,15 +40,36 @@ public record SavedState(Instant savedAt, AlarmBook book, Map<String, String> de
     descriptions = Map.copyOf(descriptions);
   }
 
-  /** As bytes of JSON. */
-  public byte[] bytes() {
+  /**
+   * As bytes of JSON.
+   *
+   * @param unwritten journal entries up to this state that are not known to be on the disk
+   */
+  public byte[] bytes(List<JournalLines.Numbered> unwritten) {
     ObjectNode node = JSON.createObjectNode();
     node.put("format", FORMAT);
     node.put("saved_at", savedAt.toString());
     node.set("alarms", AlarmBookJson.write(book));
     ObjectNode all = node.putObject("vessels");
     new TreeMap<>(descriptions).forEach(all::put);
+    ArrayNode lines = node.putArray("unwritten");
+    unwritten.forEach(entry -> lines.add(JournalLines.line(entry)));
     return node.toPrettyString().getBytes(StandardCharsets.UTF_8);
+  }
+
+  /** The journal entries that stand in the file; none when it cannot be understood. */
+  static List<JournalLines.Numbered> unwritten(Disk disk, Path file) throws IOException {
+    List<JournalLines.Numbered> entries = new ArrayList<>();
+    if (disk.exists(file)) {
+      try (InputStream in = disk.read(file)) {
+        for (JsonNode line : JSON.readTree(in).path("unwritten")) {
+          JournalLines.read(line.asText()).ifPresent(entries::add);
+        }
+      } catch (JsonProcessingException notOurs) {
+        return List.of();
+      }
+    }
+    return entries;
   }
 
   /**

@@ -12,15 +12,27 @@ import tunwarden.assess.Assessment;
  * Written on the station's thread only; the book itself is immutable and may be read anywhere.
  */
 public final class AlarmKeeper implements Sink {
-  private final List<Consumer<Transition>> listeners;
+  private final List<Listener> listeners;
   private volatile AlarmBook book;
+
+  /** Hears of what changed, on the station's thread. */
+  @FunctionalInterface
+  public interface Listener {
+    /** The transitions of one step, at least one, and the book after them. */
+    void changed(AlarmBook.Folded folded);
+
+    /** One that looks at each transition by itself. */
+    static Listener each(Consumer<Transition> taker) {
+      return folded -> folded.transitions().forEach(taker);
+    }
+  }
 
   /**
    * Starts from a book, empty or restored.
    *
-   * @param listeners told of every transition, in order, on the station's thread
+   * @param listeners told in this order
    */
-  public AlarmKeeper(AlarmBook book, List<Consumer<Transition>> listeners) {
+  public AlarmKeeper(AlarmBook book, List<Listener> listeners) {
     this.book = book;
     this.listeners = List.copyOf(listeners);
   }
@@ -34,8 +46,8 @@ public final class AlarmKeeper implements Sink {
   public void change(Function<AlarmBook, AlarmBook.Folded> deed) {
     AlarmBook.Folded folded = deed.apply(book);
     book = folded.book();
-    for (Transition transition : folded.transitions()) {
-      listeners.forEach(listener -> listener.accept(transition));
+    if (!folded.transitions().isEmpty()) {
+      listeners.forEach(listener -> listener.changed(folded));
     }
   }
 

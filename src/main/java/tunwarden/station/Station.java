@@ -5,11 +5,13 @@ import java.time.Instant;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.Set;
 import org.slf4j.Logger;
 import org.slf4j.LoggerFactory;
 import tunwarden.assess.Assessment;
 import tunwarden.estimate.Estimator;
+import tunwarden.estimate.State;
 import tunwarden.estimate.Step;
 import tunwarden.reading.Sample;
 import tunwarden.vessel.Vessel;
@@ -94,6 +96,14 @@ public final class Station {
         });
   }
 
+  /** Goes on with a vessel from what the estimator remembers of it; the rest begins afresh. */
+  public void resume(String vessel, State state) {
+    VesselWatch watch = watches.get(vessel);
+    if (watch != null) {
+      watch.restore(VesselMemory.fresh(state));
+    }
+  }
+
   /** How many samples named a vessel that is not in the cellar. */
   public long unknownVessels() {
     return unknownVessels;
@@ -112,6 +122,25 @@ public final class Station {
       Map<String, VesselMemory> kept = new LinkedHashMap<>(memories);
       kept.keySet().retainAll(vessels);
       return new Checkpoint(kept);
+    }
+
+    /** The same moment, with all futures to be computed afresh. */
+    public Checkpoint withoutOutlooks() {
+      Map<String, VesselMemory> blank = new LinkedHashMap<>();
+      memories.forEach((id, memory) -> blank.put(id, memory.withoutOutlook()));
+      return new Checkpoint(blank);
+    }
+
+    /** What the estimator remembers, by vessel. */
+    public Map<String, State> states() {
+      Map<String, State> states = new LinkedHashMap<>();
+      memories.forEach((id, memory) -> states.put(id, memory.state()));
+      return states;
+    }
+
+    /** Time of the newest reading of a vessel; empty before its first. */
+    public Optional<Instant> seenUntil(String vessel) {
+      return Optional.ofNullable(memories.get(vessel)).flatMap(VesselMemory::seenUntil);
     }
   }
 

@@ -29,13 +29,13 @@ public final class StationLoop implements AutoCloseable {
   private final AtomicLong dropped = new AtomicLong();
   private final Thread thread;
   private volatile boolean closing;
-  private volatile long heartbeatMs;
+  private volatile long heartbeatNanos;
 
   /** A loop that has not been started. */
   public StationLoop(Station station, InstantSource clock) {
     this.station = station;
     this.clock = clock;
-    this.heartbeatMs = clock.millis();
+    this.heartbeatNanos = System.nanoTime();
     this.thread = new Thread(this::run, "station");
   }
 
@@ -66,9 +66,9 @@ public final class StationLoop implements AutoCloseable {
     return dropped.get();
   }
 
-  /** When the loop last came round, milliseconds since the epoch; old means it has stalled. */
-  public long heartbeatMs() {
-    return heartbeatMs;
+  /** How long ago the loop last came round, whatever the wall clock does; long means a stall. */
+  public Duration sinceHeartbeat() {
+    return Duration.ofNanos(System.nanoTime() - heartbeatNanos);
   }
 
   private void run() {
@@ -76,7 +76,7 @@ public final class StationLoop implements AutoCloseable {
     while (!closing || !inbox.isEmpty()) {
       try {
         long nowMs = clock.millis();
-        heartbeatMs = nowMs;
+        heartbeatNanos = System.nanoTime();
         if (nowMs >= nextTickMs || nextTickMs - nowMs > TICK.toMillis()) {
           nextTickMs = nowMs + TICK.toMillis();
           station.tick(clock.instant());

@@ -1,6 +1,9 @@
 package tunwarden.station;
 
 import java.time.Instant;
+import java.util.Comparator;
+import java.util.Optional;
+import java.util.stream.Stream;
 import tunwarden.estimate.State;
 import tunwarden.forecast.RecentRise;
 
@@ -21,6 +24,17 @@ record VesselMemory(
         RecentRise.NONE,
         PacedOutlook.NEVER,
         Instant.MIN);
+  }
+
+  VesselMemory withoutOutlook() {
+    return new VesselMemory(state, pressure, temperature, rise, PacedOutlook.NEVER, assessedAt);
+  }
+
+  /** Time of the newest reading. */
+  Optional<Instant> seenUntil() {
+    return Stream.of(pressure.at(), temperature.at())
+        .flatMap(Optional::stream)
+        .max(Comparator.naturalOrder());
   }
 
   VesselMemory withState(State next) {

@@ -7,6 +7,10 @@ import java.time.Duration;
 import java.time.Instant;
 import java.time.InstantSource;
 import java.util.List;
+import java.util.Map;
+import tunwarden.alarm.AlarmBook;
+import tunwarden.alarm.AlarmCounts;
+import tunwarden.alarm.AlarmSettings;
 import tunwarden.estimate.Outcome;
 import tunwarden.estimate.Step;
 import tunwarden.journal.disk.RealDisk;
@@ -16,7 +20,7 @@ import tunwarden.reading.Reading;
 
 /**
  * The process that the crash test kills: records a counter as a pressure at 100 Hz, an alarm entry
- * with every third reading, a state with every tenth, and says on standard output what it has done:
+ * and the book it leads to with every third reading, and says on standard output what it has done:
  * {@code R n} for a reading handed in, {@code A n} for an entry reported as safe.
  */
 final class CrashChild {
@@ -55,10 +59,10 @@ final class CrashChild {
         new Step(Outcome.ACCEPTED, Quality.GOOD, "", null, List.of()));
     say("R " + n + " " + now.toEpochMilli());
     if (n % 3 == 0) {
-      recorder.write(JournalEntry.station(now, JournalEntry.ALARM, String.valueOf(n)));
-    }
-    if (n % 10 == 0) {
-      recorder.keepState(() -> ("{\"n\": " + n + "}").getBytes(StandardCharsets.UTF_8));
+      JournalEntry entry = JournalEntry.station(now, JournalEntry.ALARM, String.valueOf(n));
+      AlarmCounts counts = new AlarmCounts(n, 0, false, List.of());
+      AlarmBook book = AlarmBook.restored(AlarmSettings.DEFAULT, List.of(), counts);
+      recorder.write(List.of(entry), new SavedState(now, book, Map.of())::bytes);
     }
   }
 

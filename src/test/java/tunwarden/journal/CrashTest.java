@@ -19,6 +19,7 @@ import java.util.stream.Stream;
 import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import tunwarden.alarm.AlarmSettings;
 import tunwarden.journal.disk.RealDisk;
 
 /**
@@ -133,10 +134,13 @@ class CrashTest {
     missing.removeAll(kept);
     assertEquals(Set.of(), missing, where);
     checkReadings(where);
-    Path state = folder.resolve("state.json");
-    if (Files.exists(state)) {
-      assertTrue(Files.readString(state).matches("\\{\"n\": \\d+}"), where);
-    }
+    long inBook =
+        SavedState.read(new RealDisk(), folder.resolve("state.json"), AlarmSettings.DEFAULT)
+            .map(state -> state.book().counts().raised())
+            .orElse(0L);
+    long inJournal =
+        kept.stream().filter(text -> text.matches("\\d+")).mapToLong(Long::valueOf).max().orElse(0);
+    assertEquals(inJournal, inBook, where + ": the book is not that of the last alarm told");
   }
 
   private void checkReadings(String where) throws IOException {

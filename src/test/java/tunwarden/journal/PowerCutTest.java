@@ -22,6 +22,7 @@ import java.util.zip.GZIPInputStream;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import tunwarden.alarm.AlarmBook;
+import tunwarden.alarm.AlarmCounts;
 import tunwarden.alarm.AlarmSettings;
 import tunwarden.estimate.Outcome;
 import tunwarden.estimate.Step;
@@ -44,7 +45,8 @@ class PowerCutTest {
           1000,
           Duration.ofMinutes(1),
           Duration.ofMillis(1),
-          new RecorderSettings.Keep(100, 1 << 30, 0, true));
+          new RecorderSettings.Keep(100, 1 << 30, 0, true),
+          Duration.ofHours(6));
 
   @TempDir private Path folder;
 
@@ -93,9 +95,8 @@ class PowerCutTest {
         recorder.sampled(
             Reading.good(NOON.plusSeconds(i), "FV2", Quantity.PRESSURE, i),
             new Step(Outcome.ACCEPTED, Quality.GOOD, "", null, List.of()));
-        recorder.write(JournalEntry.station(NOON, JournalEntry.ALARM, "alarm " + i));
-        AlarmBook book = AlarmBook.empty(AlarmSettings.DEFAULT);
-        recorder.keepState(new SavedState(NOON.plusSeconds(i), book, Map.of())::bytes);
+        JournalEntry entry = JournalEntry.station(NOON, JournalEntry.ALARM, "alarm " + i);
+        recorder.write(List.of(entry), new SavedState(NOON, bookAfter(i + 1), Map.of())::bytes);
         Thread.sleep(1);
       }
     } catch (IOException noPower) {
@@ -104,13 +105,22 @@ class PowerCutTest {
     return reported;
   }
 
+  /** A book in which so many alarms were raised. */
+  private static AlarmBook bookAfter(int raised) {
+    AlarmCounts counts = new AlarmCounts(raised, 0, false, List.of());
+    return AlarmBook.restored(AlarmSettings.DEFAULT, List.of(), counts);
+  }
+
   private void check(PowerCutDisk disk, Set<String> reported, String where) throws Exception {
     // The folder opens, is repaired, and takes new entries.
     try (Recorder recorder = Recorder.open(folder, disk, QUICK, () -> NOON)) {
       recorder.start();
       recorder.write(JournalEntry.station(NOON, "start", "again"));
     }
-    SavedState.read(disk, folder.resolve("state.json"), AlarmSettings.DEFAULT);
+    long inBook =
+        SavedState.read(disk, folder.resolve("state.json"), AlarmSettings.DEFAULT)
+            .map(state -> state.book().counts().raised())
+            .orElse(0L);
     Set<String> alarms = new TreeSet<>();
     List<String> today = new ArrayList<>();
     Set<String> yesterday = new TreeSet<>();
@@ -128,6 +138,8 @@ class PowerCutTest {
     }
     assertTrue(alarms.containsAll(reported), where + ": " + reported + " but " + alarms);
     assertTrue(alarms.contains("again"), where);
+    long inJournal = alarms.stream().filter(text -> text.startsWith("alarm ")).count();
+    assertEquals(inJournal, inBook, where + ": the book and the journal tell different stories");
     assertEquals(6, yesterday.size(), where);
     for (int i = 0; i < today.size(); i++) {
       String stamp = NOON.plusSeconds(i).toString();

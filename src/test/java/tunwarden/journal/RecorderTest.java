@@ -42,7 +42,8 @@ class RecorderTest {
           1000,
           Duration.ofMinutes(1),
           Duration.ofMillis(50),
-          new RecorderSettings.Keep(100, 1 << 30, 1000, true));
+          new RecorderSettings.Keep(100, 1 << 30, 1000, true),
+          Duration.ofHours(6));
 
   @TempDir private Path folder;
   private final FaultyDisk disk = new FaultyDisk();
@@ -190,7 +191,12 @@ class RecorderTest {
   void aFullQueueDropsReadingsAndCountsThemButNeverAnEntry() throws IOException {
     RecorderSettings small =
         new RecorderSettings(
-            Duration.ofMillis(20), 10, Duration.ofMinutes(1), Duration.ofMillis(50), QUICK.keep());
+            Duration.ofMillis(20),
+            10,
+            Duration.ofMinutes(1),
+            Duration.ofMillis(50),
+            QUICK.keep(),
+            Duration.ofHours(6));
     Recorder recorder = open(small);
     for (int i = 0; i < 50; i++) {
       row(recorder, NOON.plusSeconds(i), 0.8, 5);

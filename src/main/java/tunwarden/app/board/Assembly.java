@@ -3,10 +3,8 @@ package tunwarden.app.board;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.function.BiFunction;
-import java.util.function.Consumer;
 import tunwarden.alarm.AlarmBook;
 import tunwarden.alarm.AlarmSettings;
-import tunwarden.alarm.Transition;
 import tunwarden.estimate.Estimators;
 import tunwarden.forecast.Forecaster;
 import tunwarden.reading.Quantity;
@@ -37,7 +35,7 @@ public record Assembly(Station station, AlarmKeeper alarms, BoardKeeper board) {
    * @param frame what the board says beside the readings
    * @param sources where each quantity comes from
    * @param extraSinks told of every assessment after the alarms, such as a recorder
-   * @param extraListeners told of every alarm transition
+   * @param extraListeners told of what changes in the alarms
    */
   public static Assembly of(
       List<Vessel> vessels,
@@ -45,10 +43,10 @@ public record Assembly(Station station, AlarmKeeper alarms, BoardKeeper board) {
       BoardKeeper.Frame frame,
       BiFunction<String, Quantity, SignalSource> sources,
       List<Sink> extraSinks,
-      List<Consumer<Transition>> extraListeners) {
+      List<AlarmKeeper.Listener> extraListeners) {
     JournalPages journal = new JournalPages();
-    List<Consumer<Transition>> listeners = new ArrayList<>(extraListeners);
-    listeners.add(journal::changed);
+    List<AlarmKeeper.Listener> listeners = new ArrayList<>(extraListeners);
+    listeners.add(AlarmKeeper.Listener.each(journal::changed));
     AlarmKeeper alarms = new AlarmKeeper(AlarmBook.empty(settings), listeners);
     BoardKeeper board = new BoardKeeper(vessels, frame, alarms, journal, new SignalTally(sources));
     List<Sink> sinks = new ArrayList<>(List.of(alarms, board));

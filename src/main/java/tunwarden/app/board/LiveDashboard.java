@@ -7,14 +7,15 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Consumer;
-import tunwarden.alarm.Transition;
+import tunwarden.app.keeping.Keeping;
 import tunwarden.config.Cellar;
 import tunwarden.config.PortPlans;
-import tunwarden.journal.Entries;
 import tunwarden.journal.Recorder;
+import tunwarden.journal.disk.Disk;
 import tunwarden.journal.disk.RealDisk;
 import tunwarden.reading.Quantity;
 import tunwarden.reading.Sample;
+import tunwarden.screen.model.JournalEntry;
 import tunwarden.screen.model.Origin;
 import tunwarden.screen.terminal.Dashboard;
 import tunwarden.serial.ByteLinkFactory;
@@ -23,6 +24,7 @@ import tunwarden.serial.LinkWords;
 import tunwarden.serial.PairGate;
 import tunwarden.serial.PortPlan;
 import tunwarden.serial.PortRunner;
+import tunwarden.station.AlarmKeeper;
 import tunwarden.station.Sink;
 import tunwarden.station.StationLoop;
 
@@ -51,24 +53,22 @@ public final class LiveDashboard {
     LiveDashboard dashboard = new LiveDashboard(cellar, links, clock);
     List<PortPlan> plans = PortPlans.of(cellar);
     if (data.isEmpty()) {
-      dashboard.watch(plans, front, List.of(), List.of());
+      dashboard.watch(plans, front, Optional.empty());
       return;
     }
-    try (Recorder recorder = Recorder.open(data.get(), new RealDisk(), cellar.recording(), clock)) {
+    Disk disk = new RealDisk();
+    try (Recorder recorder = Recorder.open(data.get(), disk, cellar.recording(), clock)) {
+      List<String> said = new ArrayList<>();
+      Keeping keeping = new Keeping(recorder, disk, clock, said::add);
       recorder.start();
-      dashboard.watch(
-          plans,
-          front,
-          List.of(recorder),
-          List.of(transition -> recorder.write(Entries.of(transition))));
+      dashboard.watch(plans, front, Optional.of(new Record(recorder, keeping, said)));
     }
   }
 
-  private void watch(
-      List<PortPlan> plans,
-      Front front,
-      List<Sink> extraSinks,
-      List<Consumer<Transition>> extraListeners) {
+  /** What records, what keeps alarms and estimates for the next start, and what it says. */
+  private record Record(Recorder recorder, Keeping keeping, List<String> said) {}
+
+  private void watch(List<PortPlan> plans, Front front, Optional<Record> record) {
     BoardKeeper.Frame frame =
         new BoardKeeper.Frame(
             Origin.LIVE,
@@ -79,7 +79,18 @@ public final class LiveDashboard {
             Optional::empty);
     Assembly assembly =
         Assembly.of(
-            cellar.vessels(), cellar.alarms(), frame, this::source, extraSinks, extraListeners);
+            cellar.vessels(),
+            cellar.alarms(),
+            frame,
+            this::source,
+            record.map(r -> List.<Sink>of(r.recorder(), r.keeping())).orElse(List.of()),
+            record.map(r -> List.<AlarmKeeper.Listener>of(r.keeping())).orElse(List.of()));
+    record.ifPresent(
+        r -> {
+          assembly.alarms().restore(r.keeping().book(cellar));
+          r.keeping().resume(cellar, assembly.station(), assembly.alarms());
+          r.said().forEach(words -> assembly.board().write(note(words)));
+        });
     try (StationLoop loop = new StationLoop(assembly.station(), clock)) {
       Consumer<Sample> inlet = PairGate.over(plans, loop.inlet());
       plans.forEach(plan -> ports.add(new PortRunner(plan, links, inlet, clock)));
@@ -92,6 +103,11 @@ public final class LiveDashboard {
     } finally {
       ports.forEach(PortRunner::close);
     }
+    record.ifPresent(r -> r.keeping().keep());
+  }
+
+  private JournalEntry note(String words) {
+    return new JournalEntry(clock.instant(), "", "start", words);
   }
 
   private SignalSource source(String vessel, Quantity quantity) {

@@ -2,13 +2,10 @@ package tunwarden.app.headless;
 
 import java.io.IOException;
 import java.time.Duration;
-import java.time.Instant;
 import java.time.InstantSource;
 import java.util.ArrayList;
-import java.util.HashMap;
 import java.util.HashSet;
 import java.util.List;
-import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
 import java.util.concurrent.CountDownLatch;
@@ -16,16 +13,13 @@ import java.util.concurrent.TimeUnit;
 import java.util.function.Consumer;
 import org.slf4j.Logger;
 import org.slf4j.LoggerFactory;
-import tunwarden.alarm.AlarmBook;
 import tunwarden.alarm.AlarmKind;
-import tunwarden.alarm.Transition;
+import tunwarden.app.keeping.Keeping;
 import tunwarden.config.Cellar;
 import tunwarden.config.CellarFile;
-import tunwarden.journal.Entries;
 import tunwarden.journal.JournalEntry;
 import tunwarden.journal.JournalReader;
 import tunwarden.journal.Recorder;
-import tunwarden.journal.SavedState;
 import tunwarden.journal.disk.Disk;
 import tunwarden.journal.disk.RealDisk;
 import tunwarden.notice.Channel;
@@ -37,9 +31,7 @@ import tunwarden.serve.Served;
 import tunwarden.serve.Server;
 import tunwarden.station.AlarmKeeper;
 import tunwarden.station.Sink;
-import tunwarden.station.Station;
 import tunwarden.units.BadInputException;
-import tunwarden.vessel.Vessel;
 
 /**
  * The whole of unattended watching, started and stopped in order: recorder, station, ports, server.
@@ -48,7 +40,6 @@ import tunwarden.vessel.Vessel;
 public final class Headless implements AutoCloseable {
   private static final Logger LOG = LoggerFactory.getLogger(Headless.class);
   private static final Duration STALLED = Duration.ofSeconds(5);
-  private static final Duration SAVE_EVERY = Duration.ofMinutes(1);
 
   private final HeadlessPlan plan;
   private final ByteLinkFactory links;
@@ -60,6 +51,7 @@ public final class Headless implements AutoCloseable {
   private final Thread minder = new Thread(this::mind, "minder");
 
   private Recorder recorder;
+  private Keeping keeping;
   private AlarmKeeper alarms;
   private Optional<Server> server = Optional.empty();
   private volatile Optional<Notifier> notifier = Optional.empty();
@@ -102,16 +94,15 @@ public final class Headless implements AutoCloseable {
 
   private void begin(Cellar cellar) throws IOException {
     recorder.repairs().forEach(console);
-    Optional<SavedState> saved = saved(cellar);
-    AlarmBook book = saved.map(SavedState::book).orElseGet(() -> AlarmBook.empty(cellar.alarms()));
-    alarms = new AlarmKeeper(book.retain(ids(cellar)), List.of(this::changed));
+    keeping = new Keeping(recorder, disk, clock, console);
+    alarms = new AlarmKeeper(keeping.book(cellar), List.of(keeping));
     EventFeed events = new EventFeed(Optional.of(reader()));
     recorder.listen(events);
     recorder.listen((entries, durable) -> notifier.ifPresent(n -> n.recorded(entries, durable)));
     recorder.watchDisk((failing, text) -> report(AlarmKind.DISK, failing, text));
     watching = new Watching(cellar, links, clock, sinks());
     notifier = notifier(cellar);
-    resume(cellar, saved);
+    keeping.resume(cellar, watching.station(), alarms);
     recorder.start();
     say("start", "Watching " + cellar.vessels().size() + " vessel(s) of " + cellar.file() + ".");
     if (plan.serve().isPresent()) {
@@ -120,7 +111,6 @@ public final class Headless implements AutoCloseable {
     }
     watching.start();
     notifier.ifPresent(Notifier::start);
-    saveState();
     minder.start();
   }
 
@@ -139,7 +129,7 @@ public final class Headless implements AutoCloseable {
   }
 
   private List<Sink> sinks() {
-    return List.of(alarms, recorder, latest);
+    return List.of(alarms, recorder, latest, keeping);
   }
 
   private JournalReader reader() {
@@ -153,46 +143,6 @@ public final class Headless implements AutoCloseable {
   private Served.RecorderFigures figures() {
     return new Served.RecorderFigures(
         recorder.accepted(), recorder.dropped(), recorder.waiting(), recorder.isFailing());
-  }
-
-  private Optional<SavedState> saved(Cellar cellar) {
-    try {
-      return SavedState.read(disk, recorder.folder().state(), cellar.alarms());
-    } catch (IOException unreadable) {
-      say("start", "Alarms and shelves of the last run are lost: " + unreadable.getMessage());
-      return Optional.empty();
-    }
-  }
-
-  private void resume(Cellar cellar, Optional<SavedState> saved) {
-    Map<String, String> before = saved.map(SavedState::descriptions).orElse(Map.of());
-    Instant now = clock.instant();
-    Resumption resumption = new Resumption(recorder.folder(), cellar.vessels(), plan.resume(), now);
-    resumption.run(cellar.vessels(), before);
-    watching.station().restore(resumption.checkpoint());
-    for (Vessel vessel : cellar.vessels()) {
-      if (!resumption.resumed().contains(vessel.id())) {
-        alarms.change(book -> book.eventsLost(vessel.id(), now));
-      }
-    }
-    resumption.words().forEach(text -> say("start", text));
-  }
-
-  /** On the station's thread. */
-  private void changed(Transition transition) {
-    recorder.write(Entries.of(transition));
-    saveState();
-  }
-
-  /** The book is taken when it is written, so that the newest goes to disk. */
-  private void saveState() {
-    Cellar cellar = watching.cellar();
-    recorder.keepState(
-        () -> {
-          Map<String, String> descriptions = new HashMap<>();
-          cellar.vessels().forEach(v -> descriptions.put(v.id(), v.toString()));
-          return new SavedState(clock.instant(), alarms.book(), descriptions).bytes();
-        });
   }
 
   private void report(AlarmKind kind, boolean active, String text) {
@@ -209,9 +159,9 @@ public final class Headless implements AutoCloseable {
   /** Reasons why the program is not well. */
   List<String> ailments() {
     List<String> found = new ArrayList<>();
-    long age = clock.millis() - watching.loop().heartbeatMs();
-    if (age > STALLED.toMillis()) {
-      found.add("The watching loop has not come round for " + age / 1000 + " s.");
+    Duration age = watching.loop().sinceHeartbeat();
+    if (age.compareTo(STALLED) > 0) {
+      found.add("The watching loop has not come round for " + age.toSeconds() + " s.");
     }
     if (watching.loop().dropped() > 0) {
       found.add(watching.loop().dropped() + " readings were lost before they could be looked at.");
@@ -229,7 +179,6 @@ public final class Headless implements AutoCloseable {
 
   private void mind() {
     ClockWatch clockWatch = new ClockWatch(clock.instant(), System.nanoTime());
-    Instant nextSave = clock.instant().plus(SAVE_EVERY);
     while (!awaitClosing()) {
       try {
         Optional<String> step = clockWatch.look(clock.instant(), System.nanoTime());
@@ -238,11 +187,6 @@ public final class Headless implements AutoCloseable {
         if (reloadAsked || cellarWatch.hasChanged()) {
           reloadAsked = false;
           readAgain();
-        }
-        Instant now = clock.instant();
-        if (now.isAfter(nextSave) || now.isBefore(nextSave.minus(SAVE_EVERY))) {
-          nextSave = now.plus(SAVE_EVERY);
-          saveState();
         }
       } catch (RuntimeException e) {
         LOG.error("minding goes on after a failure", e);
@@ -282,18 +226,10 @@ public final class Headless implements AutoCloseable {
       notifier.ifPresent(Notifier::start);
     }
     old.close();
-    Set<Vessel> before = new HashSet<>(old.cellar().vessels());
-    Set<String> unchanged = new HashSet<>();
-    next.cellar().vessels().stream()
-        .filter(before::contains)
-        .forEach(vessel -> unchanged.add(vessel.id()));
-    Station.Checkpoint kept = old.station().checkpoint().only(unchanged);
-    next.station().restore(kept);
-    alarms.restore(alarms.book().withSettings(next.cellar().alarms()).retain(ids(next.cellar())));
+    keeping.goOver(old.cellar(), old.station(), next.cellar(), next.station());
     latest.retain(ids(next.cellar()));
     watching = next;
     next.start();
-    saveState();
   }
 
   private static Set<String> ids(Cellar cellar) {
@@ -317,7 +253,7 @@ public final class Headless implements AutoCloseable {
     closing.countDown();
     if (watching != null) {
       watching.close();
-      saveState();
+      keeping.keep();
       recorder.write(JournalEntry.station(clock.instant(), "stop", "Watching ended."));
     }
     server.ifPresent(Server::close);

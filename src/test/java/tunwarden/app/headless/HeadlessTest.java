@@ -75,8 +75,7 @@ class HeadlessTest {
             cellar,
             folder.resolve("data"),
             Optional.of(new InetSocketAddress(InetAddress.getLoopbackAddress(), 0)),
-            Optional.empty(),
-            Duration.ofHours(6));
+            Optional.empty());
     Headless begun = new Headless(plan, links, InstantSource.system(), console::add);
     begun.start();
     return begun;

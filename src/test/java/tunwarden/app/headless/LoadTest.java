@@ -46,8 +46,7 @@ class LoadTest {
             cellar,
             folder.resolve("data"),
             Optional.of(new InetSocketAddress(InetAddress.getLoopbackAddress(), 0)),
-            Optional.empty(),
-            HeadlessPlan.USUAL_RESUME);
+            Optional.empty());
     try (Headless headless =
         new Headless(plan, new FakeLinks(0.873, 1000), InstantSource.system(), line -> {})) {
       headless.start();

@@ -92,7 +92,9 @@ class SoakTest {
             RecorderSettings.USUAL.withFlush(Duration.ofMillis(200)),
             () -> now);
     AlarmKeeper alarms =
-        new AlarmKeeper(AlarmBook.empty(AlarmSettings.DEFAULT), List.of(this::changed));
+        new AlarmKeeper(
+            AlarmBook.empty(AlarmSettings.DEFAULT),
+            List.of(AlarmKeeper.Listener.each(this::changed)));
     station =
         new Station(
             vessels,

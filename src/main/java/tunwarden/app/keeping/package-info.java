@@ -1,0 +1,2 @@
+/** What a recording program keeps across restarts, with or without a screen. */
+package tunwarden.app.keeping;
