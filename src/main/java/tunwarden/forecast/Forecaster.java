@@ -15,7 +15,6 @@ import tunwarden.estimate.State;
 import tunwarden.units.Constants;
 import tunwarden.vessel.Limits;
 import tunwarden.vessel.ReliefSetting;
-import tunwarden.vessel.Vessel;
 
 /** Everything that is forecast for every vessel all the time. Pure. */
 public final class Forecaster {
@@ -36,31 +35,33 @@ public final class Forecaster {
 
   private Forecaster() {}
 
-  /**
-   * The futures of a vessel that an estimator watches; none before it believes anything.
-   *
-   * @param vessel its description
-   * @param state the estimator's
-   * @param rise how the gauge itself has been rising
-   */
-  public static Outlook outlook(Vessel vessel, State state, RecentRise rise) {
-    List<ForwardPoint> ahead = ForwardRun.run(state, Trend.HORIZON, Trend.STEP);
-    return state
-        .estimate()
-        .map(estimate -> outlook(Present.of(vessel, estimate), ahead, rise))
-        .orElse(Outlook.NONE);
-  }
-
   /** The futures of a vessel; {@link Outlook#NONE} where its state makes no sense to the model. */
   public static Outlook outlook(Present present) {
-    return outlook(present, List.of(), RecentRise.NONE);
+    return isSensible(present)
+        ? outlook(Ensemble.of(present), List.of(), RecentRise.NONE)
+        : Outlook.NONE;
   }
 
-  private static Outlook outlook(Present present, List<ForwardPoint> ahead, RecentRise rise) {
-    if (!(present.pressurePaAbsolute() > 0) || present.vessel().fillM3() <= 0) {
-      return Outlook.NONE;
-    }
-    Ensemble ensemble = Ensemble.of(present);
+  /** The estimator's own forward run; empty where its state holds no belief. */
+  public static List<ForwardPoint> ahead(State state) {
+    return ForwardRun.run(state, Trend.HORIZON, Trend.STEP);
+  }
+
+  /** Whether the model can say anything of a vessel: there is gas, and there is liquid. */
+  public static boolean isSensible(Present present) {
+    return present.pressurePaAbsolute() > 0 && present.vessel().fillM3() > 0;
+  }
+
+  /**
+   * The futures of a vessel.
+   *
+   * @param ensemble the vessel
+   * @param ahead the estimator's own forward run, half-hourly over {@link Trend#HORIZON}; empty
+   *     where there is none
+   * @param rise how the gauge itself has been rising
+   */
+  public static Outlook outlook(Ensemble ensemble, List<ForwardPoint> ahead, RecentRise rise) {
+    Present present = ensemble.present();
     double warmK = present.vessel().warmToK().orElse(present.temperatureK());
     Spread[] at = ensemble.ranges(world -> futures(world, warmK));
     List<ForwardPoint> run = ahead.isEmpty() ? Drift.run(ensemble, at[REST]) : ahead;
@@ -81,18 +82,21 @@ public final class Forecaster {
     }
     Optional<ReliefSetting> relief = present.vessel().limits().relief();
     Optional<TimeRange> toLift = relief.flatMap(r -> trend.until(r.earliestLiftPaGauge()));
-    cautions.soonest(toLift, relief.flatMap(r -> trend.soonest(r.earliestLiftPaGauge())));
+    Optional<Duration> soonest = relief.flatMap(r -> trend.soonest(r.earliestLiftPaGauge()));
+    cautions.soonest(toLift, soonest);
     OptionalDouble full = liquidFullK(ensemble.middle());
     cautions.liquidFull(full);
     cautions.supersaturation(ensemble.middle());
     return new Outlook(
         projections,
         toLift,
+        soonest,
         Trend.HORIZON,
         relief.map(r -> liftK(ensemble.middle(), r)).orElse(OptionalDouble.empty()),
         full,
         trend.points(),
-        cautions.list());
+        cautions.list(),
+        List.of());
   }
 
   private static double[] futures(World world, double warmK) {

@@ -22,17 +22,33 @@ public record WarmUp(World world, double toK, double constantS) {
 
   /** Time to a pressure with its range from the transfer rate; empty: not within five constants. */
   public Optional<TimeRange> until(double paGauge, Spread transferPerS) {
-    double[] rest = atRest();
-    OptionalDouble likely = seconds(paGauge, transferPerS.middle(), rest);
-    OptionalDouble soonest = seconds(paGauge, transferPerS.high(), rest);
-    if (likely.isEmpty() || soonest.isEmpty()) {
+    return until(world, toK, new Spread(constantS, constantS, constantS), paGauge, transferPerS);
+  }
+
+  /**
+   * Time to a pressure where the time constant is a range too: soonest is quick warming with quick
+   * transfer, latest slow warming with slow transfer.
+   *
+   * @param constantS time constant, s
+   * @param paGauge pressure to reach, Pa gauge
+   * @param transferPerS transfer rate, 1/s
+   */
+  public static Optional<TimeRange> until(
+      World world, double toK, Spread constantS, double paGauge, Spread transferPerS) {
+    WarmUp likely = new WarmUp(world, toK, constantS.middle());
+    double[] rest = likely.atRest();
+    OptionalDouble middle = likely.seconds(paGauge, transferPerS.middle(), rest);
+    OptionalDouble soonest =
+        new WarmUp(world, toK, constantS.low()).seconds(paGauge, transferPerS.high(), rest);
+    if (middle.isEmpty() || soonest.isEmpty()) {
       return Optional.empty();
     }
-    OptionalDouble latest = seconds(paGauge, transferPerS.low(), rest);
+    OptionalDouble latest =
+        new WarmUp(world, toK, constantS.high()).seconds(paGauge, transferPerS.low(), rest);
     return Optional.of(
         new TimeRange(
-            duration(likely.getAsDouble()),
-            duration(soonest.getAsDouble()),
+            duration(middle.getAsDouble()),
+            duration(Math.min(middle.getAsDouble(), soonest.getAsDouble())),
             latest.isPresent() ? Optional.of(duration(latest.getAsDouble())) : Optional.empty()));
   }
 

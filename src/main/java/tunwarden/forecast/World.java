@@ -119,6 +119,11 @@ public final class World {
     return new World(setting, vessel, partialPa, headMol, liquid);
   }
 
+  /** Where it started, the same for all worlds of a vessel. */
+  public Present present() {
+    return setting.present;
+  }
+
   /** Liquid volume now, m³. */
   public double liquidM3() {
     return vessel.liquidM3(setting.temperatureK) / setting.relation;

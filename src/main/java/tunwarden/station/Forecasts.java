@@ -1,8 +1,8 @@
 package tunwarden.station;
 
 import tunwarden.estimate.State;
+import tunwarden.forecast.Hindsight;
 import tunwarden.forecast.Outlook;
-import tunwarden.forecast.RecentRise;
 import tunwarden.vessel.Vessel;
 
 /** Computes the futures of one vessel from the estimator's state; pure. */
@@ -13,7 +13,7 @@ public interface Forecasts {
    *
    * @param vessel its description
    * @param state the estimator's
-   * @param rise how the gauge itself has been rising
+   * @param seen what the readings have taught beside the estimator
    */
-  Outlook outlook(Vessel vessel, State state, RecentRise rise);
+  Outlook outlook(Vessel vessel, State state, Hindsight seen);
 }

@@ -5,14 +5,14 @@ import java.util.Comparator;
 import java.util.Optional;
 import java.util.stream.Stream;
 import tunwarden.estimate.State;
-import tunwarden.forecast.RecentRise;
+import tunwarden.forecast.Hindsight;
 
 /** All that the station remembers of one vessel; immutable, so that it can be kept and restored. */
 record VesselMemory(
     State state,
     LatestReading pressure,
     LatestReading temperature,
-    RecentRise rise,
+    Hindsight seen,
     PacedOutlook outlook,
     Instant assessedAt) {
 
@@ -21,7 +21,7 @@ record VesselMemory(
         state,
         LatestReading.NONE,
         LatestReading.NONE,
-        RecentRise.NONE,
+        Hindsight.NONE,
         PacedOutlook.NEVER,
         Instant.MIN);
   }
@@ -38,22 +38,22 @@ record VesselMemory(
   }
 
   VesselMemory withState(State next) {
-    return new VesselMemory(next, pressure, temperature, rise, outlook, assessedAt);
+    return new VesselMemory(next, pressure, temperature, seen, outlook, assessedAt);
   }
 
   VesselMemory withPressure(LatestReading next) {
-    return new VesselMemory(state, next, temperature, rise, outlook, assessedAt);
+    return new VesselMemory(state, next, temperature, seen, outlook, assessedAt);
   }
 
   VesselMemory withTemperature(LatestReading next) {
-    return new VesselMemory(state, pressure, next, rise, outlook, assessedAt);
+    return new VesselMemory(state, pressure, next, seen, outlook, assessedAt);
   }
 
-  VesselMemory withRise(RecentRise next) {
+  VesselMemory withSeen(Hindsight next) {
     return new VesselMemory(state, pressure, temperature, next, outlook, assessedAt);
   }
 
   VesselMemory assessed(PacedOutlook next, Instant at) {
-    return new VesselMemory(state, pressure, temperature, rise, next, at);
+    return new VesselMemory(state, pressure, temperature, seen, next, at);
   }
 }

@@ -109,7 +109,7 @@ final class VesselWatch {
     }
     try {
       return new PacedOutlook(
-          now, paGauge, forecasts.outlook(vessel, memory.state(), memory.rise()));
+          now, paGauge, forecasts.outlook(vessel, memory.state(), memory.seen()));
     } catch (RuntimeException e) {
       LOG.warn("{}: the futures could not be computed", vessel.id(), e);
       return new PacedOutlook(now, paGauge, Outlook.NONE);
@@ -131,13 +131,24 @@ final class VesselWatch {
         memory =
             memory.withPressure(memory.pressure().seen(reading.value(), reading.time(), quality));
         if (!quality.isBad()) {
-          memory = memory.withRise(memory.rise().seen(reading.time(), reading.value()));
+          memory = memory.withSeen(memory.seen().pressure(reading.time(), reading.value()));
         }
       }
-      case TEMPERATURE ->
+      case TEMPERATURE -> {
+        memory =
+            memory.withTemperature(
+                memory.temperature().seen(reading.value(), reading.time(), quality));
+        if (!quality.isBad()) {
           memory =
-              memory.withTemperature(
-                  memory.temperature().seen(reading.value(), reading.time(), quality));
+              memory.withSeen(
+                  memory.seen().temperature(reading.time(), reading.value(), vessel.warmToK()));
+        }
+      }
+      case GRAVITY -> {
+        if (!quality.isBad()) {
+          memory = memory.withSeen(memory.seen().gravity(reading.time(), reading.value()));
+        }
+      }
       default -> {
         // The estimator alone uses the other quantities.
       }

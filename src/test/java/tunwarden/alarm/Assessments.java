@@ -123,9 +123,11 @@ public final class Assessments {
         new Outlook(
             projections,
             timeToLift,
+            timeToLift.map(TimeRange::low),
             Duration.ofHours(48),
             OptionalDouble.empty(),
             liquidFullK,
+            List.of(),
             List.of(),
             List.of());
     return new Assessment(

@@ -20,6 +20,7 @@ import tunwarden.estimate.Estimators;
 import tunwarden.estimate.ForwardPoint;
 import tunwarden.estimate.ForwardRun;
 import tunwarden.estimate.State;
+import tunwarden.forecast.whatif.Foresight;
 import tunwarden.physics.liquid.Liquid;
 import tunwarden.physics.liquid.LiquidKind;
 import tunwarden.reading.Quantity;
@@ -66,7 +67,7 @@ class TrendTest {
   void theOutlookOfAWatchedVesselCarriesTheEstimatorsOwnRun() {
     Simulation log = Scenario.SETTLED.run(3);
     State state = stateAt(log, 6 * 3600);
-    Outlook outlook = Forecaster.outlook(log.vessel(), state, RecentRise.NONE);
+    Outlook outlook = Foresight.outlook(log.vessel(), state, Hindsight.NONE);
     List<ForwardPoint> run = ForwardRun.run(state, Trend.HORIZON, Trend.STEP);
     assertEquals(run.size(), outlook.trend().size());
     for (int i = 0; i < run.size(); i++) {
@@ -80,7 +81,7 @@ class TrendTest {
     Vessel vessel = Scenario.SETTLED.run(3).vessel();
     assertEquals(
         Outlook.NONE,
-        Forecaster.outlook(vessel, Estimators.standard().begin(vessel), RecentRise.NONE));
+        Foresight.outlook(vessel, Estimators.standard().begin(vessel), Hindsight.NONE));
   }
 
   /**

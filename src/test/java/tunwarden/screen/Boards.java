@@ -277,13 +277,15 @@ public final class Boards {
             projection(Scenario.TREND, "in 8 h", bar + 0.07),
             projection(Scenario.WARM, "warmed to 24 °C", bar + 0.41)),
         rising ? Optional.of(soon) : Optional.empty(),
+        rising ? Optional.of(soon.low()) : Optional.empty(),
         Duration.ofHours(48),
         OptionalDouble.of(26.1 + ZERO_C),
         OptionalDouble.empty(),
         trend,
         List.of(
             new Caution(
-                true, "A vent of 3.5 kg here brings the room to 9,700 ppm without the fan.")));
+                true, "A vent of 3.5 kg here brings the room to 9,700 ppm without the fan.")),
+        List.of());
   }
 
   private static Projection projection(Scenario scenario, String words, double bar) {

@@ -6,7 +6,7 @@ import java.util.function.BiFunction;
 import tunwarden.alarm.AlarmBook;
 import tunwarden.alarm.AlarmSettings;
 import tunwarden.estimate.Estimators;
-import tunwarden.forecast.Forecaster;
+import tunwarden.forecast.whatif.Foresight;
 import tunwarden.reading.Quantity;
 import tunwarden.station.AlarmKeeper;
 import tunwarden.station.Forecasts;
@@ -25,7 +25,7 @@ import tunwarden.vessel.Vessel;
  */
 public record Assembly(Station station, AlarmKeeper alarms, BoardKeeper board) {
   /** The futures of a vessel, from what the estimator believes. */
-  public static final Forecasts FORECASTS = Forecaster::outlook;
+  public static final Forecasts FORECASTS = Foresight::outlook;
 
   /**
    * Puts a station together.

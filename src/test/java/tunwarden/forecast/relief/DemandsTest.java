@@ -4,6 +4,8 @@ import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.util.Optional;
+import java.util.OptionalDouble;
 import org.junit.jupiter.api.Test;
 import tunwarden.forecast.ferment.FermentationRate;
 import tunwarden.physics.flow.IsentropicOrifice;
@@ -102,20 +104,33 @@ class DemandsTest {
   /** While the seat is choked the flow is constant: t = Δm / ṁ. */
   @Test
   void chokedSupplyFillsTheHeadspaceAtAConstantFlow() {
-    SupplyFailure failure =
-        new SupplyFailure(8 * BAR, new ReliefOrifice(0.002, 0.6), GasMix.CO2, 277.15);
+    SupplyFailure failure = through(8 * BAR, new ReliefOrifice(0.002, 0.6));
     double kg = 0.2 * (5.86806 - 3.89496); // gas_k_and_z.csv: 3.01 and 2.01 bar absolute, 4 °C
-    var orifice = new IsentropicOrifice(failure.seat().areaM2(), 0.6);
+    var orifice = new IsentropicOrifice(new ReliefOrifice(0.002, 0.6).areaM2(), 0.6);
     double flow = orifice.kgPerS(GasMix.CO2, 8 * BAR, 2 * BAR, 277.15);
     assertEquals(kg / flow, failure.seconds(0.2, 201_325, 301_325), 0.005 * kg / flow);
   }
 
   @Test
   void aSupplyBelowTheTargetNeverReachesIt() {
-    SupplyFailure weak =
-        new SupplyFailure(2 * BAR, new ReliefOrifice(0.002, 0.6), GasMix.CO2, 277.15);
+    SupplyFailure weak = through(2 * BAR, new ReliefOrifice(0.002, 0.6));
     assertEquals(Double.POSITIVE_INFINITY, weak.seconds(0.2, 1.5 * BAR, 2.5 * BAR));
     assertTrue(Double.isFinite(weak.seconds(0.2, 1.5 * BAR, 1.999 * BAR)));
     assertEquals(0, weak.seconds(0.2, 1.5 * BAR, 1.4 * BAR));
+  }
+
+  private static SupplyFailure through(double paAbsolute, ReliefOrifice seat) {
+    return new SupplyFailure(
+        paAbsolute, Optional.of(seat), OptionalDouble.empty(), GasMix.CO2, 277.15);
+  }
+
+  /** Densities of CO2 at 4 °C from gas_k_and_z.csv; 30 kg/h as stated. */
+  @Test
+  void aStatedFlowFillsTheHeadspaceSteadily() {
+    SupplyFailure stated =
+        new SupplyFailure(
+            8 * BAR, Optional.empty(), OptionalDouble.of(30 / 3600.0), GasMix.CO2, 277.15);
+    double kg = 0.2 * (5.86806 - 3.89496);
+    assertEquals(kg / 30 * 3600, stated.seconds(0.2, 201_325, 301_325), 0.002 * kg / 30 * 3600);
   }
 }
