@@ -27,7 +27,7 @@ record VesselMemory(
   }
 
   VesselMemory withoutOutlook() {
-    return new VesselMemory(state, pressure, temperature, rise, PacedOutlook.NEVER, assessedAt);
+    return new VesselMemory(state, pressure, temperature, seen, PacedOutlook.NEVER, assessedAt);
   }
 
   /** Time of the newest reading. */
