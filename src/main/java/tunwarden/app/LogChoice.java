@@ -17,9 +17,7 @@ import tunwarden.replay.LogFile;
 import tunwarden.replay.LogOptions;
 import tunwarden.replay.LogReader;
 import tunwarden.replay.LogRow;
-import tunwarden.report.Inputs;
 import tunwarden.report.Reporter;
-import tunwarden.report.story.Chapter;
 import tunwarden.units.BadInputException;
 import tunwarden.vessel.Vessel;
 
@@ -98,13 +96,11 @@ final class LogChoice {
       throws IOException {
     Vessel vessel = vessel(id, described);
     List<LogFile> files = new ArrayList<>();
-    List<Chapter.Input> inputs = new ArrayList<>();
     for (Path log : logs) {
       LogOptions options = options().forVessel(id).withAmbient(vessel.site().ambientPaAbsolute());
       files.add(LogFile.open(log, options).reportingTo(this::bytesRead));
-      inputs.add(Inputs.of(log));
     }
-    return new Reporter.Source(title, vessel, files, inputs);
+    return new Reporter.Source(title, vessel, files);
   }
 
   private void bytesRead(long bytes) {

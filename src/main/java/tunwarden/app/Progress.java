@@ -14,7 +14,7 @@ final class Progress {
   private final long totalBytes;
   private final LongSupplier nanos;
   private final long begun;
-  private long bytes;
+  private volatile long bytes; // told by the thread that reads
   private long saidAt;
   private boolean said;
 

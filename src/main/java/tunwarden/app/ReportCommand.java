@@ -102,11 +102,12 @@ final class ReportCommand implements Callable<Integer> {
             Optional.ofNullable(whatIf).map(text -> WhatIf.parse(text, ambientPa)),
             choice.zone(),
             command(),
-            new Main.Version().getVersion()[0]);
+            new Main.Version().getVersion()[0],
+            html != null);
     if (series != null && sources.size() > 1) {
       throw new BadInputException("--series: it holds one vessel; leave out --compare");
     }
-    Reporter reporter = new Reporter(Estimators.standard(), settings);
+    Reporter reporter = new Reporter(Estimators.wordless(), settings);
     PrintWriter err = spec.commandLine().getErr();
     List<Chapter> chapters = new ArrayList<>();
     for (Reporter.Source source : sources) {

@@ -24,6 +24,18 @@ import tunwarden.vessel.Vessel;
 public final class BankEstimator implements Estimator {
   private static final double LAB_U95_SHARE = 0.05;
 
+  private final Watch fresh;
+
+  /** The usual one. */
+  public BankEstimator() {
+    this(Watch.NEW);
+  }
+
+  /** One whose slow watches begin with that memory. */
+  BankEstimator(Watch fresh) {
+    this.fresh = fresh;
+  }
+
   @Override
   public State begin(Vessel vessel) {
     return new BankState(
@@ -31,7 +43,7 @@ public final class BankEstimator implements Estimator {
         Senses.fresh(vessel.accuracy().pressureU95Pa()),
         null,
         null,
-        Watch.NEW,
+        fresh,
         EventBook.EMPTY,
         Optional.empty());
   }

@@ -9,6 +9,14 @@ public final class Estimators {
     return new BankEstimator();
   }
 
+  /**
+   * The same without words on what the readings cannot tell, which take as long to work out as all
+   * the rest; for those who show none.
+   */
+  public static Estimator wordless() {
+    return new BankEstimator(Watch.WORDLESS);
+  }
+
   /** The plain equilibrium reading, as a yardstick. */
   public static Estimator plain() {
     return new PlainEstimator();

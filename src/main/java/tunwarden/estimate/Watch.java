@@ -10,7 +10,7 @@ package tunwarden.estimate;
  * @param strainS how long nothing has explained the pressure, s
  * @param lossS how long a leak has been the best explanation, s
  * @param lostKgPerM3 what leaked meanwhile, kg per m3 of liquid
- * @param saidS when the words about ignorance were last computed
+ * @param saidS when the words about ignorance were last computed; NaN where nobody wants them
  * @param said those words
  */
 record Watch(
@@ -24,6 +24,9 @@ record Watch(
     double saidS,
     String said) {
   static final Watch NEW = new Watch(Double.NaN, 0, Double.NaN, 0, 0, 0, 0, 0, "");
+
+  /** The same, for which it is never time for words. */
+  static final Watch WORDLESS = NEW.saying(Double.NaN, "");
 
   Watch withTemperature(double lowK, double lowS, double highK, double highS) {
     return new Watch(lowK, lowS, highK, highS, strainS, lossS, lostKgPerM3, saidS, said);

@@ -1,7 +1,6 @@
 package tunwarden.replay;
 
 import java.io.BufferedInputStream;
-import java.io.FilterInputStream;
 import java.io.IOException;
 import java.io.InputStream;
 import java.io.InputStreamReader;
@@ -123,30 +122,17 @@ public final class LogFile implements RowSource.Supplier {
 
   @Override
   public LogReader open() throws IOException {
-    InputStream raw = new Counting(Files.newInputStream(path), progress);
-    InputStream text = Encoding.withoutMark(unzipped(raw));
-    LineSource lines = new LineSource(new InputStreamReader(text, charset));
-    return new LogReader(path.toString(), layout, options, lines);
+    return open(new MeteredInput(Files.newInputStream(path), progress));
   }
 
-  /** Counts what has been taken from the disk, before any unpacking. */
-  private static final class Counting extends FilterInputStream {
-    private final LongConsumer progress;
-    private long total;
+  /** As {@link #open}, for a reader that can tell the file's hash when it is done. */
+  public LogReader openHashed() throws IOException {
+    return open(new HashedInput(Files.newInputStream(path), progress));
+  }
 
-    Counting(InputStream in, LongConsumer progress) {
-      super(in);
-      this.progress = progress;
-    }
-
-    @Override
-    public int read(byte[] bytes, int offset, int length) throws IOException {
-      int got = super.read(bytes, offset, length);
-      if (got > 0) {
-        total += got;
-        progress.accept(total);
-      }
-      return got;
-    }
+  private LogReader open(MeteredInput raw) throws IOException {
+    InputStream text = Encoding.withoutMark(unzipped(raw));
+    LineSource lines = new LineSource(new InputStreamReader(text, charset));
+    return new LogReader(path.toString(), layout, options, lines, raw::hash);
   }
 }

@@ -5,6 +5,7 @@ import java.io.IOException;
 import java.time.ZoneOffset;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import java.util.zip.ZipException;
 import tunwarden.replay.layout.Layout;
 import tunwarden.replay.text.Line;
@@ -22,14 +23,22 @@ public final class LogReader implements RowSource {
   private final LogNotes notes;
   private final RowParser parser;
   private final RowOrder order;
+  private final Hash hash;
   private final List<LogRow> parsed = new ArrayList<>();
   private final int lastColumn;
   private int lastColumnLength;
+  private ZoneOffset firstOffset;
   private boolean finished;
   private boolean anyValue;
 
-  LogReader(String file, Layout layout, LogOptions options, LineSource lines) {
+  /** Gives the hash of the file. */
+  interface Hash {
+    Optional<String> get() throws IOException;
+  }
+
+  LogReader(String file, Layout layout, LogOptions options, LineSource lines, Hash hash) {
     this.file = file;
+    this.hash = hash;
     this.layout = layout;
     this.lines = lines;
     this.notes = new LogNotes(layout.guesses());
@@ -48,9 +57,17 @@ public final class LogReader implements RowSource {
     return layout;
   }
 
-  /** The offset the newest row's time was written in. */
+  /** The offset the first row's time was written in; null before it was read. */
   public ZoneOffset offset() {
-    return parser.offset();
+    return firstOffset;
+  }
+
+  /**
+   * SHA-256 of the file as it lies on the disk, hexadecimal, if it was opened for that; reads what
+   * is left of it, so ask when the pass is over.
+   */
+  public Optional<String> sha256() throws IOException {
+    return hash.get();
   }
 
   /**
@@ -125,6 +142,7 @@ public final class LogReader implements RowSource {
       return false;
     }
     lastColumnLength = line.length(lastColumn);
+    firstOffset = firstOffset == null ? parser.offset() : firstOffset;
     return true;
   }
 

@@ -3,14 +3,10 @@ package tunwarden.report;
 import java.io.IOException;
 import java.time.Duration;
 import java.time.ZoneId;
-import java.util.ArrayList;
-import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.LongConsumer;
 import tunwarden.estimate.Estimator;
-import tunwarden.estimate.Event;
-import tunwarden.estimate.EventKind;
 import tunwarden.forecast.Forecaster;
 import tunwarden.forecast.Outlook;
 import tunwarden.forecast.Present;
@@ -19,7 +15,6 @@ import tunwarden.replay.LogFile;
 import tunwarden.replay.LogRow;
 import tunwarden.report.analysis.Analysis;
 import tunwarden.report.analysis.Analyst;
-import tunwarden.report.analysis.EventWindow;
 import tunwarden.report.analysis.ReportRow;
 import tunwarden.report.analysis.RowSpool;
 import tunwarden.report.analysis.Smoother;
@@ -34,20 +29,6 @@ import tunwarden.vessel.Vessel;
 
 /** Makes reports out of logs. Memory does not grow with the length of a log. */
 public final class Reporter {
-  private static final int WINDOWS = 8;
-
-  /** Kinds worth a closer look, the gravest first. */
-  private static final List<EventKind> CLOSER =
-      List.of(
-          EventKind.OVER_RELIEF,
-          EventKind.LIFT,
-          EventKind.VENT,
-          EventKind.CHARGE,
-          EventKind.LEAK,
-          EventKind.FROZEN,
-          EventKind.SPIKE,
-          EventKind.GAP);
-
   private final Estimator estimator;
   private final Settings settings;
 
@@ -60,6 +41,7 @@ public final class Reporter {
    * @param zone the zone to tell times in, if stated
    * @param command the command line, to be quoted in the report
    * @param program name and version, to be quoted in the report
+   * @param page whether the report becomes a page, which shows the readings around events
    */
   public record Settings(
       boolean causal,
@@ -67,7 +49,8 @@ public final class Reporter {
       Optional<WhatIf> whatIf,
       Optional<ZoneId> zone,
       String command,
-      String program) {}
+      String program,
+      boolean page) {}
 
   /**
    * What a report is made from.
@@ -75,10 +58,8 @@ public final class Reporter {
    * @param title what it is called
    * @param vessel its description; its id is the one the rows name
    * @param logs one or several, put in order of time
-   * @param inputs the same with their hashes
    */
-  public record Source(
-      String title, Vessel vessel, List<LogFile> logs, List<Chapter.Input> inputs) {}
+  public record Source(String title, Vessel vessel, List<LogFile> logs) {}
 
   public Reporter(Estimator estimator, Settings settings) {
     this.estimator = estimator;
@@ -95,11 +76,12 @@ public final class Reporter {
   public Chapter read(Source source, Optional<Appendable> series, LongConsumer rowsDone)
       throws IOException {
     Analyst analyst = new Analyst(source.vessel(), estimator);
-    try (VesselRows rows = new VesselRows(source.logs(), source.vessel().id());
+    Spacing spacing = new Spacing(settings.every());
+    try (VesselRows rows = new VesselRows(source.logs(), source.vessel().id(), true);
         RowSpool spool = new RowSpool()) {
       for (LogRow row = rows.next(); row != null; row = rows.next()) {
         ReportRow known = analyst.take(row);
-        if (series.isPresent()) {
+        if (series.isPresent() && spacing.isDue(known.time())) {
           spool.add(known);
         }
         rowsDone.accept(analyst.rows());
@@ -113,7 +95,7 @@ public final class Reporter {
       }
       ZoneId zone = settings.zone().orElse(rows.zone());
       Chapter.Origin origin =
-          new Chapter.Origin(source.inputs(), rows.notes(), settings.command(), settings.program());
+          new Chapter.Origin(rows.inputs(), rows.notes(), settings.command(), settings.program());
       return chapter(source, analysis, belief, zone, origin);
     }
   }
@@ -134,7 +116,7 @@ public final class Reporter {
 
   private void writeSeries(Appendable out, RowSpool spool, Analysis analysis, Belief belief)
       throws IOException {
-    SeriesWriter writer = new SeriesWriter(out, settings.every(), analysis.events());
+    SeriesWriter writer = new SeriesWriter(out, analysis.events());
     spool.replay(row -> writer.write(belief.smoother().map(s -> s.smooth(row)).orElse(row)));
   }
 
@@ -148,7 +130,7 @@ public final class Reporter {
         analysis,
         Story.of(analysis, outlook(analysis), zone),
         belief,
-        windows(source, analysis),
+        settings.page() ? CloserLook.at(source, analysis) : List.of(),
         otherwise,
         zone,
         origin);
@@ -160,49 +142,6 @@ public final class Reporter {
         .estimate()
         .map(estimate -> Forecaster.outlook(Present.of(analysis.vessel(), estimate)))
         .orElse(Outlook.NONE);
-  }
-
-  /** A second pass, for the readings around the gravest events. */
-  private static List<EventWindow> windows(Source source, Analysis analysis) throws IOException {
-    List<Event> chosen =
-        analysis.events().stream()
-            .filter(event -> CLOSER.contains(event.kind()))
-            .sorted(
-                Comparator.comparingInt((Event e) -> CLOSER.indexOf(e.kind()))
-                    .thenComparing(Event::time))
-            .toList();
-    List<EventWindow> windows = new ArrayList<>();
-    for (Event event : spread(chosen)) {
-      windows.add(new EventWindow(event));
-    }
-    if (windows.isEmpty()) {
-      return windows;
-    }
-    try (VesselRows rows = new VesselRows(source.logs(), source.vessel().id())) {
-      for (LogRow row = rows.next(); row != null; row = rows.next()) {
-        for (EventWindow window : windows) {
-          window.take(row);
-        }
-      }
-    }
-    return windows;
-  }
-
-  /** At most two of each kind, the first and the last, and no more than fit a page or two. */
-  private static List<Event> spread(List<Event> events) {
-    List<Event> spread = new ArrayList<>();
-    for (EventKind kind : CLOSER) {
-      List<Event> same = events.stream().filter(event -> event.kind() == kind).toList();
-      if (!same.isEmpty()) {
-        spread.add(same.get(0));
-      }
-      if (same.size() > 1) {
-        spread.add(same.get(same.size() - 1));
-      }
-    }
-    List<Event> few = new ArrayList<>(spread.subList(0, Math.min(WINDOWS, spread.size())));
-    few.sort(Comparator.comparing(Event::time));
-    return few;
   }
 
   /** The report as JSON. */

@@ -1,7 +1,6 @@
 package tunwarden.report;
 
 import java.io.IOException;
-import java.time.Duration;
 import java.time.Instant;
 import java.util.ArrayDeque;
 import java.util.ArrayList;
@@ -14,7 +13,7 @@ import tunwarden.replay.text.Decimals;
 import tunwarden.report.analysis.ReportRow;
 import tunwarden.units.Unit;
 
-/** Writes the course of everything as CSV, one line per row or per stretch of time. */
+/** Writes the course of everything as CSV, one line per row it is given. */
 final class SeriesWriter {
   /** The line of names. */
   static final String HEADER =
@@ -22,31 +21,19 @@ final class SeriesWriter {
           + "equilibrium_g_per_l,settled,relief_margin_bar,quality,event";
 
   private final Appendable out;
-  private final long everyMs;
   private final ArrayDeque<Event> ahead = new ArrayDeque<>();
   private final List<Event> present = new ArrayList<>();
   private final StringBuilder line = new StringBuilder();
-  private long nextMs = Long.MIN_VALUE;
 
-  /**
-   * A writer for one vessel.
-   *
-   * @param every least time between two lines; zero for every row
-   */
-  SeriesWriter(Appendable out, Duration every, List<Event> events) throws IOException {
+  /** A writer for one vessel. */
+  SeriesWriter(Appendable out, List<Event> events) throws IOException {
     this.out = out;
-    this.everyMs = every.toMillis();
     events.stream().sorted(Comparator.comparing(Event::time)).forEach(ahead::add);
     out.append(HEADER).append('\n');
   }
 
   void write(ReportRow row) throws IOException {
     follow(row.time());
-    long ms = row.time().toEpochMilli();
-    if (ms < nextMs) {
-      return;
-    }
-    nextMs = everyMs == 0 ? ms : Math.floorDiv(ms, everyMs) * everyMs + everyMs;
     line.setLength(0);
     line.append(LogWriter.timeText(row.time()));
     cell(Unit.BAR.fromSi(row.paGauge()), 5);

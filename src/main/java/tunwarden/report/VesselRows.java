@@ -9,20 +9,31 @@ import tunwarden.replay.BadLogException;
 import tunwarden.replay.LogFile;
 import tunwarden.replay.LogReader;
 import tunwarden.replay.LogRow;
+import tunwarden.replay.ReadAhead;
 import tunwarden.replay.RowSource;
+import tunwarden.report.story.Chapter;
 
 /** The rows of one vessel out of one or several logs, one after the other in order of time. */
 final class VesselRows implements RowSource {
   private final List<LogFile> logs;
   private final String vessel;
+  private final boolean hashing;
   private final List<String> notes = new ArrayList<>();
+  private final List<Chapter.Input> inputs = new ArrayList<>();
   private LogReader reader;
+  private ReadAhead rows;
   private int next;
   private long lastMs = Long.MIN_VALUE;
   private long overlapping;
   private ZoneId zone;
 
-  VesselRows(List<LogFile> logs, String vessel) throws IOException {
+  /**
+   * Begins before the first row.
+   *
+   * @param hashing whether {@link #inputs} is wanted in the end
+   */
+  VesselRows(List<LogFile> logs, String vessel, boolean hashing) throws IOException {
+    this.hashing = hashing;
     this.logs = logs.size() == 1 ? logs : byFirstRow(logs);
     this.vessel = vessel;
   }
@@ -43,12 +54,12 @@ final class VesselRows implements RowSource {
   @Override
   public LogRow next() throws IOException {
     while (true) {
-      if (reader == null && !openNext()) {
+      if (rows == null && !openNext()) {
         return null;
       }
-      LogRow row = reader.next();
+      LogRow row = rows.next();
       if (row == null) {
-        closeReader();
+        finishLog();
       } else if (row.vessel().equals(vessel)) {
         zone = zone == null ? reader.offset() : zone;
         if (row.time().toEpochMilli() > lastMs) {
@@ -64,15 +75,23 @@ final class VesselRows implements RowSource {
     if (next == logs.size()) {
       return false;
     }
-    reader = logs.get(next++).open();
+    LogFile log = logs.get(next++);
+    reader = hashing ? log.openHashed() : log.open();
+    rows = new ReadAhead(reader);
     return true;
   }
 
-  private void closeReader() throws IOException {
-    String prefix = logs.size() > 1 ? logs.get(next - 1).path() + ": " : "";
+  private void finishLog() throws IOException {
+    String path = logs.get(next - 1).path().toString();
+    String prefix = logs.size() > 1 ? path + ": " : "";
     reader.notes().sentences().forEach(sentence -> notes.add(prefix + sentence));
-    reader.close();
-    reader = null;
+    reader.sha256().ifPresent(hash -> inputs.add(new Chapter.Input(path, hash)));
+    close();
+  }
+
+  /** The logs with their hashes; complete once all rows were read. */
+  List<Chapter.Input> inputs() {
+    return inputs;
   }
 
   /** What was met on the way; complete once all rows were read. */
@@ -99,8 +118,9 @@ final class VesselRows implements RowSource {
 
   @Override
   public void close() throws IOException {
-    if (reader != null) {
-      closeReader();
+    if (rows != null) {
+      rows.close();
+      rows = null;
     }
   }
 }

@@ -31,14 +31,17 @@ class ReporterTest {
       throws IOException {
     Reporter.Settings settings =
         new Reporter.Settings(
-            false, Duration.ofMinutes(1), whatIf, Optional.empty(), "the command", "the program");
+            false,
+            Duration.ofMinutes(1),
+            whatIf,
+            Optional.empty(),
+            "the command",
+            "the program",
+            true);
     Rehearsal rehearsal = Rehearsal.logged(scenario, 1, RehearsalLog.START);
     Reporter.Source source =
         new Reporter.Source(
-            "a tank",
-            rehearsal.vessel(),
-            List.of(LogFile.open(log, LogOptions.NONE)),
-            List.of(new Chapter.Input("log.csv", "hash")));
+            "a tank", rehearsal.vessel(), List.of(LogFile.open(log, LogOptions.NONE)));
     return new Reporter(Estimators.standard(), settings)
         .read(source, Optional.ofNullable(out), rows -> {});
   }

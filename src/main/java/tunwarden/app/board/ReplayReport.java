@@ -12,7 +12,6 @@ import org.slf4j.LoggerFactory;
 import tunwarden.estimate.Estimators;
 import tunwarden.replay.BadLogException;
 import tunwarden.replay.LogFile;
-import tunwarden.report.Inputs;
 import tunwarden.report.Reporter;
 import tunwarden.report.story.Chapter;
 import tunwarden.vessel.Vessel;
@@ -61,11 +60,10 @@ final class ReplayReport {
     try {
       Reporter.Settings settings =
           new Reporter.Settings(
-              false, Duration.ZERO, Optional.empty(), Optional.empty(), command, "tunwarden");
-      Reporter.Source source =
-          new Reporter.Source(vessel.id(), vessel, List.of(log), List.of(Inputs.of(log.path())));
+              false, Duration.ZERO, Optional.empty(), Optional.empty(), command, "tunwarden", true);
+      Reporter.Source source = new Reporter.Source(vessel.id(), vessel, List.of(log));
       Chapter chapter =
-          new Reporter(Estimators.standard(), settings).read(source, Optional.empty(), rows -> {});
+          new Reporter(Estimators.wordless(), settings).read(source, Optional.empty(), rows -> {});
       Files.writeString(page, Reporter.html(List.of(chapter)));
       said = "";
     } catch (IOException | BadLogException e) {

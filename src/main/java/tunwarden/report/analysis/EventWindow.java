@@ -1,5 +1,6 @@
 package tunwarden.report.analysis;
 
+import java.time.Instant;
 import java.util.ArrayList;
 import java.util.List;
 import tunwarden.estimate.Event;
@@ -65,6 +66,11 @@ public final class EventWindow {
   /** What was read, in order of time. */
   public List<Seen> seen() {
     return seen;
+  }
+
+  /** Time after which no row can lie in the window. */
+  public Instant until() {
+    return Instant.ofEpochMilli(untilMs);
   }
 
   /** Start of the window, milliseconds since 1970. */

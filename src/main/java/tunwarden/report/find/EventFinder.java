@@ -80,6 +80,11 @@ public final class EventFinder {
     return movements.noise().sigma();
   }
 
+  /** Smallest change that is told from noise, Pa. */
+  public double tellingPa() {
+    return movements.threshold();
+  }
+
   /** Step of the pressure's last digit, Pa; 0 while unknown. */
   public double pressureStepPa() {
     return movements.noise().step();

@@ -1,6 +1,5 @@
 package tunwarden.report.find;
 
-import java.util.ArrayDeque;
 import java.util.ArrayList;
 import java.util.List;
 
@@ -17,7 +16,7 @@ final class MovementTracker {
   private static final int SPIKE_ROWS = 3;
 
   private final NoiseGauge noise = new NoiseGauge();
-  private final ArrayDeque<Point> course = new ArrayDeque<>();
+  private final Course course = new Course(COURSE_ROWS);
   private final List<Point> away = new ArrayList<>();
   private final List<Movement> movements = new ArrayList<>();
   private final List<Movement> spikes = new ArrayList<>();
@@ -28,7 +27,7 @@ final class MovementTracker {
   private Point extreme;
 
   /** Smallest change that counts, Pa. */
-  private double threshold() {
+  double threshold() {
     return Math.max(FLOOR_PA, Math.max(6 * noise.sigma(), 2.5 * noise.step()));
   }
 
@@ -56,19 +55,19 @@ final class MovementTracker {
 
   private void judge(Point point) {
     if (course.size() < LEAST_ROWS) {
-      keep(point);
+      course.add(point);
       return;
     }
-    double expected = expected(point.ms());
+    double expected = course.at(point.ms());
     double off = point.paGauge() - expected;
-    if (Math.abs(off) <= threshold() * reach(point.ms())) {
+    if (Math.abs(off) <= threshold() * course.reach(point.ms())) {
       if (!away.isEmpty()) {
         spike(expected);
       }
-      keep(point);
+      course.add(point);
       return;
     }
-    if (!away.isEmpty() && off * (away.get(0).paGauge() - expected(away.get(0).ms())) < 0) {
+    if (!away.isEmpty() && off * (away.get(0).paGauge() - course.at(away.get(0).ms())) < 0) {
       spike(expected);
     }
     away.add(point);
@@ -82,8 +81,8 @@ final class MovementTracker {
     if (away.size() < 2) {
       return false;
     }
-    double first = away.get(0).paGauge() - expected(away.get(0).ms());
-    double second = away.get(1).paGauge() - expected(away.get(1).ms());
+    double first = away.get(0).paGauge() - course.at(away.get(0).ms());
+    double second = away.get(1).paGauge() - course.at(away.get(1).ms());
     return Math.abs(second) > Math.abs(first) + threshold();
   }
 
@@ -97,7 +96,7 @@ final class MovementTracker {
 
   private void begin(Point point) {
     moving = true;
-    before = course.peekLast();
+    before = course.last();
     extreme = away.get(0);
     boolean down = away.get(0).paGauge() < level();
     for (Point each : away) {
@@ -125,7 +124,7 @@ final class MovementTracker {
     }
     if (further < -threshold() / 2 || seconds > 20) {
       end();
-      keep(point);
+      course.add(point);
     }
   }
 
@@ -141,7 +140,7 @@ final class MovementTracker {
     course.clear();
     for (Point point : later) {
       if (point.ms() > extreme.ms()) {
-        keep(point);
+        course.add(point);
       }
     }
   }
@@ -156,51 +155,8 @@ final class MovementTracker {
     away.clear();
   }
 
-  private void keep(Point point) {
-    course.addLast(point);
-    if (course.size() > COURSE_ROWS) {
-      course.removeFirst();
-    }
-  }
-
   private double level() {
-    return course.isEmpty() ? before.paGauge() : expected(course.peekLast().ms());
-  }
-
-  /** How much less certain the straight line is at a time outside its rows; 1 amid them. */
-  private double reach(long ms) {
-    double n = course.size();
-    double mean = 0;
-    for (Point point : course) {
-      mean += (point.ms() - ms) / 1000.0 / n;
-    }
-    double spread = 0;
-    for (Point point : course) {
-      double off = (point.ms() - ms) / 1000.0 - mean;
-      spread += off * off;
-    }
-    return Math.sqrt(1 + 1 / n + (spread > 0 ? mean * mean / spread : 0));
-  }
-
-  /** The straight line through the last rows, carried on. */
-  private double expected(long ms) {
-    double n = course.size();
-    double originMs = course.peekLast().ms();
-    double sumT = 0;
-    double sumP = 0;
-    double sumTt = 0;
-    double sumTp = 0;
-    for (Point point : course) {
-      double t = (point.ms() - originMs) / 1000;
-      sumT += t;
-      sumP += point.paGauge();
-      sumTt += t * t;
-      sumTp += t * point.paGauge();
-    }
-    double spread = sumTt - sumT * sumT / n;
-    double slope = spread > 0 ? (sumTp - sumT * sumP / n) / spread : 0;
-    double at = (ms - originMs) / 1000 - sumT / n;
-    return sumP / n + slope * at;
+    return course.isEmpty() ? before.paGauge() : course.at(course.last().ms());
   }
 
   List<Movement> movements() {
