@@ -121,6 +121,14 @@ public enum AlarmKind {
     return action;
   }
 
+  /** Whether it is of the station itself, not of a vessel; a clock can be wrong in both. */
+  public boolean isOfStation() {
+    return switch (this) {
+      case DISK, CLOCK, CONFIGURATION, NOTICE -> true;
+      default -> false;
+    };
+  }
+
   /** Whether it is told by an event that begins and ends, not by a level that is passed. */
   boolean isEvent() {
     return switch (this) {

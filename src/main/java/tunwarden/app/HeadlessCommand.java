@@ -8,6 +8,7 @@ import java.time.InstantSource;
 import java.util.Optional;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Option;
 import picocli.CommandLine.ParameterException;
@@ -15,7 +16,7 @@ import picocli.CommandLine.Spec;
 import tunwarden.app.headless.HeadlessPlan;
 import tunwarden.app.headless.HeadlessRun;
 import tunwarden.app.headless.NoticeTrial;
-import tunwarden.config.CellarFile;
+import tunwarden.app.options.RecordingOptions;
 import tunwarden.serve.ServeAddress;
 import tunwarden.serve.TokenFile;
 
@@ -39,18 +40,7 @@ public final class HeadlessCommand implements Callable<Integer> {
 
   @Spec private CommandSpec spec;
 
-  @Option(
-      names = "--cellar",
-      paramLabel = "F",
-      description = "Cellar file (default: ${DEFAULT-VALUE}).",
-      defaultValue = CellarFile.USUAL_NAME)
-  private Path cellarFile;
-
-  @Option(
-      names = "--data",
-      paramLabel = "DIR",
-      description = "Folder for everything recorded; made if absent, one program at a time.")
-  private Path data;
+  @Mixin private RecordingOptions recording = new RecordingOptions();
 
   @Option(
       names = "--serve",
@@ -73,18 +63,23 @@ public final class HeadlessCommand implements Callable<Integer> {
   @Override
   public Integer call() throws IOException {
     if (testNotice) {
-      boolean all = NoticeTrial.run(cellarFile, Instant.now(), spec.commandLine().getOut());
+      boolean all =
+          NoticeTrial.run(recording.cellarFile(), Instant.now(), spec.commandLine().getOut());
       return all ? 0 : Faults.FAILED;
     }
-    if (data == null) {
-      throw new ParameterException(
-          spec.commandLine(), "Say with --data DIR where everything is to be recorded.");
-    }
+    Path data =
+        recording
+            .data()
+            .orElseThrow(
+                () ->
+                    new ParameterException(
+                        spec.commandLine(),
+                        "Say with --data DIR where everything is to be recorded."));
     Optional<InetSocketAddress> address =
         serve.equals(NOWHERE) ? Optional.empty() : Optional.of(ServeAddress.parse(serve));
     Optional<String> token =
         tokenFile == null ? Optional.empty() : Optional.of(TokenFile.read(tokenFile));
-    HeadlessPlan plan = new HeadlessPlan(cellarFile, data, address, token);
+    HeadlessPlan plan = new HeadlessPlan(recording.cellarFile(), data, address, token);
     HeadlessRun.untilStopped(plan, InstantSource.system(), spec.commandLine().getOut());
     return 0;
   }

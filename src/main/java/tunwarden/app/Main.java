@@ -12,6 +12,7 @@ import picocli.CommandLine.Command;
 import picocli.CommandLine.Help;
 import picocli.CommandLine.IVersionProvider;
 import picocli.CommandLine.Mixin;
+import tunwarden.app.alarms.AlarmsCommand;
 import tunwarden.app.board.RehearsalDashboard;
 import tunwarden.app.cellar.CellarCommand;
 import tunwarden.app.instruments.InstrumentsCommand;
@@ -54,6 +55,7 @@ public final class Main implements Callable<Integer> {
           ReplayCommand.class, //
           ReportCommand.class, //
           HeadlessCommand.class, //
+          AlarmsCommand.class, //
           Reckon.class, //
           RehearseCommand.class, //
           InstrumentsCommand.class, //

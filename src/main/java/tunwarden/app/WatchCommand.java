@@ -7,8 +7,8 @@ import java.util.Optional;
 import java.util.concurrent.Callable;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
-import picocli.CommandLine.Option;
 import tunwarden.app.board.LiveDashboard;
+import tunwarden.app.options.RecordingOptions;
 import tunwarden.app.options.ScreenOptions;
 import tunwarden.config.Cellar;
 import tunwarden.config.CellarFile;
@@ -23,27 +23,17 @@ import tunwarden.serial.SerialLinks;
     footerHeading = "%nExamples:%n",
     footer = {
       "  tunwarden watch",
+      "  tunwarden watch --data data",
       "  tunwarden watch --cellar lower-cellar.toml --theme monochrome --ascii"
     })
 public final class WatchCommand implements Callable<Integer> {
-  @Option(
-      names = "--cellar",
-      paramLabel = "F",
-      description = "Cellar file (default: ${DEFAULT-VALUE}).",
-      defaultValue = CellarFile.USUAL_NAME)
-  private Path cellarFile;
-
-  @Option(
-      names = "--data",
-      paramLabel = "DIR",
-      description = "Record readings and journal into this folder, as headless does.")
-  private Path data;
+  @Mixin private RecordingOptions recording = new RecordingOptions();
 
   @Mixin private ScreenOptions screen = new ScreenOptions();
 
   @Override
   public Integer call() throws IOException {
-    watch(cellarFile, Optional.ofNullable(data), screen);
+    watch(recording.cellarFile(), recording.data(), screen);
     return 0;
   }
 

@@ -42,13 +42,18 @@ public final class AlarmKeeper implements Sink {
     change(current -> current.fold(assessment));
   }
 
-  /** Applies what a person or the station itself does to the alarms; on the station's thread. */
-  public void change(Function<AlarmBook, AlarmBook.Folded> deed) {
+  /**
+   * Applies what a person or the station itself does to the alarms; on the station's thread.
+   *
+   * @return what came of it; no transitions when there was nothing to do
+   */
+  public AlarmBook.Folded change(Function<AlarmBook, AlarmBook.Folded> deed) {
     AlarmBook.Folded folded = deed.apply(book);
     book = folded.book();
     if (!folded.transitions().isEmpty()) {
       listeners.forEach(listener -> listener.changed(folded));
     }
+    return folded;
   }
 
   /** Goes back to a book kept earlier, as a replay does. */

@@ -1,6 +1,7 @@
 package tunwarden.app.headless;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertThrows;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
@@ -15,6 +16,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.Duration;
 import java.time.InstantSource;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.Callable;
@@ -23,6 +25,7 @@ import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import tunwarden.app.Ran;
 import tunwarden.units.BadInputException;
 
 /** Unattended watching as a whole, in process, over ports that the test plays. */
@@ -121,6 +124,44 @@ class HeadlessTest {
         console::toString);
     assertTrue(says("/state", "\"instrument-stale\""), "the alarm is still there");
     assertTrue(says("/events?after=0", "Watching ended."));
+  }
+
+  private String alarms(int code, String... words) {
+    List<String> args = new ArrayList<>(List.of("alarms"));
+    args.addAll(List.of(words));
+    args.addAll(List.of("--data", folder.resolve("data").toString()));
+    Ran ran = Ran.tunwarden(args.toArray(String[]::new));
+    assertEquals(code, ran.code(), ran::toString);
+    return ran.out() + ran.err();
+  }
+
+  @Test
+  void alarmsAreAcknowledgedShelvedAndNotedFromOutside() throws Exception {
+    await("metrics", () -> says("/metrics", "gauge{vessel=\"FV2\"}"));
+    links.unplugged.add("/dev/FV2");
+    await("the alarm", () -> says("/events", "instrument silent raised"));
+    String seen = alarms(0, "acknowledge", "--word", "on my way");
+    assertEquals("acknowledged: FV2 instrument silent", seen.strip());
+    assertTrue(says("/state", "\"acknowledged\""));
+    assertTrue(alarms(1, "acknowledge").contains("no such alarm waits"));
+    alarms(0, "shelve", "leak", "--vessel", "FV2", "--for", "2 h", "--word", "seal on order");
+    alarms(0, "out-of-service", "vacuum", "--vessel", "FV2", "--word", "open for cleaning");
+    alarms(0, "note", "new gauge fitted", "--vessel", "FV2");
+    alarms(0, "note", "changed the router");
+    String refused = alarms(1, "shelve", "leak", "--vessel", "FV2", "--for", "40 h", "--word", "x");
+    assertTrue(refused.contains("at most 24 h"), refused);
+    String unknown = alarms(1, "unshelve", "leak", "--vessel", "FV9");
+    assertTrue(unknown.contains("there are FV2"), unknown);
+    assertTrue(alarms(2, "unshelve", "leek", "--vessel", "FV2").contains("there are margin-low"));
+    String list = alarms(0, "list");
+    assertTrue(list.contains("FV2 leak: shelved"), list);
+    assertTrue(list.contains("Said: on my way"), list);
+    await("the notes", () -> says("/events", "new gauge fitted"));
+    assertTrue(says("/events", "changed the router"));
+    assertTrue(says("/events", "\"remark\":\"on my way\""));
+    alarms(0, "unshelve", "leak", "--vessel", "FV2");
+    alarms(0, "in-service", "vacuum", "--vessel", "FV2");
+    assertFalse(alarms(0, "list").contains("shelved"));
   }
 
   @Test
