@@ -187,6 +187,7 @@ class ArchitectureTest {
     only("org.jline..", "tunwarden.screen.terminal..");
     only("com.fazecast..", "tunwarden.serial..");
     only("picocli..", "tunwarden.app..");
+    only("com.sun.jna..", "tunwarden.app.keeping..");
     only("jakarta.mail..", "tunwarden.notice..");
     only("io.prometheus..", "tunwarden.serve..");
   }

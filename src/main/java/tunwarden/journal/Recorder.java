@@ -3,6 +3,7 @@ package tunwarden.journal;
 import java.io.Closeable;
 import java.io.IOException;
 import java.nio.file.Path;
+import java.time.Duration;
 import java.time.InstantSource;
 import java.util.List;
 import java.util.concurrent.ArrayBlockingQueue;
@@ -152,6 +153,15 @@ public final class Recorder implements Sink, Closeable {
    */
   public void keepState(StateMaker state) {
     worker.urgent(List.of(), state);
+  }
+
+  /**
+   * Waits until all entries and states handed in before are on the disk.
+   *
+   * @return false when they are not, because the disk refuses or the time is up
+   */
+  public boolean settle(Duration patience) throws InterruptedException {
+    return worker.settle(patience);
   }
 
   /**

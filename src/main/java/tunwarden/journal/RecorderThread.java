@@ -1,17 +1,14 @@
 package tunwarden.journal;
 
 import java.io.IOException;
+import java.time.Duration;
 import java.time.InstantSource;
 import java.time.LocalDate;
 import java.time.ZoneOffset;
-import java.util.ArrayDeque;
 import java.util.ArrayList;
-import java.util.Deque;
 import java.util.List;
 import java.util.concurrent.BlockingQueue;
 import java.util.concurrent.CopyOnWriteArrayList;
-import java.util.concurrent.locks.Condition;
-import java.util.concurrent.locks.ReentrantLock;
 import java.util.function.Supplier;
 import org.slf4j.Logger;
 import org.slf4j.LoggerFactory;
@@ -32,17 +29,7 @@ final class RecorderThread {
   private final List<Recorder.Listener> listeners = new CopyOnWriteArrayList<>();
   private final StateFiles states;
 
-  private final ReentrantLock lock = new ReentrantLock();
-  private final Condition woken = lock.newCondition();
-
-  /** Guarded by {@link #lock}. */
-  private final Deque<JournalEntry> urgent = new ArrayDeque<>();
-
-  /** That which follows from {@link #urgent}; guarded by {@link #lock}. */
-  private Recorder.StateMaker newestState;
-
-  /** Guarded by {@link #lock}. */
-  private boolean stopping;
+  private final UrgentBox urgent = new UrgentBox();
 
   private volatile Recorder.DiskWatch diskWatch = (failing, text) -> {};
   private volatile boolean failing;
@@ -95,18 +82,14 @@ final class RecorderThread {
     return lacking.size();
   }
 
-  /** Any thread; what is handed in together is taken out together. */
+  /** Any thread; what is handed in together goes to disk together. */
   void urgent(List<JournalEntry> entries, Recorder.StateMaker state) {
-    lock.lock();
-    try {
-      urgent.addAll(entries);
-      newestState = state == null ? newestState : state;
-      if (!entries.isEmpty()) {
-        woken.signal();
-      }
-    } finally {
-      lock.unlock();
-    }
+    urgent.put(entries, state);
+  }
+
+  /** Any thread; waits until all that was handed in before is on the disk. */
+  boolean settle(Duration patience) throws InterruptedException {
+    return urgent.settle(patience) && !failing;
   }
 
   /** Any thread. */
@@ -116,13 +99,7 @@ final class RecorderThread {
 
   /** Any thread. */
   void stop() {
-    lock.lock();
-    try {
-      stopping = true;
-      woken.signal();
-    } finally {
-      lock.unlock();
-    }
+    urgent.stop();
   }
 
   /** Any thread. */
@@ -135,7 +112,7 @@ final class RecorderThread {
     long nextFlush = System.nanoTime();
     boolean last = false;
     while (!last) {
-      Batch batch = waitFor(nextFlush);
+      UrgentBox.Batch batch = urgent.take(nextFlush);
       last = batch.last();
       try {
         commit(batch);
@@ -149,7 +126,7 @@ final class RecorderThread {
     }
     housekeeping.close();
     // The last flush may have had something to say itself.
-    commit(waitFor(System.nanoTime()));
+    commit(urgent.take(System.nanoTime()));
     try {
       files.close();
       journal.close();
@@ -158,44 +135,18 @@ final class RecorderThread {
     }
   }
 
-  /** What was handed in since the last look, and whether this is the end. */
-  private record Batch(List<JournalEntry> entries, Recorder.StateMaker state, boolean last) {}
-
-  /** Waits for entries, the next flush or the end. */
-  private Batch waitFor(long nextFlush) {
-    lock.lock();
-    try {
-      long left = nextFlush - System.nanoTime();
-      while (urgent.isEmpty() && !stopping && left > 0) {
-        left = woken.awaitNanos(left);
-      }
-      return take(stopping);
-    } catch (InterruptedException e) {
-      return take(true);
-    } finally {
-      lock.unlock();
-    }
-  }
-
-  /** With the lock held. */
-  private Batch take(boolean last) {
-    Batch batch = new Batch(List.copyOf(urgent), newestState, last);
-    urgent.clear();
-    newestState = null;
-    return batch;
-  }
-
   /**
    * The state goes to disk first, with the entries that led to it; then the entries to the journal;
    * then they are told of. A refused entry is told of all the same.
    */
-  private void commit(Batch batch) {
+  private void commit(UrgentBox.Batch batch) {
     List<JournalLines.Numbered> numbered = batch.entries().stream().map(journal::add).toList();
     saveState(batch.state());
+    boolean durable = numbered.isEmpty() || flushJournal();
+    urgent.dealtWith(batch);
     if (numbered.isEmpty()) {
       return;
     }
-    boolean durable = flushJournal();
     for (Recorder.Listener listener : listeners) {
       try {
         listener.recorded(numbered, durable);

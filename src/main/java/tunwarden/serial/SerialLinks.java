@@ -8,6 +8,8 @@ import java.nio.file.InvalidPathException;
 import java.nio.file.Path;
 import java.nio.file.attribute.BasicFileAttributes;
 import java.util.Locale;
+import org.slf4j.Logger;
+import org.slf4j.LoggerFactory;
 import tunwarden.wire.profile.LineSettings;
 
 /**
@@ -15,6 +17,7 @@ import tunwarden.wire.profile.LineSettings;
  * unplug they spin, and one that throws ends the port's thread unseen.
  */
 public final class SerialLinks implements ByteLinkFactory {
+  private static final Logger LOG = LoggerFactory.getLogger(SerialLinks.class);
   private static final int LISTEN_MS = 100;
   private static final int LINUX_BUSY = 16;
 
@@ -22,6 +25,18 @@ public final class SerialLinks implements ByteLinkFactory {
     // Keeps the unpacked native library apart from that of other programs.
     if (System.getProperty("fazecast.jSerialComm.appid") == null) {
       System.setProperty("fazecast.jSerialComm.appid", "tunwarden");
+    }
+  }
+
+  /**
+   * Loads the native library now. It makes the process ignore SIGHUP, so whoever wants that signal
+   * must ask for it after this.
+   */
+  public static void load() {
+    try {
+      LOG.debug("serial library {}", SerialPort.getVersion());
+    } catch (LinkageError none) {
+      LOG.error("serial ports cannot be used on this machine: {}", none.toString());
     }
   }
 

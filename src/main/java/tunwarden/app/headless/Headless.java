@@ -223,9 +223,13 @@ public final class Headless implements AutoCloseable {
             .submit(
                 () -> reply.complete(deeds.carryOut(request, present.cellar(), clock.instant())));
     try {
-      return taken
-          ? reply.get(ANSWER_WITHIN.toMillis(), TimeUnit.MILLISECONDS)
-          : Reply.refused("the program is too busy; ask again");
+      if (!taken) {
+        return Reply.refused("the program is too busy; ask again");
+      }
+      Reply said = reply.get(ANSWER_WITHIN.toMillis(), TimeUnit.MILLISECONDS);
+      return recorder.settle(ANSWER_WITHIN)
+          ? said
+          : new Reply(said.done(), said.text() + " (not on the disk yet: it refuses)");
     } catch (InterruptedException e) {
       Thread.currentThread().interrupt();
       return Reply.refused("the program is ending");

@@ -4,6 +4,7 @@ import java.io.IOException;
 import java.io.PrintWriter;
 import java.time.InstantSource;
 import java.util.concurrent.CountDownLatch;
+import tunwarden.app.keeping.Signals;
 import tunwarden.serial.SerialLinks;
 
 /** Keeps {@link Headless} running until the process is told to end. */
@@ -22,12 +23,14 @@ public final class HeadlessRun {
               out.println(line);
               out.flush();
             });
+    SerialLinks.load();
     headless.start();
     CountDownLatch stopped = new CountDownLatch(1);
     // Ending begins here, before the virtual machine's own shutdown: the serial library closes its
     // ports in a shutdown hook, which would look like a pulled plug.
     Signals.on("TERM", stopped::countDown);
     Signals.on("INT", stopped::countDown);
+    Signals.onHangUp(headless::reload);
     Runtime.getRuntime().addShutdownHook(new Thread(headless::close, "stop"));
     try {
       stopped.await();

@@ -1,5 +1,9 @@
-package tunwarden.app.headless;
+package tunwarden.app.keeping;
 
+import com.sun.jna.Library;
+import com.sun.jna.Native;
+import com.sun.jna.Platform;
+import com.sun.jna.Pointer;
 import java.lang.reflect.InvocationTargetException;
 import java.lang.reflect.Proxy;
 import org.slf4j.Logger;
@@ -9,13 +13,22 @@ import org.slf4j.LoggerFactory;
  * Runs a task on a signal where the system knows it. Reached by reflection, since the class is not
  * part of the standard library and may be absent.
  */
-final class Signals {
+public final class Signals {
   private static final Logger LOG = LoggerFactory.getLogger(Signals.class);
+
+  /** Its number on every Unix. */
+  private static final int SIGHUP = 1;
 
   private Signals() {}
 
+  /** The one C function that is needed. */
+  interface C extends Library {
+    /** Sets what a signal does; a null pointer is the system's own way. */
+    Pointer signal(int number, Pointer handler);
+  }
+
   /** Runs the task, on a thread of its own, whenever the signal {@code TERM}, {@code INT} comes. */
-  static void on(String name, Runnable task) {
+  public static void on(String name, Runnable task) {
     try {
       Class<?> signal = Class.forName("sun.misc.Signal");
       Class<?> handler = Class.forName("sun.misc.SignalHandler");
@@ -35,6 +48,23 @@ final class Signals {
       Throwable cause =
           absent instanceof InvocationTargetException e ? e.getTargetException() : absent;
       LOG.info("SIG{} is not listened to here: {}", name, cause.toString());
+    }
+  }
+
+  /**
+   * Runs the task on SIGHUP, for a process that has loaded the serial library: that makes the
+   * process ignore the signal, and the virtual machine takes no handler for a signal that is
+   * ignored. So the signal is set back first.
+   */
+  public static void onHangUp(Runnable task) {
+    if (Platform.isWindows()) {
+      return;
+    }
+    try {
+      Native.load("c", C.class).signal(SIGHUP, Pointer.NULL);
+      on("HUP", task);
+    } catch (LinkageError none) {
+      LOG.info("SIGHUP is not listened to here: {}", none.toString());
     }
   }
 }
