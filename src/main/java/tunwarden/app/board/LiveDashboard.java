@@ -8,6 +8,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.function.Consumer;
 import tunwarden.app.keeping.Keeping;
+import tunwarden.app.keeping.Signals;
 import tunwarden.config.Cellar;
 import tunwarden.config.PortPlans;
 import tunwarden.journal.Recorder;
@@ -34,6 +35,8 @@ public final class LiveDashboard {
   private final ByteLinkFactory links;
   private final InstantSource clock;
   private final List<PortRunner> ports = new ArrayList<>();
+  private final Thread person = Thread.currentThread();
+  private volatile boolean ending;
 
   private LiveDashboard(Cellar cellar, ByteLinkFactory links, InstantSource clock) {
     this.cellar = cellar;
@@ -52,6 +55,8 @@ public final class LiveDashboard {
       throws IOException {
     LiveDashboard dashboard = new LiveDashboard(cellar, links, clock);
     List<PortPlan> plans = PortPlans.of(cellar);
+    Signals.on("TERM", dashboard::end);
+    Signals.on("INT", dashboard::end);
     if (data.isEmpty()) {
       dashboard.watch(plans, front, Optional.empty());
       return;
@@ -62,6 +67,22 @@ public final class LiveDashboard {
       Keeping keeping = new Keeping(recorder, disk, clock, said::add);
       recorder.start();
       dashboard.watch(plans, front, Optional.of(new Record(recorder, keeping, said)));
+    }
+  }
+
+  /**
+   * Ends by way of the person's thread, before the virtual machine's own shutdown: the serial
+   * library closes its ports in a shutdown hook, which would look like a pulled plug.
+   */
+  private void end() {
+    ending = true;
+    person.interrupt();
+  }
+
+  /** A port that is being closed has nothing to say about its instruments. */
+  private void take(Sample sample, Consumer<Sample> inlet) {
+    if (!ending) {
+      inlet.accept(sample);
     }
   }
 
@@ -92,7 +113,8 @@ public final class LiveDashboard {
           r.said().forEach(words -> assembly.board().write(note(words)));
         });
     try (StationLoop loop = new StationLoop(assembly.station(), clock)) {
-      Consumer<Sample> inlet = PairGate.over(plans, loop.inlet());
+      Consumer<Sample> open = loop.inlet();
+      Consumer<Sample> inlet = PairGate.over(plans, sample -> take(sample, open));
       plans.forEach(plan -> ports.add(new PortRunner(plan, links, inlet, clock)));
       loop.start();
       ports.forEach(PortRunner::start);
@@ -100,7 +122,10 @@ public final class LiveDashboard {
           new LiveDesk.Hands(
               assembly.station(), loop, assembly.alarms(), assembly.board(), front.looks()::keep);
       Dashboard.run(assembly.board()::latest, new LiveDesk(hands, clock), front.options());
+      // The interrupt has done its work; what follows must be waited for.
+      Thread.interrupted();
     } finally {
+      ending = true;
       ports.forEach(PortRunner::close);
     }
     record.ifPresent(r -> r.keeping().keep());
