@@ -19,6 +19,7 @@ final class RowOrder {
   private final List<LogRow> held = new ArrayList<>(WINDOW + 1);
   private final ArrayDeque<LogRow> ready = new ArrayDeque<>();
   private final Map<String, LogRow> newest = new HashMap<>();
+  private LogRow released;
 
   RowOrder(LogNotes notes) {
     this.notes = notes;
@@ -46,7 +47,7 @@ final class RowOrder {
   }
 
   private void release(LogRow row) {
-    LogRow last = newest.get(row.vessel());
+    LogRow last = newestOf(row.vessel());
     if (last != null && !row.time().isAfter(last.time())) {
       if (row.time().equals(last.time())) {
         notes.countDuplicate(sameValues(row.samples(), last.samples()));
@@ -55,8 +56,18 @@ final class RowOrder {
       }
       return;
     }
-    newest.put(row.vessel(), row);
+    released = row;
     ready.add(row);
+  }
+
+  /** Most logs speak of one vessel for long, so the map is asked only when that changes. */
+  private LogRow newestOf(String vessel) {
+    if (released == null || released.vessel().equals(vessel)) {
+      return released;
+    }
+    newest.put(released.vessel(), released);
+    released = newest.get(vessel);
+    return released;
   }
 
   /** Samples are records, so equality is equality of values. */

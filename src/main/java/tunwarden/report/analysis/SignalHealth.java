@@ -1,18 +1,19 @@
 package tunwarden.report.analysis;
 
+import java.util.Arrays;
 import java.util.EnumMap;
 import java.util.Map;
 import tunwarden.reading.Quality;
 
 /** How one instrument behaved over the log. Fed row by row; read when done. */
 public final class SignalHealth {
-  private final Map<Quality, Long> counts = new EnumMap<>(Quality.class);
+  private final long[] counts = new long[Quality.values().length];
   private double least = Double.POSITIVE_INFINITY;
   private double greatest = Double.NEGATIVE_INFINITY;
   private long values;
 
   void value(double si, Quality quality) {
-    counts.merge(quality, 1L, Long::sum);
+    counts[quality.ordinal()]++;
     if (!quality.isBad()) {
       values++;
       least = Math.min(least, si);
@@ -21,7 +22,7 @@ public final class SignalHealth {
   }
 
   void fault(Quality quality) {
-    counts.merge(quality, 1L, Long::sum);
+    counts[quality.ordinal()]++;
   }
 
   /** Values that could be used. */
@@ -39,14 +40,20 @@ public final class SignalHealth {
     return greatest;
   }
 
-  /** How many values had each quality. */
+  /** How many values had each quality; a quality that none had is left out. */
   public Map<Quality, Long> counts() {
-    return counts;
+    Map<Quality, Long> met = new EnumMap<>(Quality.class);
+    for (Quality quality : Quality.values()) {
+      if (counts[quality.ordinal()] > 0) {
+        met.put(quality, counts[quality.ordinal()]);
+      }
+    }
+    return met;
   }
 
   /** Share of values that were good, 0..1. */
   public double goodShare() {
-    long all = counts.values().stream().mapToLong(Long::longValue).sum();
-    return all == 0 ? 0 : counts.getOrDefault(Quality.GOOD, 0L) / (double) all;
+    long all = Arrays.stream(counts).sum();
+    return all == 0 ? 0 : counts[Quality.GOOD.ordinal()] / (double) all;
   }
 }

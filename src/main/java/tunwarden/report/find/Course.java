@@ -52,7 +52,7 @@ final class Course {
     double sumTt = 0;
     double sumTp = 0;
     for (int i = 0; i < count; i++) {
-      double t = (ms[i] - originMs) / 1000.0;
+      double t = ms[i] - originMs;
       sumT += t;
       sumP += pa[i];
       sumTt += t * t;
@@ -60,8 +60,7 @@ final class Course {
     }
     double spread = sumTt - sumT * sumT / count;
     double slope = spread > 0 ? (sumTp - sumT * sumP / count) / spread : 0;
-    double at = (whenMs - originMs) / 1000.0 - sumT / count;
-    return sumP / count + slope * at;
+    return sumP / count + slope * (whenMs - originMs - sumT / count);
   }
 
   /** How much less certain the line is at a time outside its rows; 1 amid them. */
@@ -69,7 +68,7 @@ final class Course {
     double sum = 0;
     double squares = 0;
     for (int i = 0; i < count; i++) {
-      double t = (ms[i] - whenMs) / 1000.0;
+      double t = ms[i] - whenMs;
       sum += t;
       squares += t * t;
     }

@@ -32,6 +32,7 @@ final class StillTracker {
   }
 
   private final List<Stretch> longest = new ArrayList<>();
+  private long leastMs = -1; // what is no longer than this cannot be among the longest
   private Point first;
   private Point last;
 
@@ -51,6 +52,9 @@ final class StillTracker {
   }
 
   private void close(double after) {
+    if (last.ms() - first.ms() <= leastMs) {
+      return;
+    }
     longest.add(
         new Stretch(first.ms(), last.ms(), first.paGauge(), after, first.kelvin(), last.kelvin()));
     if (longest.size() > 2 * KEPT) {
@@ -61,6 +65,8 @@ final class StillTracker {
   private void trim() {
     longest.sort(Comparator.comparingDouble(Stretch::seconds).reversed());
     longest.subList(KEPT, longest.size()).clear();
+    Stretch shortest = longest.get(KEPT - 1);
+    leastMs = shortest.untilMs() - shortest.fromMs();
   }
 
   /** The longest first. */
