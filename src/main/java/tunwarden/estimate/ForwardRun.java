@@ -15,6 +15,8 @@ public final class ForwardRun {
   private static final int LOW = 0;
   private static final int MIDDLE = 1;
   private static final int HIGH = 2;
+  private static final double TAIL = 0.025;
+  private static final double[] ALL = {0.5, TAIL, 1 - TAIL};
 
   private ForwardRun() {}
 
@@ -40,24 +42,26 @@ public final class ForwardRun {
             bank.senses().warmingKPerS(),
             bank.medium().vessel().warmToK());
     int points = (int) (horizon.toMillis() / step.toMillis()) + 1;
-    double[][] middle = along(bank, paths[MIDDLE], points, step);
-    double[][] low = paths[MIDDLE].isStill() ? middle : along(bank, paths[LOW], points, step);
-    double[][] high = paths[MIDDLE].isStill() ? middle : along(bank, paths[HIGH], points, step);
+    boolean still = paths[MIDDLE].isStill();
+    double[][] middle = along(bank, paths[MIDDLE], points, step, still ? ALL : new double[] {0.5});
+    double[][] low = still ? middle : along(bank, paths[LOW], points, step, 0.5, TAIL);
+    double[][] high = still ? middle : along(bank, paths[HIGH], points, step, 0.5, 1 - TAIL);
     List<ForwardPoint> run = new ArrayList<>();
     for (int i = 0; i < points; i++) {
-      double likely = middle[i][MIDDLE];
+      double likely = middle[i][0];
       run.add(
           new ForwardPoint(
               step.multipliedBy(i),
               likely,
-              Math.min(likely, low[i][LOW]),
-              Math.max(likely, high[i][HIGH])));
+              Math.min(likely, low[i][1]),
+              Math.max(likely, high[i][high[i].length - 1])));
     }
     return run;
   }
 
-  /** Quantiles of the pressure along one temperature path, Pa gauge, by point. */
-  private static double[][] along(BankState bank, TemperaturePath path, int points, Duration step) {
+  /** Quantiles of the pressure along one temperature path, the median first, Pa gauge, by point. */
+  private static double[][] along(
+      BankState bank, TemperaturePath path, int points, Duration step, double... shares) {
     double seconds = step.toMillis() / 1000.0;
     Ahead ahead = new Ahead(new BankFilter(bank.medium()), bank.bank());
     double[][] run = new double[points][];
@@ -65,10 +69,10 @@ public final class ForwardRun {
       double kelvin = path.at(i * seconds);
       double vapourPa = bank.medium().vapourPa(kelvin);
       if (i > 0) {
-        double before = run[i - 1][MIDDLE] + bank.ambientPa();
+        double before = run[i - 1][0] + bank.ambientPa();
         ahead.advance(seconds, kelvin, before);
       }
-      double[] pa = ahead.dryPressure();
+      double[] pa = ahead.dryPressure(shares);
       for (int q = 0; q < pa.length; q++) {
         pa[q] += vapourPa - bank.ambientPa();
       }

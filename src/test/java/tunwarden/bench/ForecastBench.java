@@ -1,6 +1,7 @@
 package tunwarden.bench;
 
 import java.time.Instant;
+import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.concurrent.TimeUnit;
@@ -16,7 +17,7 @@ import org.openjdk.jmh.annotations.State;
 import org.openjdk.jmh.annotations.Warmup;
 import tunwarden.estimate.Mode;
 import tunwarden.forecast.Ensemble;
-import tunwarden.forecast.Forecaster;
+import tunwarden.forecast.Hindsight;
 import tunwarden.forecast.Outlook;
 import tunwarden.forecast.Present;
 import tunwarden.forecast.Uncertain;
@@ -27,10 +28,12 @@ import tunwarden.forecast.seal.SealQuestion;
 import tunwarden.forecast.vent.Vent;
 import tunwarden.forecast.vent.VentAnswer;
 import tunwarden.forecast.vent.VentQuestion;
+import tunwarden.forecast.whatif.Foresight;
 import tunwarden.physics.liquid.Liquid;
 import tunwarden.physics.liquid.LiquidKind;
 import tunwarden.units.Constants;
 import tunwarden.vessel.Limits;
+import tunwarden.vessel.Prospects;
 import tunwarden.vessel.ReliefOrifice;
 import tunwarden.vessel.ReliefSetting;
 import tunwarden.vessel.Room;
@@ -56,27 +59,44 @@ public class ForecastBench {
   private VentQuestion vent;
   private SealQuestion seal;
 
-  /** A vessel of 2 m³ with everything described. */
+  /** A vessel of 2 m³ of which everything is told. */
+  static Vessel described() {
+    Vessel plain = Vessel.plain("FV2", 2, 1.8, Liquid.of(LiquidKind.BEER));
+    return new Vessel(
+        "FV2",
+        "",
+        2,
+        1.8,
+        plain.contents(),
+        plain.closure(),
+        new Limits(
+            Optional.of(ReliefSetting.iso4126(1.5e5)),
+            OptionalDouble.of(2e5),
+            OptionalDouble.empty()),
+        Optional.of(new ReliefOrifice(0.015, 0.6)),
+        plain.site(),
+        OptionalDouble.of(COLD_K + 20),
+        plain.accuracy(),
+        new Prospects(
+            Optional.of(
+                new Prospects.Ferment(
+                    OptionalDouble.of(12), OptionalDouble.of(3.2), 2.8, OptionalDouble.empty())),
+            Optional.of(new Prospects.Target(5, OptionalDouble.of(COLD_K))),
+            Optional.of(
+                new Prospects.Supply(
+                    8e5, Optional.of(new ReliefOrifice(0.003, 0.6)), OptionalDouble.empty())),
+            OptionalDouble.of(40 * 3600),
+            OptionalDouble.of(12)));
+  }
+
+  static Hindsight hindsight() {
+    return Hindsight.NONE.gravity(Instant.EPOCH.minusSeconds(7200), 3.1);
+  }
+
+  /** The vessel with a laboratory-like value of its gas. */
   @Setup
   public void fill() {
-    Vessel plain = Vessel.plain("FV2", 2, 1.8, Liquid.of(LiquidKind.BEER));
-    Vessel vessel =
-        new Vessel(
-            "FV2",
-            "",
-            2,
-            1.8,
-            plain.contents(),
-            plain.closure(),
-            new Limits(
-                Optional.of(ReliefSetting.iso4126(1.5e5)),
-                OptionalDouble.of(2e5),
-                OptionalDouble.empty()),
-            plain.orifice(),
-            plain.site(),
-            OptionalDouble.of(COLD_K + 20),
-            plain.accuracy(),
-            plain.prospects());
+    Vessel vessel = described();
     present =
         new Present(
             vessel,
@@ -98,10 +118,10 @@ public class ForecastBench {
             3.2, 2.8, OptionalDouble.of(12), FermentationRate.UNKNOWN, Optional.empty());
   }
 
-  /** What every assessment asks for. */
+  /** All that is worked out of a vessel, but for the estimator's forward run. */
   @Benchmark
   public Outlook outlook() {
-    return Forecaster.outlook(present);
+    return Foresight.outlook(present, List.of(), hindsight());
   }
 
   /** One position of the vent bench. */

@@ -5,7 +5,6 @@ import java.util.Arrays;
 /** Runs a bank forward without readings, everything staying connected as it is. */
 public final class Ahead {
   private static final double LEAST_WEIGHT = 2e-3;
-  private static final double TAIL = 0.025;
 
   private final BankFilter filter;
   private final Bank bank;
@@ -59,13 +58,17 @@ public final class Ahead {
     }
   }
 
-  /** Dry absolute pressure now: 2.5, 50 and 97.5 % quantiles, Pa. */
-  public double[] dryPressure() {
+  /** Dry absolute pressure now: the values below which these shares of the belief lie, Pa. */
+  public double[] dryPressure(double... shares) {
     Mixture mixture = new Mixture(kept.length);
     for (int i = 0; i < kept.length; i++) {
       double mean = BankFilter.predict(filters[i], Grid.modeOf(kept[i]), row);
       mixture.add(bank.weights[kept[i]], mean, filters[i].varianceOf(row));
     }
-    return new double[] {mixture.quantile(TAIL), mixture.quantile(0.5), mixture.quantile(1 - TAIL)};
+    double[] pa = new double[shares.length];
+    for (int i = 0; i < pa.length; i++) {
+      pa[i] = mixture.quantile(shares[i]);
+    }
+    return pa;
   }
 }
