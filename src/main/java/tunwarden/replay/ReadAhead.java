@@ -1,5 +1,6 @@
 package tunwarden.replay;
 
+import java.io.Closeable;
 import java.io.IOException;
 import java.util.ArrayList;
 import java.util.List;
@@ -7,33 +8,43 @@ import java.util.concurrent.ArrayBlockingQueue;
 import java.util.concurrent.BlockingQueue;
 
 /**
- * Reads rows on a thread of its own, a few batches ahead of the one who takes them, so that reading
- * and working out go on at the same time. Memory is bounded. What the source has to tell besides
- * its rows may be asked once {@link #next} has returned null.
+ * Draws from a source on a thread of its own, a few batches ahead of the one who takes, so that
+ * reading and working out go on at the same time. Memory is bounded. What the source has to tell
+ * besides may be asked once {@link #next} has returned null.
+ *
+ * @param <T> what is drawn
  */
-public final class ReadAhead implements RowSource {
+public final class ReadAhead<T> implements Closeable {
   private static final int BATCH = 1024;
   private static final int BATCHES = 8;
 
   /**
-   * Some rows in order.
+   * What is drawn from; null when there is no more.
    *
-   * @param rows none or more
+   * @param <T> what it gives
+   */
+  public interface Source<T> {
+    /** The next one. */
+    T next() throws IOException;
+  }
+
+  /**
+   * Some in order.
+   *
+   * @param items none or more
    * @param last whether nothing follows
    * @param failure what ended the source early; null for nothing
    */
-  private record Batch(List<LogRow> rows, boolean last, Throwable failure) {
-    static final Batch NONE_YET = new Batch(List.of(), false, null);
-  }
+  private record Batch<T>(List<T> items, boolean last, Throwable failure) {}
 
-  private final RowSource source;
-  private final BlockingQueue<Batch> ready = new ArrayBlockingQueue<>(BATCHES);
+  private final Source<T> source;
+  private final BlockingQueue<Batch<T>> ready = new ArrayBlockingQueue<>(BATCHES);
   private final Thread reader;
-  private Batch batch = Batch.NONE_YET;
+  private Batch<T> batch = new Batch<>(List.of(), false, null);
   private int taken;
 
   /** Begins to read at once. */
-  public ReadAhead(RowSource source) {
+  public ReadAhead(Source<T> source) {
     this.source = source;
     this.reader = new Thread(this::readAll, "rows");
     reader.setDaemon(true);
@@ -42,7 +53,7 @@ public final class ReadAhead implements RowSource {
 
   private void readAll() {
     try {
-      Batch filled;
+      Batch<T> filled;
       do {
         filled = fill();
         ready.put(filled);
@@ -52,25 +63,25 @@ public final class ReadAhead implements RowSource {
     }
   }
 
-  private Batch fill() {
-    List<LogRow> rows = new ArrayList<>(BATCH);
+  private Batch<T> fill() {
+    List<T> items = new ArrayList<>(BATCH);
     try {
-      while (rows.size() < BATCH) {
-        LogRow row = source.next();
-        if (row == null) {
-          return new Batch(rows, true, null);
+      while (items.size() < BATCH) {
+        T item = source.next();
+        if (item == null) {
+          return new Batch<>(items, true, null);
         }
-        rows.add(row);
+        items.add(item);
       }
-      return new Batch(rows, false, null);
+      return new Batch<>(items, false, null);
     } catch (IOException | RuntimeException | Error failed) {
-      return new Batch(rows, true, failed);
+      return new Batch<>(items, true, failed);
     }
   }
 
-  @Override
-  public LogRow next() throws IOException {
-    while (taken == batch.rows().size()) {
+  /** The next one, or null when there is no more; what the source throws is thrown here. */
+  public T next() throws IOException {
+    while (taken == batch.items().size()) {
       rethrow(batch.failure());
       if (batch.last()) {
         return null;
@@ -78,10 +89,10 @@ public final class ReadAhead implements RowSource {
       batch = await();
       taken = 0;
     }
-    return batch.rows().get(taken++);
+    return batch.items().get(taken++);
   }
 
-  private Batch await() throws IOException {
+  private Batch<T> await() throws IOException {
     try {
       return ready.take();
     } catch (InterruptedException stopped) {
@@ -102,14 +113,14 @@ public final class ReadAhead implements RowSource {
     }
   }
 
+  /** Stops drawing and waits until the thread has let go of the source, which stays open. */
   @Override
-  public void close() throws IOException {
+  public void close() {
     reader.interrupt();
     try {
       reader.join();
     } catch (InterruptedException stopped) {
       Thread.currentThread().interrupt();
     }
-    source.close();
   }
 }

@@ -13,10 +13,12 @@ import tunwarden.forecast.Present;
 import tunwarden.replay.BadLogException;
 import tunwarden.replay.LogFile;
 import tunwarden.replay.LogRow;
+import tunwarden.replay.ReadAhead;
 import tunwarden.report.analysis.Analysis;
 import tunwarden.report.analysis.Analyst;
 import tunwarden.report.analysis.ReportRow;
 import tunwarden.report.analysis.RowSpool;
+import tunwarden.report.analysis.Sifted;
 import tunwarden.report.analysis.Smoother;
 import tunwarden.report.otherwise.Rerun;
 import tunwarden.report.otherwise.WhatIf;
@@ -78,8 +80,9 @@ public final class Reporter {
     Analyst analyst = new Analyst(source.vessel(), estimator);
     Spacing spacing = new Spacing(settings.every());
     try (VesselRows rows = new VesselRows(source.logs(), source.vessel().id(), true);
+        ReadAhead<Sifted> sifted = new ReadAhead<>(() -> sift(analyst, rows.next()));
         RowSpool spool = new RowSpool()) {
-      for (LogRow row = rows.next(); row != null; row = rows.next()) {
+      for (Sifted row = sifted.next(); row != null; row = sifted.next()) {
         ReportRow known = analyst.take(row);
         if (series.isPresent() && spacing.isDue(known.time())) {
           spool.add(known);
@@ -98,6 +101,10 @@ public final class Reporter {
           new Chapter.Origin(rows.inputs(), rows.notes(), settings.command(), settings.program());
       return chapter(source, analysis, belief, zone, origin);
     }
+  }
+
+  private static Sifted sift(Analyst analyst, LogRow row) {
+    return row == null ? null : analyst.sifter().sift(row);
   }
 
   private static void requirePressure(Source source, Analysis analysis) {

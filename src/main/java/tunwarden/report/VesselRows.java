@@ -9,7 +9,6 @@ import tunwarden.replay.BadLogException;
 import tunwarden.replay.LogFile;
 import tunwarden.replay.LogReader;
 import tunwarden.replay.LogRow;
-import tunwarden.replay.ReadAhead;
 import tunwarden.replay.RowSource;
 import tunwarden.report.story.Chapter;
 
@@ -21,7 +20,6 @@ final class VesselRows implements RowSource {
   private final List<String> notes = new ArrayList<>();
   private final List<Chapter.Input> inputs = new ArrayList<>();
   private LogReader reader;
-  private ReadAhead rows;
   private int next;
   private long lastMs = Long.MIN_VALUE;
   private long overlapping;
@@ -54,10 +52,10 @@ final class VesselRows implements RowSource {
   @Override
   public LogRow next() throws IOException {
     while (true) {
-      if (rows == null && !openNext()) {
+      if (reader == null && !openNext()) {
         return null;
       }
-      LogRow row = rows.next();
+      LogRow row = reader.next();
       if (row == null) {
         finishLog();
       } else if (row.vessel().equals(vessel)) {
@@ -77,7 +75,6 @@ final class VesselRows implements RowSource {
     }
     LogFile log = logs.get(next++);
     reader = hashing ? log.openHashed() : log.open();
-    rows = new ReadAhead(reader);
     return true;
   }
 
@@ -118,9 +115,9 @@ final class VesselRows implements RowSource {
 
   @Override
   public void close() throws IOException {
-    if (rows != null) {
-      rows.close();
-      rows = null;
+    if (reader != null) {
+      reader.close();
+      reader = null;
     }
   }
 }

@@ -1,24 +1,16 @@
 package tunwarden.report.analysis;
 
-import java.time.Instant;
+import java.util.ArrayList;
 import java.util.EnumMap;
 import java.util.List;
 import java.util.Map;
-import java.util.function.Consumer;
-import tunwarden.estimate.Estimator;
-import tunwarden.estimate.Event;
-import tunwarden.estimate.State;
-import tunwarden.estimate.Step;
 import tunwarden.reading.Quantity;
 import tunwarden.reading.Reading;
-import tunwarden.reading.Sample;
-import tunwarden.vessel.Vessel;
 
 /**
- * Stands before the estimator and steps it no more often than the signals carry news: readings that
- * stay within their noise are averaged over a minute, or five while even the average rests; one
- * that leaves it is passed on at once, and for a while after it the averages are short. Give it
- * usable readings only.
+ * Stands before the estimator and lets through no more than the signals carry news: readings that
+ * stay within their noise are averaged over up to a minute, one that leaves it goes through at
+ * once, and for a while after it the averages are short. Give it usable readings only.
  */
 final class Thinner {
   private static final long CALM_MS = 60_000;
@@ -26,25 +18,11 @@ final class Thinner {
   private static final long STAYS_LIVELY_MS = 180_000;
   private static final double TELLING_K = 0.5;
 
-  private final Estimator estimator;
-  private final Consumer<List<Event>> news;
   private final Map<Quantity, Mean> besides = new EnumMap<>(Quantity.class);
   private final Mean pressure = new Mean();
-  private State state;
+  private List<Reading> through = new ArrayList<>();
   private boolean stirred;
   private long livelyUntilMs = Long.MIN_VALUE;
-
-  /** A thinner for one vessel; {@code news} takes what the estimator reports. */
-  Thinner(Vessel vessel, Estimator estimator, Consumer<List<Event>> news) {
-    this.estimator = estimator;
-    this.news = news;
-    this.state = estimator.begin(vessel);
-  }
-
-  /** The estimator's newest state. */
-  State state() {
-    return state;
-  }
 
   /** Keeps what goes with the next pressure: temperature, barometer. */
   void beside(Reading reading) {
@@ -53,14 +31,14 @@ final class Thinner {
         reading.quantity() == Quantity.TEMPERATURE && mean.isAway(reading.value(), TELLING_K);
     mean.add(reading);
     if (pressure.isEmpty() && mean.lengthMs() > 2 * CALM_MS) {
-      step(mean.pass()); // nothing to go with
+      through.add(mean.pass()); // nothing to go with
     }
   }
 
-  /** Passes on at once what is rare and means much: a laboratory value. */
+  /** Lets through at once what is rare and means much: a laboratory value. */
   void rare(Reading reading) {
     flush();
-    step(reading);
+    through.add(reading);
   }
 
   /**
@@ -81,13 +59,7 @@ final class Thinner {
     }
   }
 
-  /** Tells of a silence. */
-  void idle(Instant now) {
-    flush();
-    take(estimator.idle(state, now));
-  }
-
-  /** Passes on what is kept. */
+  /** Lets through what is kept. */
   void flush() {
     if (pressure.isEmpty()) {
       return;
@@ -95,20 +67,19 @@ final class Thinner {
     stirred = false;
     for (Mean mean : besides.values()) {
       if (!mean.isEmpty()) {
-        step(mean.pass());
+        through.add(mean.pass());
       }
     }
-    step(pressure.pass());
+    through.add(pressure.pass());
   }
 
-  private void step(Sample sample) {
-    take(estimator.step(state, sample));
-  }
-
-  private void take(Step step) {
-    state = step.next();
-    if (!step.events().isEmpty()) {
-      news.accept(step.events());
+  /** What went through since this was last asked, in order. */
+  List<Reading> take() {
+    if (through.isEmpty()) {
+      return List.of();
     }
+    List<Reading> taken = through;
+    through = new ArrayList<>();
+    return taken;
   }
 }

@@ -13,42 +13,16 @@ import tunwarden.estimate.Estimate;
 import tunwarden.estimate.Estimator;
 import tunwarden.estimate.Estimators;
 import tunwarden.estimate.State;
-import tunwarden.estimate.Step;
 import tunwarden.physics.liquid.Liquid;
 import tunwarden.physics.liquid.LiquidKind;
 import tunwarden.reading.Quantity;
 import tunwarden.reading.Reading;
-import tunwarden.reading.Sample;
 import tunwarden.vessel.Vessel;
 
 /** The estimator is stepped seldom while nothing happens, and at once when something does. */
 class ThinnerTest {
   private static final double TELLING_PA = 350;
   private static final Vessel VESSEL = Vessel.plain("T", 2.0, 1.8, Liquid.of(LiquidKind.BEER));
-
-  /** Keeps the pressures that reach the estimator. */
-  private static final class Listening implements Estimator {
-    final Estimator estimator = Estimators.wordless();
-    final List<Reading> pressures = new ArrayList<>();
-
-    @Override
-    public State begin(Vessel vessel) {
-      return estimator.begin(vessel);
-    }
-
-    @Override
-    public Step step(State previous, Sample sample) {
-      if (sample instanceof Reading reading && reading.quantity() == Quantity.PRESSURE) {
-        pressures.add(reading);
-      }
-      return estimator.step(previous, sample);
-    }
-
-    @Override
-    public Step idle(State previous, Instant now) {
-      return estimator.idle(previous, now);
-    }
-  }
 
   private static Reading pressure(long second, double pa) {
     return Reading.good(Instant.ofEpochSecond(second), "T", Quantity.PRESSURE, pa);
@@ -58,12 +32,29 @@ class ThinnerTest {
     return Reading.good(Instant.ofEpochSecond(second), "T", Quantity.TEMPERATURE, kelvin);
   }
 
-  private final Listening listening = new Listening();
-  private final Thinner thinner = new Thinner(VESSEL, listening, news -> {});
+  private final Estimator estimator = Estimators.wordless();
+  private final Thinner thinner = new Thinner();
+  private final List<Reading> pressures = new ArrayList<>();
+  private State state = estimator.begin(VESSEL);
 
   private void row(long second, double pa) {
     thinner.beside(temperature(second, 277.15));
     thinner.pressure(pressure(second, pa), TELLING_PA);
+    follow();
+  }
+
+  private void follow() {
+    for (Reading reading : thinner.take()) {
+      state = estimator.step(state, reading).next();
+      if (reading.quantity() == Quantity.PRESSURE) {
+        pressures.add(reading);
+      }
+    }
+  }
+
+  private void finish() {
+    thinner.flush();
+    follow();
   }
 
   @Test
@@ -72,10 +63,10 @@ class ThinnerTest {
     for (int t = 0; t < 6 * 3600; t++) {
       row(t, 1e5 + 60 * random.nextGaussian());
     }
-    thinner.flush();
-    int steps = listening.pressures.size();
+    finish();
+    int steps = pressures.size();
     assertTrue(steps >= 360 && steps < 400, "steps " + steps);
-    listening.pressures.stream().skip(20).forEach(mean -> assertEquals(1e5, mean.value(), 60));
+    pressures.stream().skip(20).forEach(mean -> assertEquals(1e5, mean.value(), 60));
   }
 
   @Test
@@ -84,13 +75,13 @@ class ThinnerTest {
       row(t, t < 3000 ? 1e5 : Math.max(2e4, 1e5 - 4e3 * (t - 3000)));
     }
     List<Long> falling =
-        listening.pressures.stream()
+        pressures.stream()
             .map(reading -> reading.time().getEpochSecond())
             .filter(t -> t > 3000 && t <= 3020)
             .toList();
     assertEquals(20, falling.size());
     assertTrue(
-        listening.pressures.stream().anyMatch(r -> r.time().getEpochSecond() == 3000),
+        pressures.stream().anyMatch(r -> r.time().getEpochSecond() == 3000),
         "what came before is passed on up to the last row");
   }
 
@@ -99,25 +90,25 @@ class ThinnerTest {
     for (int t = 0; t < 36_000; t += 60) {
       row(t, 1e5 + t % 100);
     }
-    assertEquals(600, listening.pressures.size());
-    assertEquals(1e5 + 60, listening.pressures.get(1).value());
+    assertEquals(600, pressures.size());
+    assertEquals(1e5 + 60, pressures.get(1).value());
   }
 
   /** Thinned or not, the belief comes to the same. */
   @Test
   void theBeliefIsThatOfAllRows() {
     Random random = new Random(8);
-    State all = listening.estimator.begin(VESSEL);
+    State all = estimator.begin(VESSEL);
     for (int t = 0; t < 4 * 3600; t++) {
       double pa = (t < 7200 ? 1e5 : 8e4 + 1e4 * -Math.expm1(-(t - 7200) / 2000.0));
       pa += 50 * random.nextGaussian();
       row(t, pa);
-      all = listening.estimator.step(all, temperature(t, 277.15)).next();
-      all = listening.estimator.step(all, pressure(t, pa)).next();
+      all = estimator.step(all, temperature(t, 277.15)).next();
+      all = estimator.step(all, pressure(t, pa)).next();
     }
-    thinner.flush();
+    finish();
     Estimate full = all.estimate().orElseThrow();
-    Optional<Estimate> thin = thinner.state().estimate();
+    Optional<Estimate> thin = state.estimate();
     double off = thin.orElseThrow().dissolvedKgPerM3() - full.dissolvedKgPerM3();
     assertTrue(Math.abs(off) < 0.5 * full.dissolvedU95KgPerM3(), "off by " + off);
     assertEquals(
