@@ -88,7 +88,7 @@ final class Cautions {
             String.format(
                 Locale.ROOT,
                 "At %s the liquid fills the vessel; from there a steel shell gains about %.1f to"
-                    + " %.1f bar per degree, and a relief valve passes liquid: draw some off first.",
+                    + " %.1f bar per °C, and a relief valve passes liquid: draw some off first.",
                 Words.celsius(fullK.getAsDouble()),
                 full.risePaPerK(THIN_SHELL) / BAR,
                 full.risePaPerK(STOUT_SHELL) / BAR)));

@@ -24,6 +24,7 @@ import tunwarden.forecast.Projection;
 import tunwarden.forecast.Scenario;
 import tunwarden.forecast.TimeRange;
 import tunwarden.forecast.TrendPoint;
+import tunwarden.forecast.WhatIf;
 import tunwarden.physics.liquid.Liquid;
 import tunwarden.physics.liquid.LiquidKind;
 import tunwarden.reading.Quality;
@@ -285,7 +286,54 @@ public final class Boards {
         List.of(
             new Caution(
                 true, "A vent of 3.5 kg here brings the room to 9,700 ppm without the fan.")),
-        List.of());
+        vessel.limits().relief().isPresent() ? whatIfs(bar) : List.of());
+  }
+
+  private static List<WhatIf> whatIfs(double bar) {
+    TimeRange warming =
+        new TimeRange(
+            Duration.ofHours(19), Duration.ofHours(15), Optional.of(Duration.ofMinutes(2470)));
+    TimeRange filling =
+        new TimeRange(
+            Duration.ofSeconds(42), Duration.ofSeconds(35), Optional.of(Duration.ofSeconds(50)));
+    return List.of(
+        new WhatIf(
+            WhatIf.Kind.WARM,
+            "warmed to 24 °C",
+            Optional.of(spread(bar + 0.41)),
+            Optional.of(warming),
+            "time constant 40 h (33 to 48 h), learnt from its warming from 4 to 9.2 °C on"
+                + " 2026-02-27",
+            "shut, cooling lost now; at the end at rest with the air about it",
+            List.of(new Caution(true, "Keep it cold or let it down first."))),
+        new WhatIf(
+            WhatIf.Kind.SUPPLY,
+            "supply fails open",
+            Optional.of(new Estimate.Spread(8 * BAR, 8 * BAR, 8 * BAR)),
+            Optional.of(filling),
+            "the setting of 1.50 bar g in 55 s",
+            "regulator open all the way, nothing lets gas out",
+            List.of()),
+        new WhatIf(
+            WhatIf.Kind.RELIEF,
+            "relief valve passes",
+            Optional.empty(),
+            Optional.empty(),
+            "278 kg/h of gas at 1.65 bar g; used by fermentation 1 %, supply 14 %",
+            "gas alone: foam and two-phase flow are not covered",
+            List.of()),
+        new WhatIf(
+            WhatIf.Kind.DRAW,
+            "drawn off, no gas let in",
+            Optional.of(spread(-0.82)),
+            Optional.empty(),
+            "183 L (161 to 205) already reach the vacuum limit of -0.02 bar g",
+            "all of the liquid, so quickly that it gives off no gas meanwhile",
+            List.of()));
+  }
+
+  private static Estimate.Spread spread(double bar) {
+    return new Estimate.Spread((bar - 0.04) * BAR, bar * BAR, (bar + 0.05) * BAR);
   }
 
   private static Projection projection(Scenario scenario, String words, double bar) {

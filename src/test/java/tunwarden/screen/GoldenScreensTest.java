@@ -56,6 +56,35 @@ class GoldenScreensTest {
     GoldenFile.check(name, page == Page.VENT ? withoutNumbers(text) : text);
   }
 
+  static Stream<Arguments> tables() {
+    return Stream.of(SIZES)
+        .flatMap(
+            size ->
+                Stream.of(Glyphs.BLOCKS, Glyphs.ASCII).map(glyphs -> Arguments.of(size, glyphs)));
+  }
+
+  /** The table of what may happen, its third row told in full. */
+  @ParameterizedTest
+  @MethodSource("tables")
+  void theTableOfWhatMayHappenLooksAsRecorded(Size size, Glyphs glyphs) throws IOException {
+    Look look = new Look(Display.METRIC, Theme.DARK, glyphs);
+    Model model = Model.start(Boards.three(Origin.REHEARSAL, Boards.NOW), look, size);
+    for (Key key :
+        new Key[] {
+          Key.typed('v'), Key.typed('f'), Key.of(Key.Kind.RIGHT), Key.of(Key.Kind.RIGHT)
+        }) {
+      model = Update.key(model, key).model();
+    }
+    String name =
+        "whatif-"
+            + size.columns()
+            + "x"
+            + size.rows()
+            + "-"
+            + glyphs.name().toLowerCase(Locale.ROOT);
+    GoldenFile.check(name, ScreenView.draw(model).text());
+  }
+
   /** The bench's numbers are the forecast's, tested where they are made; here only its shape. */
   private static String withoutNumbers(String text) {
     String masked =

@@ -14,6 +14,7 @@ import java.util.Optional;
  * @param chosen identity of the vessel looked at; may be empty or gone
  * @param listing which vessels, in what order
  * @param chart what part of the past
+ * @param whatIf the table of what may happen
  * @param vent the vent being tried
  * @param journal where in the journal
  * @param prompt the question being asked, if any
@@ -29,6 +30,7 @@ public record Model(
     String chosen,
     Listing listing,
     ChartState chart,
+    WhatIfState whatIf,
     VentState vent,
     JournalState journal,
     Optional<Prompt> prompt,
@@ -46,6 +48,7 @@ public record Model(
         "",
         Listing.ALL,
         ChartState.USUAL,
+        WhatIfState.SHUT,
         VentState.USUAL,
         JournalState.TOP,
         Optional.empty(),

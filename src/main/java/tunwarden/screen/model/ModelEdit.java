@@ -12,6 +12,7 @@ final class ModelEdit {
   private String chosen;
   private Listing listing;
   private ChartState chart;
+  private WhatIfState whatIf;
   private VentState vent;
   private JournalState journal;
   private Optional<Prompt> prompt;
@@ -27,6 +28,7 @@ final class ModelEdit {
     chosen = from.chosen();
     listing = from.listing();
     chart = from.chart();
+    whatIf = from.whatIf();
     vent = from.vent();
     journal = from.journal();
     prompt = from.prompt();
@@ -74,6 +76,11 @@ final class ModelEdit {
     return this;
   }
 
+  ModelEdit whatIf(WhatIfState other) {
+    whatIf = other;
+    return this;
+  }
+
   ModelEdit vent(VentState other) {
     vent = other;
     return this;
@@ -106,6 +113,7 @@ final class ModelEdit {
 
   Model done() {
     return new Model(
-        board, look, size, page, help, chosen, listing, chart, vent, journal, prompt, said, over);
+        board, look, size, page, help, chosen, listing, chart, whatIf, vent, journal, prompt, said,
+        over);
   }
 }

@@ -113,6 +113,9 @@ public final class Update {
 
   /** Escape undoes the newest narrowing first, then goes back to the cellar page. */
   private static Model back(Model model) {
+    if (model.page() == Page.VESSEL && model.whatIf().open()) {
+      return model.edit().whatIf(WhatIfState.SHUT).done();
+    }
     if (model.page() == Page.VESSEL && model.chart().cursor().isPresent()) {
       return model.edit().chart(model.chart().withoutCursor()).done();
     }

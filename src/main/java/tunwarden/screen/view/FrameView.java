@@ -11,6 +11,7 @@ import tunwarden.screen.model.Origin;
 import tunwarden.screen.model.Page;
 import tunwarden.screen.model.Progress;
 import tunwarden.screen.model.Prompt;
+import tunwarden.units.InUnits;
 
 /**
  * What stands around every page: header, alarm strip, and the bottom line with keys or a question.

@@ -1,23 +1,33 @@
 package tunwarden.screen.view;
 
 import java.util.ArrayList;
+import java.util.EnumSet;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import tunwarden.assess.Assessment;
 import tunwarden.assess.Margins;
 import tunwarden.estimate.Estimate;
 import tunwarden.estimate.Mode;
 import tunwarden.forecast.Caution;
 import tunwarden.forecast.Outlook;
+import tunwarden.forecast.WhatIf;
 import tunwarden.screen.model.Board;
 import tunwarden.screen.model.VesselBoard;
 import tunwarden.units.Display;
+import tunwarden.units.InUnits;
 import tunwarden.units.Unit;
 
 /** What is in the liquid, where it is heading, and what to mind. */
 final class GasPanel {
   private static final int NAME_COLUMNS = 10;
   private static final double SETTLED = 0.995;
+
+  /** Columns from which a line may say how soon as well; narrower, the table does. */
+  private static final int ROOMY = 45;
+
+  private static final Set<WhatIf.Kind> ON_LADDER =
+      EnumSet.of(WhatIf.Kind.WARM, WhatIf.Kind.CHILL, WhatIf.Kind.REBOUND, WhatIf.Kind.FULL);
 
   private final Display units;
   private final Assessment assessment;
@@ -68,6 +78,11 @@ final class GasPanel {
         .map(Estimate::ignorance)
         .filter(text -> !text.isEmpty())
         .ifPresent(text -> named("unknown", InUnits.of(text, units), Role.NORMAL));
+    writeNotes();
+    writeWhatIfs(assessment.outlook().whatIfs());
+  }
+
+  private void writeNotes() {
     String ignorance = assessment.estimate().map(Estimate::ignorance).orElse("");
     for (String note : assessment.notes()) {
       if (note.equals(ignorance)) {
@@ -140,12 +155,50 @@ final class GasPanel {
     }
     if (outlook.liftTemperatureK().isPresent()) {
       String at = units.temperature(outlook.liftTemperatureK().getAsDouble());
-      lines.add(new Line(relief ? "" : "lifts", "if warmed to " + at, Role.NORMAL));
+      String soon =
+          outlook
+              .whatIf(WhatIf.Kind.WARM)
+              .flatMap(WhatIf::toLift)
+              .filter(time -> width >= ROOMY)
+              .map(time -> ", " + Words.range(time) + " after cooling is lost")
+              .orElse("");
+      named(relief ? "" : "lifts", "if warmed to " + at + soon, Role.NORMAL);
     }
     if (outlook.liquidFullK().isPresent()) {
       String at = units.temperature(outlook.liquidFullK().getAsDouble());
       lines.add(new Line("full", "if warmed to " + at, Role.NORMAL));
     }
+  }
+
+  /** What the ladder does not show, as far as there is room. */
+  private void writeWhatIfs(List<WhatIf> whatIfs) {
+    boolean first = true;
+    for (WhatIf each : whatIfs) {
+      if (!ON_LADDER.contains(each.kind())) {
+        named(first ? "if" : "", whatIf(each), Role.NORMAL);
+        first = false;
+      }
+    }
+  }
+
+  private String whatIf(WhatIf each) {
+    String pressure =
+        each.paGauge()
+            .map(
+                pa ->
+                    ": "
+                        + units.gauge(pa.middle())
+                        + (pa.high() > pa.low()
+                            ? " ("
+                                + units.pressureNumber(pa.low())
+                                + " to "
+                                + units.pressureNumber(pa.high())
+                                + ")"
+                            : ""))
+            .orElse("");
+    String lift = each.toLift().map(time -> ", lifts in " + Words.range(time)).orElse("");
+    String detail = pressure.isEmpty() ? " " + InUnits.of(each.detail(), units) : "";
+    return InUnits.of(each.words(), units) + pressure + lift + detail;
   }
 
   private void named(String name, String text, Role role) {

@@ -6,6 +6,7 @@ import tunwarden.alarm.AlarmState;
 import tunwarden.screen.model.JournalEntry;
 import tunwarden.screen.model.JournalRows;
 import tunwarden.screen.model.Model;
+import tunwarden.units.InUnits;
 
 /** Standing alarms, then what was written down, newest first; the chosen row in full below. */
 final class JournalView {

@@ -29,7 +29,8 @@ final class KeyHints {
       case VESSEL ->
           List.of(
               new Hint("up down", "other vessel"),
-              new Hint("left right", "read the chart"),
+              new Hint("f", "what may happen"),
+              new Hint("left right", "read chart or table"),
               new Hint("w", "10 min, 2 h, 24 h, 7 d"),
               new Hint("+ -", "zoom"),
               new Hint("[ ]", "back, forth in time"),

@@ -10,6 +10,7 @@ import tunwarden.forecast.Scenario;
 import tunwarden.screen.model.Board;
 import tunwarden.screen.model.VesselBoard;
 import tunwarden.units.Display;
+import tunwarden.units.InUnits;
 import tunwarden.vessel.ReliefSetting;
 
 /**

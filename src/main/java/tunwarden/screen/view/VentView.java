@@ -16,6 +16,7 @@ import tunwarden.screen.model.Model;
 import tunwarden.screen.model.VentState;
 import tunwarden.screen.model.VesselBoard;
 import tunwarden.units.Display;
+import tunwarden.units.InUnits;
 import tunwarden.vessel.Vessel;
 
 /** The vent bench: what a vent would do, tried before anyone turns a handle. */

@@ -16,6 +16,11 @@ final class VesselView {
   private static final int TWO_FROM_COLUMNS = 160;
   private static final int LEAST_LADDER = 44;
 
+  /** Rows of a body that holds ladder and table together, and the table's share of them. */
+  private static final int ROOMY = 34;
+
+  private static final int TABLE_ROWS = 19;
+
   private VesselView() {}
 
   static void draw(Canvas canvas, Area area, Model model) {
@@ -46,10 +51,19 @@ final class VesselView {
   private static void one(Canvas canvas, Area area, Model model, VesselBoard vessel) {
     drawTitle(canvas, area, model, vessel);
     Area body = area.below(1);
+    boolean table = model.whatIf().open();
     int chartRows = body.rows() < 16 ? 7 : body.rows() * 2 / 5;
-    Area upper = body.top(body.rows() - chartRows);
-    detail(canvas, upper, model, vessel);
-    ChartView.draw(canvas, body.below(upper.rows()), model, vessel);
+    int lowerRows = !table ? chartRows : body.rows() < ROOMY ? body.rows() : TABLE_ROWS;
+    Area upper = body.top(body.rows() - lowerRows);
+    Area lower = body.below(upper.rows());
+    if (upper.rows() > 0) {
+      detail(canvas, upper, model, vessel);
+    }
+    if (table) {
+      WhatIfView.draw(canvas, lower, model.look().units(), vessel.assessment(), model.whatIf());
+    } else {
+      ChartView.draw(canvas, lower, model, vessel);
+    }
   }
 
   /** Ladder and panel side by side. */
