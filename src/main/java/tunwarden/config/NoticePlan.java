@@ -3,6 +3,7 @@ package tunwarden.config;
 import java.net.URI;
 import java.util.List;
 import java.util.Optional;
+import tunwarden.notice.NoticeRules;
 
 /**
  * Whom to tell of an alarm, as the cellar file says it. Secrets are never in the file: they stand
@@ -11,11 +12,13 @@ import java.util.Optional;
  * @param command program and arguments to run; empty for none
  * @param webhook address to post to
  * @param mail whom to write to
+ * @param rules when to send
  */
-public record NoticePlan(List<String> command, Optional<Webhook> webhook, Optional<Mail> mail) {
+public record NoticePlan(
+    List<String> command, Optional<Webhook> webhook, Optional<Mail> mail, NoticeRules rules) {
   /** Nobody is told. */
   public static final NoticePlan NONE =
-      new NoticePlan(List.of(), Optional.empty(), Optional.empty());
+      new NoticePlan(List.of(), Optional.empty(), Optional.empty(), NoticeRules.USUAL);
 
   /** Keeps its own copy. */
   public NoticePlan {

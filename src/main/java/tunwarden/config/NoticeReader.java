@@ -2,9 +2,12 @@ package tunwarden.config;
 
 import java.net.URI;
 import java.net.URISyntaxException;
+import java.util.Arrays;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
+import tunwarden.alarm.Priority;
+import tunwarden.notice.NoticeRules;
 import tunwarden.units.BadInputException;
 
 /** The {@code [notice]} table. */
@@ -12,6 +15,7 @@ final class NoticeReader {
   private static final Set<String> THIS_MACHINE = Set.of("localhost", "127.0.0.1", "[::1]");
   private static final int SUBMISSION_PORT = 587;
   private static final int MOST_PORT = 65_535;
+  private static final int MOST_PER_HOUR = 3600;
 
   private NoticeReader() {}
 
@@ -21,8 +25,24 @@ final class NoticeReader {
         notice.has("webhook") ? webhook(notice.section("webhook")) : Optional.empty();
     Optional<NoticePlan.Mail> mail =
         notice.has("mail") ? mail(notice.section("mail")) : Optional.empty();
+    NoticeRules usual = NoticeRules.USUAL;
+    NoticeRules rules =
+        new NoticeRules(
+            notice.parsed("from-priority", NoticeReader::priority).orElse(usual.least()),
+            notice.parsed("together", ReadingsReader::duration).orElse(usual.together()),
+            notice.whole("per-hour", 1, MOST_PER_HOUR).orElse(usual.perHour()));
     notice.close();
-    return new NoticePlan(command, webhook, mail);
+    return new NoticePlan(command, webhook, mail, rules);
+  }
+
+  private static Priority priority(String text) {
+    return Arrays.stream(Priority.values())
+        .filter(priority -> priority.word().equals(text))
+        .findFirst()
+        .orElseThrow(
+            () ->
+                new BadInputException(
+                    "'" + text + "' is no priority; write advice, caution, warning or high"));
   }
 
   private static Optional<NoticePlan.Webhook> webhook(Section section) {

@@ -5,6 +5,9 @@ import java.io.IOException;
 import java.io.InputStreamReader;
 import java.nio.charset.StandardCharsets;
 import java.nio.file.Path;
+import java.time.Instant;
+import java.time.YearMonth;
+import java.time.ZoneOffset;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
@@ -31,9 +34,17 @@ public final class JournalReader {
    */
   public List<JournalLines.Numbered> find(Predicate<JournalLines.Numbered> wanted, int most)
       throws IOException {
+    return find(Instant.EPOCH, wanted, most);
+  }
+
+  /** The same, looking only into files of the month of that moment and later ones. */
+  public List<JournalLines.Numbered> find(
+      Instant from, Predicate<JournalLines.Numbered> wanted, int most) throws IOException {
+    String earliest = YearMonth.from(from.atOffset(ZoneOffset.UTC)) + ".jsonl";
     List<JournalLines.Numbered> found = new ArrayList<>();
     for (Path month : disk.list(directory)) {
-      if (month.toString().endsWith(".jsonl") && disk.exists(month)) {
+      String name = month.getFileName().toString();
+      if (name.endsWith(".jsonl") && name.compareTo(earliest) >= 0 && disk.exists(month)) {
         read(month, wanted, most, found);
       }
     }

@@ -24,7 +24,7 @@ final class Courier {
   private final Consumer<Optional<String>> trouble;
   private final ReentrantLock lock = new ReentrantLock();
   private final Condition woken = lock.newCondition();
-  private final Deque<Message> handedIn = new ArrayDeque<>();
+  private final Deque<Handed> handedIn = new ArrayDeque<>();
   private final Thread thread;
   private boolean closing;
   private int failures;
@@ -59,15 +59,27 @@ final class Courier {
     this.thread.setDaemon(true);
   }
 
+  /** Name of its channel. */
+  String channel() {
+    return channel.name();
+  }
+
   void start() {
     thread.start();
   }
 
-  /** Any thread. The message is on disk a moment later, whatever the channel is doing. */
-  void hand(Message message) {
+  /** A message and what to do once it is on disk. */
+  private record Handed(Message message, Runnable stored) {}
+
+  /**
+   * Any thread. The message is on disk a moment later, whatever the channel is doing.
+   *
+   * @param stored run when it is
+   */
+  void hand(Message message, Runnable stored) {
     lock.lock();
     try {
-      handedIn.add(message);
+      handedIn.add(new Handed(message, stored));
       woken.signal();
     } finally {
       lock.unlock();
@@ -124,10 +136,10 @@ final class Courier {
   private void store() {
     try {
       while (!handedIn.isEmpty()) {
-        if (outbox.add(handedIn.getFirst())) {
+        if (outbox.add(handedIn.getFirst().message())) {
           LOG.warn("an old message for {} was given up", channel.name());
         }
-        handedIn.removeFirst();
+        handedIn.removeFirst().stored().run();
       }
     } catch (IOException e) {
       LOG.warn("a message for {} could not be kept: {}", channel.name(), e.toString());
@@ -138,8 +150,8 @@ final class Courier {
   /** With a full disk a message is better sent without having been kept than not at all. */
   private void sendUnkept() {
     try {
-      channel.send(handedIn.getFirst());
-      handedIn.removeFirst();
+      channel.send(handedIn.getFirst().message());
+      handedIn.removeFirst().stored().run();
     } catch (IOException | RuntimeException failed) {
       LOG.warn("{}: {}", channel.name(), failed.getMessage());
     }

@@ -10,7 +10,6 @@ import java.util.Optional;
 import java.util.Set;
 import tunwarden.alarm.AlarmKind;
 import tunwarden.alarm.AlarmState;
-import tunwarden.alarm.Priority;
 import tunwarden.journal.JournalEntry;
 import tunwarden.journal.JournalLines;
 
@@ -20,34 +19,25 @@ import tunwarden.journal.JournalLines;
  * argument.
  */
 final class Gatherer {
-  private final Rules rules;
+  private final NoticeRules rules;
   private final List<JournalLines.Numbered> waiting = new ArrayList<>();
   private final Deque<Instant> sent = new ArrayDeque<>();
   private Optional<Instant> firstWaits = Optional.empty();
-
-  /**
-   * When to send.
-   *
-   * @param least alarms of a lower priority are not sent
-   * @param together how long the first alarm waits for others
-   * @param perHour messages an hour at most
-   */
-  record Rules(Priority least, Duration together, int perHour) {
-    static final Rules USUAL = new Rules(Priority.CAUTION, Duration.ofSeconds(5), 12);
-  }
+  private long lastNumber;
 
   /** Changes after which a person must look, as the journal words them. */
   private static final Set<String> NEWS =
       Set.of(
           "raised", "raised again", "no longer shelved", "no longer suppressed", "back in service");
 
-  Gatherer(Rules rules) {
+  Gatherer(NoticeRules rules) {
     this.rules = rules;
   }
 
   void add(JournalLines.Numbered numbered, Instant now) {
     if (isWorthSending(numbered.entry())) {
       waiting.add(numbered);
+      lastNumber = numbered.number();
       firstWaits = Optional.of(firstWaits.orElse(now));
     }
   }
@@ -76,6 +66,11 @@ final class Gatherer {
     firstWaits = Optional.empty();
     sent.add(now);
     return Optional.of(message);
+  }
+
+  /** The number of the newest entry taken in; all of it is in a message once none waits. */
+  long lastNumber() {
+    return lastNumber;
   }
 
   private boolean isWorthSending(JournalEntry entry) {

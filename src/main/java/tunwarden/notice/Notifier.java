@@ -3,16 +3,19 @@ package tunwarden.notice;
 import java.io.IOException;
 import java.nio.file.Path;
 import java.time.Duration;
+import java.time.Instant;
 import java.time.InstantSource;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalLong;
 import java.util.TreeMap;
 import java.util.concurrent.Executors;
 import java.util.concurrent.ScheduledExecutorService;
 import java.util.concurrent.TimeUnit;
 import tunwarden.journal.JournalLines;
+import tunwarden.journal.JournalReader;
 import tunwarden.journal.Recorder;
 import tunwarden.journal.disk.Disk;
 
@@ -21,6 +24,8 @@ import tunwarden.journal.disk.Disk;
  * every channel have threads of their own.
  */
 public final class Notifier implements Recorder.Listener, AutoCloseable {
+  private static final Duration WORTH_TELLING = Duration.ofHours(24);
+  private static final int MOST_CAUGHT_UP = 1000;
   private static final Duration LAST_WAIT = Duration.ofMillis(500);
 
   private final InstantSource clock;
@@ -28,6 +33,7 @@ public final class Notifier implements Recorder.Listener, AutoCloseable {
   private final List<Courier> couriers = new ArrayList<>();
   private final Map<String, String> troubles = new TreeMap<>();
   private final Trouble trouble;
+  private final Told told;
   private final ScheduledExecutorService timer =
       Executors.newSingleThreadScheduledExecutor(
           task -> {
@@ -48,9 +54,14 @@ public final class Notifier implements Recorder.Listener, AutoCloseable {
    * @param folder where undelivered messages wait
    */
   public Notifier(
-      List<Channel> channels, Disk disk, Path folder, InstantSource clock, Trouble trouble)
+      List<Channel> channels,
+      Disk disk,
+      Path folder,
+      InstantSource clock,
+      Trouble trouble,
+      NoticeRules rules)
       throws IOException {
-    this(channels, disk, folder, clock, trouble, Gatherer.Rules.USUAL, Courier.Pace.USUAL);
+    this(channels, disk, folder, clock, trouble, rules, Courier.Pace.USUAL);
   }
 
   Notifier(
@@ -59,15 +70,16 @@ public final class Notifier implements Recorder.Listener, AutoCloseable {
       Path folder,
       InstantSource clock,
       Trouble trouble,
-      Gatherer.Rules rules,
+      NoticeRules rules,
       Courier.Pace pace)
       throws IOException {
     this.clock = clock;
     this.gatherer = new Gatherer(rules);
     this.trouble = trouble;
+    this.told = new Told(disk, folder, channels.stream().map(Channel::name).toList());
     for (Channel channel : channels) {
       Outbox outbox = new Outbox(disk, folder.resolve(channel.name()));
-      couriers.add(new Courier(channel, outbox, pace, text -> told(channel.name(), text)));
+      couriers.add(new Courier(channel, outbox, pace, text -> trouble(channel.name(), text)));
     }
   }
 
@@ -84,15 +96,36 @@ public final class Notifier implements Recorder.Listener, AutoCloseable {
     }
   }
 
-  private void look() {
-    Optional<Message> due;
-    synchronized (gatherer) {
-      due = gatherer.due(clock.instant());
+  /**
+   * Takes in what stands in the journal and nobody was told of, because the program ended before
+   * word of it was safe in the outbox. Of long ago nothing is told.
+   */
+  public void catchUp(JournalReader journal) throws IOException {
+    OptionalLong upTo = told.upTo();
+    if (upTo.isPresent()) {
+      Instant from = clock.instant().minus(WORTH_TELLING);
+      long last = upTo.getAsLong();
+      recorded(
+          journal.find(
+              from, n -> n.number() > last && !n.entry().time().isBefore(from), MOST_CAUGHT_UP),
+          true);
     }
-    due.ifPresent(message -> couriers.forEach(courier -> courier.hand(message)));
   }
 
-  private void told(String channel, Optional<String> text) {
+  private void look() {
+    synchronized (gatherer) {
+      gatherer.due(clock.instant()).ifPresent(this::hand);
+    }
+  }
+
+  /** With the gatherer held, so that its last number is that of the message. */
+  private void hand(Message message) {
+    long number = gatherer.lastNumber();
+    couriers.forEach(
+        courier -> courier.hand(message, () -> told.stored(courier.channel(), number)));
+  }
+
+  private void trouble(String channel, Optional<String> text) {
     synchronized (troubles) {
       if (text.isPresent()) {
         troubles.put(channel, text.get());
@@ -109,9 +142,7 @@ public final class Notifier implements Recorder.Listener, AutoCloseable {
   public void close() {
     timer.shutdownNow();
     synchronized (gatherer) {
-      gatherer
-          .flush(clock.instant())
-          .ifPresent(message -> couriers.forEach(courier -> courier.hand(message)));
+      gatherer.flush(clock.instant()).ifPresent(this::hand);
     }
     couriers.forEach(courier -> courier.close(LAST_WAIT));
   }

@@ -25,6 +25,9 @@ import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import tunwarden.alarm.Priority;
+import tunwarden.journal.JournalEntry;
+import tunwarden.journal.JournalLines;
+import tunwarden.journal.JournalReader;
 import tunwarden.journal.disk.RealDisk;
 import tunwarden.units.BadInputException;
 
@@ -152,7 +155,7 @@ class ChannelsTest {
         folder.resolve("outbox"),
         () -> Notices.NOON,
         (failing, text) -> troubles.add(failing + " " + text),
-        new Gatherer.Rules(Priority.CAUTION, Duration.ZERO, 100),
+        new NoticeRules(Priority.CAUTION, Duration.ZERO, 100),
         new Courier.Pace(Duration.ofMillis(20), Duration.ofMillis(100)));
   }
 
@@ -188,5 +191,40 @@ class ChannelsTest {
       Notices.await("both", () -> bodies.size() == 2);
     }
     assertTrue(bodies.get(0).contains("FV2") && bodies.get(1).contains("FV3"));
+  }
+
+  @Test
+  void whatWasInTheJournalOnlyWhenTheProgramDiedIsToldAtTheNextStart() throws Exception {
+    try (Notifier notifier = notifier(new CopyOnWriteArrayList<>())) {
+      notifier.start();
+      notifier.recorded(List.of(Notices.silent("FV1", 1)), true);
+      Notices.await("the first", () -> bodies.size() == 1);
+    }
+    // The second waits for others, and is in nothing but memory and the journal at a kill.
+    Path journal = Files.createDirectories(folder.resolve("journal")).resolve("2026-03.jsonl");
+    StringBuilder lines = new StringBuilder();
+    for (int n = 1; n <= 2; n++) {
+      JournalLines.Numbered silent = Notices.silent("FV" + n, n);
+      JournalEntry entry =
+          new JournalEntry(
+              Notices.NOON,
+              silent.entry().vessel(),
+              silent.entry().kind(),
+              silent.entry().text(),
+              silent.entry().values());
+      lines.append(JournalLines.line(new JournalLines.Numbered(n, entry))).append('\n');
+    }
+    Files.writeString(journal, lines);
+    bodies.clear();
+    for (int start = 0; start < 2; start++) {
+      try (Notifier notifier = notifier(new CopyOnWriteArrayList<>())) {
+        notifier.catchUp(new JournalReader(new RealDisk(), journal.getParent()));
+        notifier.start();
+        Notices.await("the second", () -> bodies.size() == 1);
+        Thread.sleep(start * 500L);
+      }
+    }
+    assertEquals(1, bodies.size(), "told once");
+    assertTrue(bodies.get(0).contains("FV2") && !bodies.get(0).contains("FV1"), bodies::toString);
   }
 }

@@ -13,7 +13,7 @@ import tunwarden.alarm.Priority;
 /** When word is sent and what is folded together. */
 class GathererTest {
   private final Gatherer gatherer =
-      new Gatherer(new Gatherer.Rules(Priority.CAUTION, Duration.ofSeconds(5), 3));
+      new Gatherer(new NoticeRules(Priority.CAUTION, Duration.ofSeconds(5), 3));
 
   private static Instant at(long seconds) {
     return NOON.plusSeconds(seconds);

@@ -20,6 +20,7 @@ import java.security.KeyStore;
 import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.TimeUnit;
+import javax.net.ssl.KeyManagerFactory;
 import javax.net.ssl.SSLContext;
 import javax.net.ssl.SSLSocketFactory;
 import javax.net.ssl.TrustManagerFactory;
@@ -37,6 +38,7 @@ class MailChannelTest {
   @TempDir private static Path folder;
   private static GreenMail mail;
   private static SSLSocketFactory trusting;
+  private static SSLContext serving;
 
   @BeforeAll
   static void start() throws Exception {
@@ -52,6 +54,20 @@ class MailChannelTest {
     mail.setUser("cellar@brine.example", USER, PASSWORD);
     mail.start();
     trusting = trust(store);
+    serving = serve(store);
+  }
+
+  private static SSLContext serve(Path store) throws Exception {
+    KeyStore keys = KeyStore.getInstance("PKCS12");
+    try (InputStream in = Files.newInputStream(store)) {
+      keys.load(in, STORE_PASSWORD.toCharArray());
+    }
+    KeyManagerFactory managers =
+        KeyManagerFactory.getInstance(KeyManagerFactory.getDefaultAlgorithm());
+    managers.init(keys, STORE_PASSWORD.toCharArray());
+    SSLContext context = SSLContext.getInstance("TLS");
+    context.init(managers.getKeyManagers(), null, null);
+    return context;
   }
 
   private static ServerSetup setup(String protocol) {
@@ -158,6 +174,30 @@ class MailChannelTest {
     String otherName =
         failure(new MailChannel(account("127.0.0.1", true, PASSWORD), Optional.of(trusting)));
     assertTrue(otherName.contains("127.0.0.1"), otherName);
+  }
+
+  @Test
+  void withStartTlsAMessageArrivesAndNothingOfItWentInTheClear() throws Exception {
+    try (StartTlsServer server = new StartTlsServer(serving)) {
+      MailChannel.Account account =
+          new MailChannel.Account(
+              "localhost",
+              server.port(),
+              false,
+              "cellar@brine.example",
+              List.of("keeper@brine.example"),
+              Optional.of(USER),
+              Optional.of(Secret.of(PASSWORD)));
+      Message message = Message.of(List.of(Notices.silent("FV2", 7)), Notices.NOON);
+      new MailChannel(account, Optional.of(trusting)).send(message);
+      assertEquals(2, server.plain.size(), server.plain::toString);
+      assertTrue(server.plain.get(0).startsWith("EHLO"), server.plain::toString);
+      assertEquals("STARTTLS", server.plain.get(1));
+      String heard = String.join("\n", server.encrypted);
+      assertTrue(heard.contains("RCPT TO:<keeper@brine.example>"), heard);
+      assertTrue(heard.contains("Subject: Tunwarden: FV2: instrument silent"), heard);
+      assertTrue(heard.contains("AUTH "), heard);
+    }
   }
 
   @Test

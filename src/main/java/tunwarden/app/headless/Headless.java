@@ -111,6 +111,9 @@ public final class Headless implements AutoCloseable {
     recorder.watchDisk((failing, text) -> report(AlarmKind.DISK, failing, text));
     watching = new Watching(cellar, links, clock, sinks());
     notifier = notifier(cellar);
+    if (notifier.isPresent()) {
+      notifier.get().catchUp(reader());
+    }
     keeping.resume(cellar, watching.station(), alarms);
     recorder.start();
     say("start", "Watching " + cellar.vessels().size() + " vessel(s) of " + cellar.file() + ".");
@@ -128,13 +131,15 @@ public final class Headless implements AutoCloseable {
     if (channels.isEmpty()) {
       return Optional.empty();
     }
-    return Optional.of(
+    Notifier made =
         new Notifier(
             channels,
             disk,
             recorder.folder().notices(),
             clock,
-            (failing, text) -> report(AlarmKind.NOTICE, failing, text)));
+            (failing, text) -> report(AlarmKind.NOTICE, failing, text),
+            cellar.notice().rules());
+    return Optional.of(made);
   }
 
   private List<Sink> sinks() {
