@@ -47,7 +47,7 @@ public final class AlarmKeeper implements Sink {
    *
    * @return what came of it; no transitions when there was nothing to do
    */
-  public AlarmBook.Folded change(Function<AlarmBook, AlarmBook.Folded> deed) {
+  public synchronized AlarmBook.Folded change(Function<AlarmBook, AlarmBook.Folded> deed) {
     AlarmBook.Folded folded = deed.apply(book);
     book = folded.book();
     if (!folded.transitions().isEmpty()) {
@@ -57,7 +57,7 @@ public final class AlarmKeeper implements Sink {
   }
 
   /** Goes back to a book kept earlier, as a replay does. */
-  public void restore(AlarmBook kept) {
+  public synchronized void restore(AlarmBook kept) {
     book = kept;
   }
 

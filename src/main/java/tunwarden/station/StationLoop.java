@@ -93,6 +93,11 @@ public final class StationLoop implements AutoCloseable {
     }
   }
 
+  /** Whether the thread is over; after {@link #close} it may take longer on a busy machine. */
+  public boolean hasEnded() {
+    return !thread.isAlive();
+  }
+
   /** Digests what is in the inbox and ends the thread. */
   @Override
   public void close() {

@@ -11,16 +11,20 @@ import java.util.Optional;
 final class ClockWatch {
   private static final Duration NOTICEABLE = Duration.ofSeconds(5);
 
+  private final Clocks clocks;
   private Instant lastWall;
   private long lastNanos;
 
-  ClockWatch(Instant wall, long nanos) {
-    this.lastWall = wall;
-    this.lastNanos = nanos;
+  ClockWatch(Clocks clocks) {
+    this.clocks = clocks;
+    this.lastWall = clocks.wall().instant();
+    this.lastNanos = clocks.nanos().getAsLong();
   }
 
   /** One sentence when the clock has been stepped since the last look. */
-  Optional<String> look(Instant wall, long nanos) {
+  Optional<String> look() {
+    Instant wall = clocks.wall().instant();
+    long nanos = clocks.nanos().getAsLong();
     Duration step = Duration.between(lastWall, wall).minusNanos(nanos - lastNanos);
     lastWall = wall;
     lastNanos = nanos;

@@ -63,6 +63,7 @@ public final class Headless implements AutoCloseable {
   private AlarmKeeper alarms;
   private Optional<Server> server = Optional.empty();
   private volatile Optional<Notifier> notifier = Optional.empty();
+  private final ClockWatch clockWatch;
   private CellarWatch cellarWatch;
   private volatile Watching watching;
   private volatile boolean reloadAsked;
@@ -76,9 +77,15 @@ public final class Headless implements AutoCloseable {
    */
   public Headless(
       HeadlessPlan plan, ByteLinkFactory links, InstantSource clock, Consumer<String> console) {
+    this(plan, links, new Clocks(clock, System::nanoTime), console);
+  }
+
+  /** With other clocks than those of the computer. */
+  Headless(HeadlessPlan plan, ByteLinkFactory links, Clocks clocks, Consumer<String> console) {
     this.plan = plan;
     this.links = links;
-    this.clock = clock;
+    this.clock = clocks.wall();
+    this.clockWatch = new ClockWatch(clocks);
     this.console = console;
   }
 
@@ -192,10 +199,9 @@ public final class Headless implements AutoCloseable {
   }
 
   private void mind() {
-    ClockWatch clockWatch = new ClockWatch(clock.instant(), System.nanoTime());
     while (!awaitClosing()) {
       try {
-        Optional<String> step = clockWatch.look(clock.instant(), System.nanoTime());
+        Optional<String> step = clockWatch.look();
         report(AlarmKind.CLOCK, step.isPresent(), step.orElse(""));
         watching.loop().submit(() -> alarms.change(book -> book.tick(clock.instant())));
         serveRequests();
@@ -275,6 +281,10 @@ public final class Headless implements AutoCloseable {
       notifier.ifPresent(Notifier::start);
     }
     old.close();
+    // Two loops at once would undo each other's alarms.
+    while (!old.loop().hasEnded() && !awaitClosing()) {
+      LOG.warn("waiting for the loop of the old cellar file to end");
+    }
     keeping.goOver(old.cellar(), old.station(), next.cellar(), next.station());
     latest.retain(ids(next.cellar()));
     watching = next;
