@@ -19,7 +19,7 @@ import tunwarden.report.analysis.Analyst;
 import tunwarden.report.analysis.ReportRow;
 import tunwarden.report.analysis.RowSpool;
 import tunwarden.report.analysis.Sifted;
-import tunwarden.report.analysis.Smoother;
+import tunwarden.report.hindsight.Smoother;
 import tunwarden.report.otherwise.Rerun;
 import tunwarden.report.otherwise.WhatIf;
 import tunwarden.report.page.HtmlPage;

@@ -27,15 +27,6 @@ final class IncidentDay {
   private static final double HOUR = 3600;
   static final Instant START = Instant.parse("2026-03-02T00:00:00Z");
 
-  /**
-   * What truly happened.
-   *
-   * @param kind the report's word
-   * @param from seconds since the start
-   * @param gasKg gas that left; negative when it came in
-   */
-  record Truth(String kind, double from, double until, double gasKg) {}
-
   private final Random random;
   private final double volumeM3;
   private final double fillM3;
@@ -45,7 +36,7 @@ final class IncidentDay {
   private final double noisePa;
   private final double stepPa;
   private final SimulatedVessel vessel;
-  private final List<Truth> truth = new ArrayList<>();
+  private final List<Day.Truth> truth = new ArrayList<>();
   private final List<LogRow> rows = new ArrayList<>();
   private final List<Plan> plans = new ArrayList<>();
 
@@ -104,7 +95,7 @@ final class IncidentDay {
     plans.add(new Plan("warming", Math.rint(t), 0, between(14, 22)));
   }
 
-  IncidentDay run() {
+  Day run() {
     double ventM2 = (volumeM3 - fillM3) / between(1500, 6000);
     double lifted = Double.NaN;
     double lostAtLift = 0;
@@ -122,7 +113,7 @@ final class IncidentDay {
         lifted = t;
         lostAtLift = lost;
       } else if (!blew && !Double.isNaN(lifted)) {
-        truth.add(new Truth("lift", lifted, t, vessel.lostKg() - lostAtLift));
+        truth.add(new Day.Truth("lift", lifted, t, vessel.lostKg() - lostAtLift));
         lifted = Double.NaN;
       }
       if (t % interval == 0) {
@@ -130,9 +121,9 @@ final class IncidentDay {
       }
     }
     Plan warm = plans.get(plans.size() - 1);
-    truth.add(new Truth("warming", warm.at(), 24 * HOUR, 0));
-    truth.sort(Comparator.comparingDouble(Truth::from));
-    return this;
+    truth.add(new Day.Truth("warming", warm.at(), 24 * HOUR, 0));
+    truth.sort(Comparator.comparingDouble(Day.Truth::from));
+    return new Day(rows, truth, described(), "[every " + interval + " s]");
   }
 
   private boolean venting;
@@ -150,7 +141,7 @@ final class IncidentDay {
         venting |= on;
         markKg = t == plan.at() ? vessel.lostKg() : markKg;
         if (t == plan.at() + plan.length()) {
-          truth.add(new Truth("vent", plan.at(), t, vessel.lostKg() - markKg));
+          truth.add(new Day.Truth("vent", plan.at(), t, vessel.lostKg() - markKg));
         }
       } else if (plan.kind().equals("charge")) {
         if (t == plan.at()) {
@@ -158,10 +149,10 @@ final class IncidentDay {
           vessel.valves().supply(vessel.paGauge() + plan.size() * BAR);
         } else if (t == plan.at() + plan.length()) {
           vessel.valves().noSupply();
-          truth.add(new Truth("charge", plan.at(), t, markKg - vessel.co2Kg()));
+          truth.add(new Day.Truth("charge", plan.at(), t, markKg - vessel.co2Kg()));
         }
       } else if (t == plan.at() && !plan.kind().equals("warming")) {
-        truth.add(new Truth(plan.kind(), plan.at(), plan.at() + plan.length(), 0));
+        truth.add(new Day.Truth(plan.kind(), plan.at(), plan.at() + plan.length(), 0));
       }
     }
     vessel.valves().vent(venting ? ventM2 : 0);
@@ -200,19 +191,7 @@ final class IncidentDay {
     return next;
   }
 
-  List<LogRow> rows() {
-    return rows;
-  }
-
-  List<Truth> truth() {
-    return truth;
-  }
-
-  int interval() {
-    return interval;
-  }
-
-  Vessel described() {
+  private Vessel described() {
     return Vessel.plain("T", volumeM3, fillM3, Liquid.of(LiquidKind.BEER))
         .withLimits(
             new Limits(

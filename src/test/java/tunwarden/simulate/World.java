@@ -29,7 +29,7 @@ final class World {
   final double relief;
   final double transfer;
   final double startK;
-  final Instruments instruments;
+  Instruments instruments;
   final Tank tank;
   private final double trueFillM3;
   private final boolean beer;

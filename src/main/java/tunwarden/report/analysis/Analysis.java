@@ -5,6 +5,7 @@ import tunwarden.estimate.Event;
 import tunwarden.estimate.EventKind;
 import tunwarden.estimate.Mode;
 import tunwarden.estimate.State;
+import tunwarden.reading.Reading;
 import tunwarden.vessel.Vessel;
 
 /**
@@ -16,6 +17,7 @@ import tunwarden.vessel.Vessel;
  * @param events what happened, in order of time
  * @param bins the course of everything
  * @param signals how the instruments behaved
+ * @param laboratory values of the dissolved gas that were entered, with their uncertainty
  * @param state the estimator's state at the end
  * @param secondsIn data time spent in each {@link Mode}, s
  */
@@ -26,6 +28,7 @@ public record Analysis(
     List<Event> events,
     Bins bins,
     Signals signals,
+    List<Reading> laboratory,
     State state,
     long[] secondsIn) {
 

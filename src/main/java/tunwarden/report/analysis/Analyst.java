@@ -129,6 +129,7 @@ public final class Analyst {
         book.merged(sifter.events()),
         bins,
         sifter.signals(),
+        sifter.laboratory(),
         state,
         secondsIn);
   }

@@ -145,6 +145,11 @@ public final class Bins {
     return mean(SEALED, bin) == 1;
   }
 
+  /** Number of pressures read. */
+  public int rows(int bin) {
+    return count[PRESSURE][bin];
+  }
+
   private double mean(int what, int bin) {
     return count[what][bin] == 0 ? Double.NaN : sum[what][bin] / count[what][bin];
   }

@@ -34,6 +34,7 @@ public final class Sifter {
   private final EventFinder finder;
   private final Thinner thinner = new Thinner();
   private final List<Event> marks = new ArrayList<>();
+  private final List<Reading> laboratory = new ArrayList<>();
   private final Map<Quantity, Track> tracks = new EnumMap<>(Quantity.class);
   private final SignalHealth pressureHealth = new SignalHealth();
   private final SignalHealth temperatureHealth = new SignalHealth();
@@ -85,7 +86,10 @@ public final class Sifter {
         temperatureHealth.value(reading.value(), judge(reading));
         kelvin = reading.value();
       }
-      case DISSOLVED -> thinner.rare(reading);
+      case DISSOLVED -> {
+        thinner.rare(reading);
+        laboratory.add(reading);
+      }
       default -> judge(reading);
     }
   }
@@ -140,6 +144,11 @@ public final class Sifter {
     List<Event> found = new ArrayList<>(finder.finish());
     found.addAll(marks);
     return found;
+  }
+
+  /** Values of the dissolved gas that were entered. */
+  List<Reading> laboratory() {
+    return laboratory;
   }
 
   /** How the instruments behaved. */
