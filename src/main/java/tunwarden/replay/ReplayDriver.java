@@ -14,6 +14,10 @@ import java.util.function.LongSupplier;
  */
 public final class ReplayDriver implements Closeable {
   private static final long ROWS_PER_TURN = 2_000;
+
+  /** Fewer on the way to another time, so that it can be followed and stopped. */
+  private static final long ROWS_PER_SEEK_TURN = 50;
+
   private static final long LONGEST_WAIT_NANOS = 200_000_000L;
 
   /** How the driver passes real time; a test can let it pass at once. */
@@ -40,6 +44,8 @@ public final class ReplayDriver implements Closeable {
   private final ConcurrentLinkedQueue<Command> commands = new ConcurrentLinkedQueue<>();
   private volatile ReplayStatus status;
   private volatile boolean closing;
+  private volatile boolean seekStopped;
+  private Optional<ReplayStatus.Seek> seek = Optional.empty();
   private ReplayClock clock;
   private Thread thread;
 
@@ -107,7 +113,8 @@ public final class ReplayDriver implements Closeable {
             clock.pace(),
             clock.paused(),
             player.isEnded(),
-            failure);
+            failure,
+            seek);
   }
 
   /** Where the replay stands; never blocks. */
@@ -140,11 +147,22 @@ public final class ReplayDriver implements Closeable {
   public void seek(Instant time) {
     submit(
         () -> {
-          while (!player.playTo(time, ROWS_PER_TURN) && !closing) {
+          seekStopped = false;
+          long since = nanos.getAsLong();
+          Instant from = player.at();
+          do {
+            from = player.at().isBefore(from) ? player.at() : from;
+            seek = Optional.of(new ReplayStatus.Seek(from, time, since));
             publish(Optional.empty());
-          }
+          } while (!player.playTo(time, ROWS_PER_SEEK_TURN) && !closing && !seekStopped);
+          seek = Optional.empty();
           clock = clock.movedTo(player.at(), nanos.getAsLong());
         });
+  }
+
+  /** Ends a seek under way, at the time it has come to. */
+  public void stopSeeking() {
+    seekStopped = true;
   }
 
   /** Goes forwards (positive) or backwards by a stretch of data time. */

@@ -13,6 +13,7 @@ import java.util.Optional;
  * @param paused whether it stands still
  * @param ended whether all rows have been fed
  * @param failure why it stopped, as one sentence, if it failed
+ * @param seek where it is on its way to, if it is
  */
 public record ReplayStatus(
     Instant start,
@@ -21,4 +22,14 @@ public record ReplayStatus(
     double pace,
     boolean paused,
     boolean ended,
-    Optional<String> failure) {}
+    Optional<String> failure,
+    Optional<Seek> seek) {
+  /**
+   * A way through the log that takes a while.
+   *
+   * @param from data time at which it began to feed rows
+   * @param to data time to be reached
+   * @param sinceNanos when it was asked for, on the driver's counter
+   */
+  public record Seek(Instant from, Instant to, long sinceNanos) {}
+}

@@ -27,6 +27,6 @@ public final class Preview {
     Dashboard.run(
         () -> Boards.at(board, Instant.now()),
         new RecordingDesk(),
-        new DashboardOptions(look, false, true, OutputStream.nullOutputStream()));
+        new DashboardOptions(look, false, true, OutputStream.nullOutputStream(), () -> {}));
   }
 }

@@ -11,8 +11,11 @@ import java.util.concurrent.ConcurrentHashMap;
 import java.util.function.Supplier;
 import tunwarden.alarm.AlarmBook;
 import tunwarden.assess.Assessment;
+import tunwarden.assess.Assessor;
 import tunwarden.assess.History;
+import tunwarden.assess.Observed;
 import tunwarden.estimate.Step;
+import tunwarden.forecast.Outlook;
 import tunwarden.reading.Sample;
 import tunwarden.screen.model.Board;
 import tunwarden.screen.model.JournalEntry;
@@ -67,7 +70,23 @@ public final class BoardKeeper implements Sink {
     this.alarms = alarms;
     this.journal = journal;
     this.signals = signals;
-    vessels.forEach(vessel -> histories.put(vessel.id(), new History()));
+    for (Vessel vessel : vessels) {
+      histories.put(vessel.id(), new History());
+      latest.put(vessel.id(), unread(vessel));
+    }
+  }
+
+  /** So that every vessel is on the list from the first frame on. */
+  private static Assessment unread(Vessel vessel) {
+    return Assessor.assess(
+        new Assessor.Evidence(
+            vessel,
+            Instant.EPOCH,
+            Observed.NEVER,
+            Observed.NEVER,
+            Optional.empty(),
+            Outlook.NONE,
+            List.of()));
   }
 
   @Override

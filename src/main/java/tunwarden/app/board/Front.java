@@ -22,7 +22,7 @@ public record Front(
     boolean bell,
     OutputStream strayOutput,
     ZoneId zone) {
-  DashboardOptions options() {
-    return new DashboardOptions(look, window, bell, strayOutput);
+  DashboardOptions options(Runnable onceShown) {
+    return new DashboardOptions(look, window, bell, strayOutput, onceShown);
   }
 }

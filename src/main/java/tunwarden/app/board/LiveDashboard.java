@@ -116,12 +116,11 @@ public final class LiveDashboard {
       Consumer<Sample> open = loop.inlet();
       Consumer<Sample> inlet = PairGate.over(plans, sample -> take(sample, open));
       plans.forEach(plan -> ports.add(new PortRunner(plan, links, inlet, clock)));
-      loop.start();
-      ports.forEach(PortRunner::start);
       LiveDesk.Hands hands =
           new LiveDesk.Hands(
               assembly.station(), loop, assembly.alarms(), assembly.board(), front.looks()::keep);
-      Dashboard.run(assembly.board()::latest, new LiveDesk(hands, clock), front.options());
+      Dashboard.run(
+          assembly.board()::latest, new LiveDesk(hands, clock), front.options(() -> begin(loop)));
       // The interrupt has done its work; what follows must be waited for.
       Thread.interrupted();
     } finally {
@@ -133,6 +132,11 @@ public final class LiveDashboard {
 
   private JournalEntry note(String words) {
     return new JournalEntry(clock.instant(), "", "start", words);
+  }
+
+  private void begin(StationLoop loop) {
+    loop.start();
+    ports.forEach(PortRunner::start);
   }
 
   private SignalSource source(String vessel, Quantity quantity) {

@@ -35,9 +35,9 @@ public final class LogDashboard {
     try (RowSource rows = log.open()) {
       LogRow first = rows.next();
       try (Survey survey = new Survey(log, vessels, first.time())) {
-        survey.start();
         Playback.Helpers helpers =
             new Playback.Helpers(
+                survey::start,
                 () -> Optional.of(survey.last()),
                 survey::marks,
                 survey::progress,

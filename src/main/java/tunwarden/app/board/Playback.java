@@ -3,7 +3,9 @@ package tunwarden.app.board;
 import java.io.IOException;
 import java.time.Duration;
 import java.time.Instant;
+import java.time.format.DateTimeFormatter;
 import java.util.List;
+import java.util.Locale;
 import java.util.Optional;
 import java.util.concurrent.atomic.AtomicReference;
 import java.util.function.Function;
@@ -22,6 +24,8 @@ import tunwarden.vessel.Vessel;
 /** The dashboard over rows that are played at a pace: a log, or a rehearsal. */
 final class Playback {
   private static final Duration TICK = Duration.ofSeconds(10);
+  private static final DateTimeFormatter TIME_OF_DAY =
+      DateTimeFormatter.ofPattern("HH:mm", Locale.ROOT);
 
   private final Show show;
   private final Front front;
@@ -37,7 +41,7 @@ final class Playback {
    * @param rows opened afresh whenever the replay goes back
    * @param pace data seconds per real second
    * @param alarms alarm settings
-   * @param skip data time played at once before the screen opens, so that charts are not empty
+   * @param skip data time played as fast as it goes to begin with, so that charts are not empty
    */
   record Show(
       String name,
@@ -51,6 +55,7 @@ final class Playback {
   /**
    * What runs beside the playing.
    *
+   * @param begin starts it, once the screen is up
    * @param last last time of the log as far as known
    * @param marks times at which something happened, as far as known
    * @param progress long work under way
@@ -58,6 +63,7 @@ final class Playback {
    * @param report writes a report of a vessel and says where
    */
   record Helpers(
+      Runnable begin,
       Supplier<Optional<Instant>> last,
       Supplier<List<TimeMark>> marks,
       Supplier<Optional<Progress>> progress,
@@ -65,6 +71,7 @@ final class Playback {
       Function<String, String> report) {
     static final Helpers NONE =
         new Helpers(
+            () -> {},
             Optional::empty,
             List::of,
             Optional::empty,
@@ -94,14 +101,22 @@ final class Playback {
     StationTarget fed = new StationTarget(assembly);
     target.set(fed);
     ReplayPlayer player = new ReplayPlayer(show.rows(), fed, TICK);
-    player.playTo(player.start().plus(show.skip()), Long.MAX_VALUE);
+    fed.begin(player.start());
     try (ReplayDriver running =
         new ReplayDriver(player, show.pace(), System::nanoTime, ReplayDriver.Waiting.onMonitor())) {
       driver.set(running);
-      running.start();
       PlaybackDesk desk = new PlaybackDesk(assembly, fed, running, helpers, front.looks()::keep);
-      Dashboard.run(assembly.board()::latest, desk, front.options());
+      Dashboard.run(
+          assembly.board()::latest, desk, front.options(() -> begin(running, player, helpers)));
     }
+  }
+
+  private void begin(ReplayDriver running, ReplayPlayer player, Helpers helpers) {
+    if (!show.skip().isZero()) {
+      running.seek(player.start().plus(show.skip()));
+    }
+    running.start();
+    helpers.begin().run();
   }
 
   private BoardKeeper.Frame frame(Helpers helpers) {
@@ -111,7 +126,20 @@ final class Playback {
         show.alarms().stale(),
         () -> target.get().reached(),
         () -> status(helpers),
-        helpers.progress());
+        () -> seeking().or(helpers.progress()));
+  }
+
+  private Optional<Progress> seeking() {
+    return driver.get().status().seek().flatMap(this::seeking);
+  }
+
+  private Optional<Progress> seeking(tunwarden.replay.ReplayStatus.Seek seek) {
+    double whole = Math.max(1, Duration.between(seek.from(), seek.to()).toMillis());
+    double done = Duration.between(seek.from(), target.get().reached()).toMillis();
+    Duration spent = Duration.ofNanos(System.nanoTime() - seek.sinceNanos());
+    String what = show.origin() == Origin.REPLAY ? "going to " : "playing up to ";
+    return Progress.after(
+        spent, what + TIME_OF_DAY.format(seek.to().atZone(front.zone())), done / whole);
   }
 
   /** A rehearsal has no end to show on a time bar. */

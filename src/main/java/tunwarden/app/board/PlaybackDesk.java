@@ -70,7 +70,11 @@ final class PlaybackDesk implements Desk {
 
   @Override
   public String stopWork() {
-    helpers.stopWork().run();
+    if (driver.status().seek().isPresent()) {
+      driver.stopSeeking();
+    } else {
+      helpers.stopWork().run();
+    }
     return "";
   }
 

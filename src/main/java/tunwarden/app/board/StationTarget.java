@@ -46,6 +46,11 @@ final class StationTarget implements ReplayTarget {
     reached = place.time();
   }
 
+  /** Stands at a time before anything was fed. */
+  void begin(Instant start) {
+    reached = start;
+  }
+
   /** Data time reached, never behind the newest assessment; safe from any thread. */
   Instant reached() {
     return reached;

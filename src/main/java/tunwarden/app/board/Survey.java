@@ -31,14 +31,13 @@ import tunwarden.vessel.Vessel;
  */
 final class Survey implements AutoCloseable {
   private static final Logger LOG = LoggerFactory.getLogger(Survey.class);
-  private static final double SHOWN_AFTER_S = 0.5;
 
   private final LogFile log;
   private final Station station;
   private final long size;
   private final List<TimeMark> marks = new ArrayList<>();
   private final Thread thread = new Thread(this::read, "survey");
-  private final long startedNanos = System.nanoTime();
+  private volatile long startedNanos = System.nanoTime();
   private volatile long bytesRead;
   private volatile boolean stopped;
   private volatile boolean ended;
@@ -60,6 +59,7 @@ final class Survey implements AutoCloseable {
   }
 
   void start() {
+    startedNanos = System.nanoTime();
     thread.start();
   }
 
@@ -75,16 +75,12 @@ final class Survey implements AutoCloseable {
 
   /** How far it has come; empty when it is done or has only just begun. */
   Optional<Progress> progress() {
-    double spentS = (System.nanoTime() - startedNanos) * 1e-9;
-    if (ended || stopped || spentS < SHOWN_AFTER_S) {
+    if (ended || stopped) {
       return Optional.empty();
     }
-    double share = Math.min(1, (double) bytesRead / size);
-    Optional<Duration> left =
-        share > 0.01
-            ? Optional.of(Duration.ofSeconds(Math.round(spentS * (1 - share) / share)))
-            : Optional.empty();
-    return Optional.of(new Progress("reading " + log.path().getFileName(), share, left));
+    Duration spent = Duration.ofNanos(System.nanoTime() - startedNanos);
+    double share = (double) bytesRead / size;
+    return Progress.after(spent, "looking for events in " + log.path().getFileName(), share);
   }
 
   /** Stops reading; what was found so far stays. */

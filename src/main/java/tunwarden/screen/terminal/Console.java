@@ -22,8 +22,29 @@ final class Console extends UnixTerminal {
 
   Console(InputStream in, OutputStream out) throws IOException {
     super(in, out, StandardCharsets.UTF_8, CtrlCBehaviour.TRAP);
-    // Without these, Control-Z would leave a shell inside our screen, and Control-S would stop it.
-    runSTTYCommand("susp", "undef", "quit", "undef", "-ixon");
+  }
+
+  /**
+   * All at once and the size with it, since every call starts a process. Without the second line
+   * Control-Z would leave a shell inside our screen, and Control-S would stop it.
+   */
+  @Override
+  protected void canonicalMode(boolean enabled) throws IOException {
+    known =
+        size(
+            runSTTYCommand(
+                "-icanon", "min", "1", "-echo", "intr", "undef", //
+                "susp", "undef", "quit", "undef", "-ixon", "size"));
+  }
+
+  @Override
+  protected void keyEchoEnabled(boolean enabled) {
+    // See canonicalMode.
+  }
+
+  @Override
+  protected void keyStrokeSignalsEnabled(boolean enabled) {
+    // See canonicalMode.
   }
 
   /** What must have stopped before the terminal is given back. */
@@ -52,9 +73,15 @@ final class Console extends UnixTerminal {
   }
 
   private TerminalSize askDriver() throws IOException {
-    Matcher size = ROWS_AND_COLUMNS.matcher(runSTTYCommand("size"));
+    TerminalSize size = size(runSTTYCommand("size"));
+    return size == null ? super.findTerminalSize() : size;
+  }
+
+  /** What the driver answered; null if that was no size. */
+  private static TerminalSize size(String answer) {
+    Matcher size = ROWS_AND_COLUMNS.matcher(answer);
     if (!size.matches()) {
-      return super.findTerminalSize();
+      return null;
     }
     int rows = Integer.parseInt(size.group(1));
     int columns = Integer.parseInt(size.group(2));

@@ -1,12 +1,21 @@
 package tunwarden.screen.terminal;
 
+import com.googlecode.lanterna.TerminalSize;
+import com.googlecode.lanterna.screen.Screen;
+import com.googlecode.lanterna.screen.TerminalScreen;
 import com.googlecode.lanterna.terminal.Terminal;
+import com.googlecode.lanterna.terminal.virtual.DefaultVirtualTerminal;
 import java.io.IOException;
 import java.io.PrintStream;
+import java.io.UncheckedIOException;
 import java.nio.charset.StandardCharsets;
 import java.util.function.Supplier;
 import tunwarden.screen.model.Board;
 import tunwarden.screen.model.Desk;
+import tunwarden.screen.model.Look;
+import tunwarden.screen.model.Model;
+import tunwarden.screen.model.Size;
+import tunwarden.screen.view.ScreenView;
 
 /** The dashboard, from opening the terminal to giving it back. */
 public final class Dashboard {
@@ -35,6 +44,21 @@ public final class Dashboard {
     } finally {
       System.setOut(out);
       System.setErr(err);
+    }
+  }
+
+  /** Draws a board on a terminal that is only memory; loads what a first frame needs. */
+  public static void drawInMemory(Board board) {
+    try {
+      TerminalScreen screen = new TerminalScreen(new DefaultVirtualTerminal());
+      TerminalSize size = screen.getTerminalSize();
+      Size cells = new Size(size.getColumns(), size.getRows());
+      Model model = Model.start(board, Look.USUAL, cells);
+      screen.startScreen();
+      new Painter(screen).paint(ScreenView.draw(model), model.look().theme());
+      screen.refresh(Screen.RefreshType.COMPLETE);
+    } catch (IOException e) {
+      throw new UncheckedIOException(e);
     }
   }
 

@@ -10,5 +10,8 @@ import tunwarden.screen.model.Look;
  * @param window a window of its own instead of the terminal
  * @param bell whether a new alarm rings the terminal bell
  * @param strayOutput where standard output and error go while the screen is up
+ * @param onceShown what can wait until the first frame is up; runs on the drawing thread, so it
+ *     only begins things
  */
-public record DashboardOptions(Look look, boolean window, boolean bell, OutputStream strayOutput) {}
+public record DashboardOptions(
+    Look look, boolean window, boolean bell, OutputStream strayOutput, Runnable onceShown) {}

@@ -37,7 +37,7 @@ final class Session {
   private final TerminalScreen screen;
   private final Supplier<Board> latest;
   private final Desk desk;
-  private final boolean bell;
+  private final DashboardOptions options;
   private final AtomicReference<Model> model;
   private final Object wake = new Object();
   private final Thread drawing = new Thread(this::drawUntilOver, "screen");
@@ -52,7 +52,7 @@ final class Session {
     this.screen = new TerminalScreen(terminal);
     this.latest = latest;
     this.desk = desk;
-    this.bell = options.bell();
+    this.options = options;
     Size size = size(screen.getTerminalSize());
     this.model = new AtomicReference<>(Model.start(latest.get(), options.look(), size));
     drawing.setDaemon(true);
@@ -132,13 +132,18 @@ final class Session {
   private void drawUntilOver() {
     Frames frames = new Frames(screen);
     Chime chime = new Chime();
+    boolean shown = false;
     try {
       while (!over) {
         Board board = latest.get();
-        if (bell && chime.isDue(board)) {
+        if (options.bell() && chime.isDue(board)) {
           terminal.bell();
         }
         draw(frames, board);
+        if (!shown) {
+          shown = true;
+          options.onceShown().run();
+        }
         pause();
       }
     } catch (IOException terminalGone) {

@@ -82,7 +82,7 @@ class SessionTest {
 
   private void run(Supplier<Board> latest) {
     DashboardOptions options =
-        new DashboardOptions(Look.USUAL, false, false, OutputStream.nullOutputStream());
+        new DashboardOptions(Look.USUAL, false, false, OutputStream.nullOutputStream(), () -> {});
     assertTimeoutPreemptively(PATIENCE, () -> Dashboard.runOn(terminal, latest, desk, options));
   }
 
@@ -166,7 +166,7 @@ class SessionTest {
 
   private Thread start() {
     DashboardOptions options =
-        new DashboardOptions(Look.USUAL, false, false, OutputStream.nullOutputStream());
+        new DashboardOptions(Look.USUAL, false, false, OutputStream.nullOutputStream(), () -> {});
     Thread thread = new Thread(() -> Dashboard.runOn(terminal, SessionTest::calm, desk, options));
     thread.setDaemon(true);
     thread.start();

@@ -24,7 +24,7 @@ public final class TerminalPreview {
   public static void main(String[] args) throws IOException {
     Board board = Boards.three(Origin.REHEARSAL, Instant.now());
     DashboardOptions options =
-        new DashboardOptions(Look.USUAL, false, true, OutputStream.nullOutputStream());
+        new DashboardOptions(Look.USUAL, false, true, OutputStream.nullOutputStream(), () -> {});
     if (Boolean.getBoolean("preview.adapter")) {
       Dashboard.runOn(new JlineTerminal(), () -> next(board), new RecordingDesk(), options);
     } else {
