@@ -18,6 +18,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Set;
 import tunwarden.units.Display;
+import tunwarden.units.InUnits;
 import tunwarden.units.Unit;
 
 /**
@@ -33,6 +34,7 @@ final class AnswerSheet {
   private final Display display;
   private final Map<String, Object> values = new LinkedHashMap<>();
   private final List<String[]> lines = new ArrayList<>();
+  private final Set<String> assumptions = new LinkedHashSet<>();
   private final Set<String> cautions = new LinkedHashSet<>();
   private String model = "";
   private boolean no;
@@ -140,7 +142,12 @@ final class AnswerSheet {
     model = words;
   }
 
-  /** Something to mind before acting on the answer. */
+  /** What the answer rests on, one sentence without its full stop, quantities metric. */
+  void assume(String sentence) {
+    assumptions.add(sentence);
+  }
+
+  /** Something to mind before acting on the answer, quantities metric. */
   void caution(String sentence) {
     cautions.add(sentence);
   }
@@ -148,7 +155,12 @@ final class AnswerSheet {
   void printText(PrintWriter out) {
     lines.forEach(line -> print(out, line[0], line[1]));
     print(out, "model", model);
-    cautions.forEach(caution -> print(out, "caution", caution));
+    String label = "assumes";
+    for (String sentence : assumptions) {
+      print(out, label, InUnits.of(sentence, display));
+      label = "";
+    }
+    cautions.forEach(sentence -> print(out, "caution", InUnits.of(sentence, display)));
   }
 
   void printJson(PrintWriter out) {
@@ -164,16 +176,22 @@ final class AnswerSheet {
         write(json, entry.getValue());
       }
       json.writeStringField("model", model);
-      json.writeArrayFieldStart("cautions");
-      for (String caution : cautions) {
-        json.writeString(caution);
-      }
-      json.writeEndArray();
+      writeTexts(json, "assumptions", assumptions);
+      writeTexts(json, "cautions", cautions);
       json.writeEndObject();
     } catch (IOException impossible) {
       throw new UncheckedIOException(impossible);
     }
     out.println(text);
+  }
+
+  private static void writeTexts(JsonGenerator json, String key, Set<String> texts)
+      throws IOException {
+    json.writeArrayFieldStart(key);
+    for (String text : texts) {
+      json.writeString(text);
+    }
+    json.writeEndArray();
   }
 
   private static void write(JsonGenerator json, Object value) throws IOException {

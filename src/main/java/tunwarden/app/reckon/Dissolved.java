@@ -49,6 +49,7 @@ final class Dissolved extends AnswerCommand {
     }
     ReliefLines.margin(sheet, described, now.paGauge());
     sheet.model(rest.model(Gas.CO2));
+    Assumed.equilibrium(sheet, described);
     sheet.caution(Equilibrium.CAUTION);
   }
 }

@@ -79,6 +79,9 @@ final class Flow extends AnswerCommand {
     String regime = IsentropicOrifice.regime(gas, inlet.paAbsolute(), behind).word();
     sheet.plain("regime", regime, "regime", regime);
     sheet.model(flow.model());
+    sheet.assume(
+        "the gas is at rest before the opening, at the stated pressure and temperature; nothing is"
+            + " lost in the line before or behind it");
     sheet.caution("dry gas only: foam or liquid in the line passes quite differently");
   }
 }

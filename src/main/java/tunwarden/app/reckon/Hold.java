@@ -51,6 +51,7 @@ final class Hold extends AnswerCommand {
     ReliefLines.margin(sheet, described, paGauge);
     ReliefLines.forecast(sheet, described, paGauge, hold.u95());
     sheet.model(rest.model(Gas.CO2));
+    Assumed.equilibrium(sheet, described);
     sheet.caution(Equilibrium.CAUTION);
   }
 }

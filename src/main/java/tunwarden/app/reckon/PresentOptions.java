@@ -70,6 +70,9 @@ final class PresentOptions {
     solubility
         .breaches(Gas.CO2, present.pressurePaAbsolute(), present.temperatureK())
         .forEach(sheet::caution);
+    sheet.assume(
+        "now: liquid and gas at rest with each other at the stated pressure and temperature");
+    sheet.assume(Assumed.gas(present.vessel()));
     if (!vessel.liquidIsNamed()) {
       sheet.caution("no liquid was named: reckoned for water");
     }

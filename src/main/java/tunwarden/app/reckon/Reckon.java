@@ -31,6 +31,7 @@ public final class Reckon implements Runnable, Group {
           Chill.class,
           VentTrial.class,
           Sealing.class,
+          SupplyTrial.class,
           ReliefCheck.class,
           VacuumCheck.class,
           Solubility.class,

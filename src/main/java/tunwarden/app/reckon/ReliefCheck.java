@@ -16,6 +16,7 @@ import tunwarden.forecast.vent.OrificeFit;
 import tunwarden.units.BadInputException;
 import tunwarden.units.Constants;
 import tunwarden.units.Display;
+import tunwarden.units.InUnits;
 import tunwarden.units.Pressure;
 import tunwarden.units.Unit;
 import tunwarden.vessel.ReliefOrifice;
@@ -98,6 +99,10 @@ final class ReliefCheck extends AnswerCommand {
             + " overpressure as "
             + setting.rule().words().replace(" tolerance", "")
             + "; Balling; API 521 fire heat");
+    sheet.assume(
+        "all of the valve's flow path open, gas at the vessel's temperature, straight into the open"
+            + " air");
+    sheet.assume("each source by itself, not several at once");
     sheet.caution(Demands.NOT_COVERED);
     sheet.caution("never block, reset or adjust a relief valve");
   }
@@ -132,7 +137,7 @@ final class ReliefCheck extends AnswerCommand {
               + " kg/h, "
               + Display.number(100 * demand.share(), 0)
               + " % of capacity: "
-              + demand.words());
+              + InUnits.of(demand.words(), sheet.display()));
     }
     sheet.hidden("demand_kg_per_h", flows);
     sheet.hidden("u95_demand_kg_per_h", doubts);

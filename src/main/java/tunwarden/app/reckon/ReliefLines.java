@@ -1,6 +1,7 @@
 package tunwarden.app.reckon;
 
 import java.util.Optional;
+import tunwarden.units.Display;
 import tunwarden.vessel.ReliefSetting;
 import tunwarden.vessel.Vessel;
 
@@ -35,7 +36,7 @@ final class ReliefLines {
             relief ->
                 sheet.caution(
                     "the valve may lift there: it may open from "
-                        + sheet.display().gauge(relief.earliestLiftPaGauge())
+                        + Display.METRIC.gauge(relief.earliestLiftPaGauge())
                         + " ("
                         + relief.rule().words()
                         + "); keep it cool or let it down into an aired room first, and never"

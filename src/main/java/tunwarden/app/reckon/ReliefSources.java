@@ -3,6 +3,7 @@ package tunwarden.app.reckon;
 import java.util.ArrayList;
 import java.util.List;
 import picocli.CommandLine.ITypeConverter;
+import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 import tunwarden.app.options.Convert;
 import tunwarden.forecast.ferment.FermentationRate;
@@ -12,15 +13,12 @@ import tunwarden.forecast.relief.FireHeat;
 import tunwarden.forecast.relief.ReliefCase;
 import tunwarden.units.BadInputException;
 import tunwarden.units.Kind;
-import tunwarden.units.Pressure;
 import tunwarden.units.Quantities;
-import tunwarden.vessel.ReliefOrifice;
 import tunwarden.vessel.Vessel;
 
 /** What can press on a relief valve. */
 final class ReliefSources {
   private static final double HOUR_S = 3600;
-  private static final double USUAL_KD = 0.6;
 
   @Option(
       names = "--extract-drop",
@@ -39,26 +37,7 @@ final class ReliefSources {
       description = "Warm-up: how much in an hour, as '5 C'.")
   private Double warmingK;
 
-  @Option(
-      names = "--supply",
-      paramLabel = "PRESSURE",
-      converter = Convert.ToPressure.class,
-      description = "Supply failed open: pressure behind the regulator.")
-  private Pressure supply;
-
-  @Option(
-      names = "--supply-orifice",
-      paramLabel = "LENGTH",
-      converter = Convert.ToDiameter.class,
-      description = "Its widest opening, as '3 mm'.")
-  private Double supplyM;
-
-  @Option(
-      names = "--supply-flow",
-      paramLabel = "FLOW",
-      converter = ToKgPerS.class,
-      description = "Or its largest flow, as '30 kg/h'.")
-  private Double supplyKgPerS;
+  @Mixin private SupplyOptions supply;
 
   @Option(
       names = "--fire-area",
@@ -77,14 +56,6 @@ final class ReliefSources {
     @Override
     public Double convert(String text) {
       return above(text, Quantities.parse(text, Kind.AREA));
-    }
-  }
-
-  /** Mass flow: kg/s. */
-  static final class ToKgPerS implements ITypeConverter<Double> {
-    @Override
-    public Double convert(String text) {
-      return above(text, Quantities.parse(text, Kind.MASS_FLOW));
     }
   }
 
@@ -127,17 +98,19 @@ final class ReliefSources {
   }
 
   private void addSupply(List<Demand> demands, ReliefCase valve) {
-    if (supplyKgPerS != null) {
-      demands.add(Demands.statedSupply(valve, supplyKgPerS));
-    } else if (supply != null && supplyM != null) {
-      demands.add(
-          Demands.supply(
-              valve,
-              supply.absolutePa(valve.ambientPaAbsolute()),
-              new ReliefOrifice(supplyM, USUAL_KD)));
-    } else if (supply != null || supplyM != null) {
-      throw new BadInputException("--supply and --supply-orifice go together, or --supply-flow");
+    if (supply.flowKgPerS().isPresent()) {
+      demands.add(Demands.statedSupply(valve, supply.flowKgPerS().get()));
+      return;
     }
+    supply
+        .through(valve.ambientPaAbsolute())
+        .ifPresent(
+            failed ->
+                demands.add(
+                    Demands.supply(
+                        valve,
+                        failed.paGauge() + valve.ambientPaAbsolute(),
+                        failed.seat().orElseThrow())));
   }
 
   private static boolean ferments(Vessel vessel) {

@@ -95,7 +95,7 @@ final class Sealing extends AnswerCommand {
     answer.reachesWanted().ifPresent(enough -> sheet.hidden("reaches_target", enough));
     present.model(sheet, ensemble, ", Balling's balance of fermentation");
     answer.cautions().forEach(caution -> sheet.caution(caution.text()));
-    sheet.hidden("assumptions", SealAnswer.ASSUMPTIONS);
+    SealAnswer.ASSUMPTIONS.forEach(sheet::assume);
   }
 
   private SealQuestion question(Ensemble ensemble) {

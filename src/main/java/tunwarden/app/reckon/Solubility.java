@@ -51,6 +51,9 @@ final class Solubility extends AnswerCommand {
     number(sheet, "bunsen", "Bunsen", found.bunsen(), "(gas at 0 °C and 1 atm, per volume)");
     number(sheet, "g_per_l_per_bar", "dissolved", found.kgPerM3PerBar(), "g/L at 1 bar of the gas");
     sheet.model(henry.model());
+    sheet.assume(
+        "at equilibrium, so little dissolved that it goes by proportion; the gas alone over the"
+            + " liquid, water vapour apart");
   }
 
   private static void number(

@@ -1,5 +1,8 @@
 package tunwarden.app.reckon;
 
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.List;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
@@ -48,14 +51,17 @@ final class VacuumCheck extends AnswerCommand {
     }
     Ensemble ensemble = present.ensemble();
     double limit = ensemble.present().vessel().limits().vacuumOrNonePaGauge();
-    double lowest = Double.POSITIVE_INFINITY;
+    List<Spread> ends = new ArrayList<>();
     if (coolK != null) {
       Spread cooled = ensemble.range(world -> world.restPaGauge(coolK));
-      lowest = Math.min(lowest, put(sheet, "after_cooling_bar_g", "cooled", cooled));
+      ends.add(put(sheet, "after_cooling_bar_g", "cooled", cooled));
+      sheet.assume("cooled: shut, liquid and gas at rest again at that temperature");
     }
     if (causticShare != null) {
       Spread bound = ensemble.range(world -> world.causticPaGauge(causticShare));
-      lowest = Math.min(lowest, put(sheet, "after_caustic_bar_g", "after caustic", bound));
+      ends.add(put(sheet, "after_caustic_bar_g", "after caustic", bound));
+      sheet.assume(
+          "caustic: at the same temperature, no gas let in, the liquid gives nothing off meanwhile");
       World world = ensemble.middle();
       double co2Kg = causticShare * world.headspaceMol(Gas.CO2) * Gas.CO2.molarMass();
       sheet.line("caustic soda", Display.number(Vacuum.causticKg(co2Kg), 2) + " kg NaOH bind it");
@@ -65,25 +71,32 @@ final class VacuumCheck extends AnswerCommand {
         throw new BadInputException("--draw: that is more than the vessel holds; check its unit");
       }
       Spread drawn = ensemble.range(world -> world.drawnPaGauge(drawM3));
-      lowest = Math.min(lowest, put(sheet, "after_drawing_bar_g", "drawn off", drawn));
+      ends.add(put(sheet, "after_drawing_bar_g", "drawn off", drawn));
+      sheet.assume("drawn off: so quickly that the liquid gives no gas off meanwhile");
     }
-    sheet.json(
-        "vacuum_margin_bar",
-        (lowest - limit) / 1e5,
-        ensemble.present().vessel().accuracy().pressureU95Pa() / 1e5);
-    sheet.line("vacuum margin", sheet.display().signedPressureNumber(lowest - limit) + " at worst");
+    margin(sheet, ends, limit);
     present.model(sheet, ensemble, "");
-    if (lowest < limit) {
+  }
+
+  /** The worst of the cases against the limit, with that case's own uncertainty. */
+  private static void margin(AnswerSheet sheet, List<Spread> ends, double limitPaGauge) {
+    Spread worst = ends.stream().min(Comparator.comparingDouble(Spread::low)).orElseThrow();
+    sheet.difference(
+        "vacuum_margin_bar",
+        "vacuum margin",
+        worst.middle() - limitPaGauge,
+        PresentOptions.u95(worst));
+    if (worst.low() < limitPaGauge) {
       sheet.caution(
           "that is below what the vessel may bear ("
-              + sheet.display().gauge(limit)
+              + Display.METRIC.gauge(limitPaGauge)
               + "): keep a vent or a gas supply open; a thin wall collapses under a small vacuum");
     }
   }
 
-  /** Puts the value down; returns the lower end of its range. */
-  private static double put(AnswerSheet sheet, String key, String label, Spread paGauge) {
+  /** Puts the value down and returns it. */
+  private static Spread put(AnswerSheet sheet, String key, String label, Spread paGauge) {
     sheet.gauge(key, label, paGauge.middle(), PresentOptions.u95(paGauge));
-    return paGauge.low();
+    return paGauge;
   }
 }

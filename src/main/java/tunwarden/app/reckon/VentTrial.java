@@ -96,7 +96,7 @@ final class VentTrial extends AnswerCommand {
     plan(sheet, answer);
     present.model(sheet, ensemble, ", isentropic orifice, well-mixed room");
     answer.cautions().forEach(caution -> sheet.caution(caution.text()));
-    sheet.hidden("assumptions", VentAnswer.ASSUMPTIONS);
+    VentAnswer.ASSUMPTIONS.forEach(sheet::assume);
   }
 
   private VentQuestion question() {

@@ -1,15 +1,19 @@
 package tunwarden.app.reckon;
 
 import java.util.Optional;
+import java.util.OptionalDouble;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Mixin;
 import picocli.CommandLine.Option;
 import tunwarden.app.options.Convert;
+import tunwarden.estimate.Estimate.Spread;
 import tunwarden.forecast.Ensemble;
+import tunwarden.forecast.Forecaster;
 import tunwarden.forecast.Present;
 import tunwarden.forecast.TimeRange;
 import tunwarden.forecast.WarmUp;
 import tunwarden.physics.answer.Answer;
+import tunwarden.physics.answer.Warming;
 import tunwarden.units.BadInputException;
 import tunwarden.units.Display;
 import tunwarden.vessel.ReliefSetting;
@@ -52,7 +56,33 @@ final class Warm extends AnswerCommand {
     if (constantS != null && relief.isPresent()) {
       time(sheet, at, relief.get().earliestLiftPaGauge());
     }
+    full(sheet, at);
     ReliefLines.forecast(sheet, at.vessel(), pressure.value().orElseThrow(), pressure.u95());
+  }
+
+  /** Said only of a vessel that may come to be full. */
+  private static void full(AnswerSheet sheet, WarmingOptions.Case at) {
+    if (at.vessel().fillM3() >= at.vessel().volumeM3()) {
+      return;
+    }
+    Ensemble ensemble =
+        Ensemble.of(Present.atRest(at.vessel(), at.now().paGauge(), at.now().temperatureK()));
+    OptionalDouble full = Forecaster.liquidFullK(ensemble.middle());
+    if (full.isEmpty()) {
+      sheet.hidden("liquid_full_temperature_c", null);
+      return;
+    }
+    Spread range = ensemble.range(world -> Forecaster.liquidFullK(world).orElse(Warming.MOST_K));
+    sheet.temperature(
+        "liquid_full_temperature_c",
+        "full of liquid",
+        full.getAsDouble(),
+        PresentOptions.u95(range));
+    if (full.getAsDouble() <= at.toK()) {
+      sheet.caution(
+          "on the way no headspace is left: from there the pressure rises by bars per degree, and"
+              + " the relief valve passes liquid; draw some off first");
+    }
   }
 
   private void time(AnswerSheet sheet, WarmingOptions.Case at, double liftPaGauge) {
@@ -63,6 +93,9 @@ final class Warm extends AnswerCommand {
       sheet.none("time_to_lift_h", "lifts after", "not reached while it warms");
       return;
     }
+    sheet.assume(
+        "warming: the gap to the surroundings closes by 63 % in the time constant as stated; the"
+            + " range is that of how fast gas leaves the liquid");
     double middle = range.get().middle().toSeconds() / HOUR_S;
     double low = range.get().low().toSeconds() / HOUR_S;
     String high =

@@ -66,6 +66,10 @@ final class WarmingOptions {
     if (!vessel.liquidIsNamed()) {
       sheet.caution("no liquid was named: reckoned for water");
     }
+    sheet.assume(
+        "shut, nothing let in or out, the vessel rigid; liquid and gas at rest with each other before"
+            + " and after");
+    sheet.assume(Assumed.gas(at.vessel()));
     sheet.caution(
         "true once settled: a still vessel takes days to weeks to follow its temperature");
     return pressure;

@@ -60,7 +60,7 @@ public final class Demands {
         valve.gasKgPerS(),
         String.format(
             Locale.ROOT,
-            "%.1f K/h at %.1f °C, liquid at rest with the gas",
+            "warming by %.1f °C an hour at %.1f °C, liquid at rest with the gas",
             HOUR_S * kelvinPerS,
             valve.temperatureK() - Constants.ZERO_CELSIUS_K));
   }

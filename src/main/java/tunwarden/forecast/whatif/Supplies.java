@@ -85,7 +85,8 @@ public final class Supplies {
         .ifPresent(s -> parts.add(name + " in " + Words.time(s.middle())));
   }
 
-  private static List<Caution> cautions(Limits limits, Supply supply) {
+  /** What to mind of it. */
+  public static List<Caution> cautions(Limits limits, Supply supply) {
     boolean bursts = supply.paGauge() > limits.vesselPaGauge().orElse(Double.MAX_VALUE);
     boolean lifts =
         limits.relief().stream().anyMatch(r -> supply.paGauge() >= r.earliestLiftPaGauge());
