@@ -4,6 +4,8 @@ import tunwarden.reading.Reading;
 
 /** The mean of neighbouring readings of one quantity, and what was last passed on. */
 final class Mean {
+  private static final int MANY = 6;
+
   private double sum;
   private int count;
   private long firstMs;
@@ -19,6 +21,16 @@ final class Mean {
   boolean isAway(double value, double telling) {
     double usual = isEmpty() ? passed : sum / count;
     return !(Math.abs(value - usual) <= telling);
+  }
+
+  /** Whether it is of enough readings to be worth more than each. */
+  boolean isOfMany() {
+    return count >= MANY;
+  }
+
+  /** How far the present mean lies from the one last passed on. */
+  double moved() {
+    return Math.abs(sum / count - passed);
   }
 
   /** Whether the newest reading was of another quality. */

@@ -9,14 +9,21 @@ import tunwarden.reading.Reading;
 
 /**
  * Stands before the estimator and lets through no more than the signals carry news: readings that
- * stay within their noise are averaged over up to a minute, one that leaves it goes through at
- * once, and for a while after it the averages are short. Give it usable readings only.
+ * stay within their noise are averaged over a minute, or two while even the average rests; one that
+ * leaves it goes through at once, and for a while after it the averages are short. Give it usable
+ * readings only.
  */
 final class Thinner {
   private static final long CALM_MS = 60_000;
+  private static final long AT_REST_MS = 120_000;
   private static final long LIVELY_MS = 10_000;
   private static final long STAYS_LIVELY_MS = 180_000;
   private static final double TELLING_K = 0.5;
+
+  /** Below these the estimator takes a change for the instruments' own lasting errors. */
+  private static final double REST_PA = 40;
+
+  private static final double REST_K = 0.05;
 
   private final Map<Quantity, Mean> besides = new EnumMap<>(Quantity.class);
   private final Mean pressure = new Mean();
@@ -54,9 +61,16 @@ final class Thinner {
     }
     livelyUntilMs = isNews ? ms + STAYS_LIVELY_MS : livelyUntilMs;
     pressure.add(reading);
-    if (isNews || pressure.lengthMs() >= (ms < livelyUntilMs ? LIVELY_MS : CALM_MS)) {
+    if (isNews || pressure.lengthMs() >= (ms < livelyUntilMs ? LIVELY_MS : calmMs())) {
       flush();
     }
+  }
+
+  private long calmMs() {
+    Mean temperature = besides.get(Quantity.TEMPERATURE);
+    boolean level = temperature == null || temperature.isEmpty() || temperature.moved() <= REST_K;
+    boolean rests = level && pressure.isOfMany() && pressure.moved() <= REST_PA;
+    return rests ? AT_REST_MS : CALM_MS;
   }
 
   /** Lets through what is kept. */

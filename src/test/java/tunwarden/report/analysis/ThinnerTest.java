@@ -65,7 +65,7 @@ class ThinnerTest {
     }
     finish();
     int steps = pressures.size();
-    assertTrue(steps >= 360 && steps < 400, "steps " + steps);
+    assertTrue(steps >= 180 && steps < 400, "steps " + steps);
     pressures.stream().skip(20).forEach(mean -> assertEquals(1e5, mean.value(), 60));
   }
 
