@@ -95,7 +95,7 @@ public final class AlarmBook {
     List<Transition> out = new ArrayList<>();
     Page next = page;
     for (Condition condition : Conditions.of(assessment, settings, page)) {
-      next = next.take(condition, vessel, settings, at, out);
+      next = next.take(settings.heeded(condition), vessel, settings, at, out);
     }
     return folded(vessel, next, out, at);
   }
@@ -109,7 +109,7 @@ public final class AlarmBook {
     List<Transition> out = new ArrayList<>();
     Condition.Truth truth = active ? Condition.Truth.YES : Condition.Truth.NO;
     Condition condition = Condition.plain(kind, truth, active ? text : "");
-    Page next = page(STATION).take(condition, STATION, settings, at, out);
+    Page next = page(STATION).take(settings.heeded(condition), STATION, settings, at, out);
     return folded(STATION, next, out, at);
   }
 

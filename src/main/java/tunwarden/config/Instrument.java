@@ -1,9 +1,12 @@
 package tunwarden.config;
 
 import java.time.Duration;
+import java.time.Instant;
 import java.util.List;
 import java.util.Optional;
 import java.util.OptionalDouble;
+import tunwarden.reading.Fault;
+import tunwarden.reading.Quality;
 import tunwarden.reading.Quantity;
 import tunwarden.units.Kind;
 import tunwarden.wire.signal.Calibration;
@@ -37,13 +40,25 @@ public record Instrument(
    * @param accuracyU95 as a 95 % expanded uncertainty, SI; empty where not stated
    * @param calibration what it showed against what was true; empty where not stated
    * @param check whether it is the second of a pair, which only vouches for the first
+   * @param outOfService why it is not read at present; empty when it is
    */
   public record Worth(
-      OptionalDouble accuracyU95, Optional<Calibration> calibration, boolean check) {}
+      OptionalDouble accuracyU95,
+      Optional<Calibration> calibration,
+      boolean check,
+      Optional<String> outOfService) {}
 
   /** The same instrument read for another vessel. */
   Instrument forVessel(String id) {
     return new Instrument(id, quantity, device, port, field, address, every, baud, worth);
+  }
+
+  /** What stands for an instrument that is out of service: that there is no value, and why. */
+  public Optional<Fault> outOfService(Instant now) {
+    return worth
+        .outOfService
+        .filter(why -> !worth.check)
+        .map(why -> new Fault(now, vessel, quantity, Quality.OUT_OF_SERVICE, why));
   }
 
   /** Accuracy as a 95 % expanded uncertainty, SI; empty where not stated. */

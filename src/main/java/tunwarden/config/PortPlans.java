@@ -1,12 +1,17 @@
 package tunwarden.config;
 
+import java.io.IOException;
+import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
 import java.util.LinkedHashMap;
+import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.Set;
 import tunwarden.config.profile.Profiles;
+import tunwarden.reading.Quantity;
 import tunwarden.serial.PairGate;
 import tunwarden.serial.PortPlan;
 import tunwarden.units.BadInputException;
@@ -20,6 +25,11 @@ public final class PortPlans {
   private final Cellar cellar;
   private final Path folder;
 
+  private final List<Misfit> misfits = new ArrayList<>();
+
+  /** What does not fit, and the keys it stands under. */
+  private record Misfit(List<String> path, String sentence) {}
+
   private PortPlans(Cellar cellar) {
     this.cellar = cellar;
     Path parent = cellar.file().toAbsolutePath().getParent();
@@ -27,10 +37,10 @@ public final class PortPlans {
   }
 
   /**
-   * One plan for each port, in the order of the file.
+   * One plan for each port, in the order of the file. Instruments out of service are not read.
    *
-   * @throws BadInputException naming file and instrument when a profile, a field or a line does not
-   *     fit
+   * @throws BadCellarException naming line and key of everything that does not fit: profiles,
+   *     fields, lines
    */
   public static List<PortPlan> of(Cellar cellar) {
     return new PortPlans(cellar).plans();
@@ -39,19 +49,60 @@ public final class PortPlans {
   private List<PortPlan> plans() {
     Map<String, List<Binding>> byPort = new LinkedHashMap<>();
     for (Instrument instrument : cellar.instruments()) {
-      byPort.computeIfAbsent(instrument.port(), port -> new ArrayList<>()).add(binding(instrument));
+      try {
+        Binding binding = binding(instrument);
+        if (instrument.worth().outOfService().isEmpty()) {
+          byPort.computeIfAbsent(instrument.port(), port -> new ArrayList<>()).add(binding);
+        }
+      } catch (IllegalArgumentException unfit) {
+        misfits.add(new Misfit(path(instrument), unfit.getMessage()));
+      }
     }
     List<PortPlan> plans = new ArrayList<>();
-    byPort.forEach((port, bindings) -> plans.add(plan(port, bindings)));
+    byPort.forEach((port, bindings) -> plan(port, bindings).ifPresent(plans::add));
+    throwIfAny();
     return plans;
   }
 
-  private PortPlan plan(String port, List<Binding> bindings) {
+  private Optional<PortPlan> plan(String port, List<Binding> bindings) {
     try {
-      return new PortPlan(port, bindings);
+      return Optional.of(new PortPlan(port, bindings));
     } catch (IllegalArgumentException unfit) {
-      throw new BadInputException(cellar.file() + ": " + unfit.getMessage(), unfit);
+      List<String> path =
+          cellar.instruments().stream()
+              .filter(instrument -> instrument.port().equals(port))
+              .findFirst()
+              .map(PortPlans::path)
+              .orElse(List.of());
+      misfits.add(new Misfit(path, unfit.getMessage()));
+      return Optional.empty();
     }
+  }
+
+  /** The file is looked into again, for the lines, only when something is wrong. */
+  private void throwIfAny() {
+    if (misfits.isEmpty()) {
+      return;
+    }
+    String text;
+    try {
+      text = Files.readString(cellar.file());
+    } catch (IOException gone) {
+      text = "";
+    }
+    Problems problems = new Problems(cellar.file().toString(), LineIndex.of(text));
+    Set<Misfit> once = new LinkedHashSet<>(misfits);
+    once.forEach(misfit -> problems.add(misfit.path(), misfit.sentence()));
+    problems.throwIfAny();
+  }
+
+  private static List<String> path(Instrument instrument) {
+    if (instrument.quantity() == Quantity.BAROMETER) {
+      return List.of("site", "barometer");
+    }
+    String key =
+        instrument.quantity().word() + (instrument.worth().check() ? ReadingsReader.CHECK : "");
+    return List.of("vessel", instrument.vessel(), "readings", key);
   }
 
   private Binding binding(Instrument instrument) {
@@ -62,8 +113,7 @@ public final class PortPlans {
             .orElseThrow(
                 () ->
                     new BadInputException(
-                        where(instrument)
-                            + ": device '"
+                        "device '"
                             + profile.name()
                             + "' has no field '"
                             + instrument.field()
@@ -75,26 +125,17 @@ public final class PortPlans {
             cellar.site().ambientPaAbsolute(),
             instrument.every().orElse(profile.polling().period()),
             instrument.accuracyU95().orElse(field.trust().u95Si()));
-    try {
-      return new Binding(
-          instrument.vessel() + (instrument.worth().check() ? PairGate.CHECK : ""),
-          instrument.quantity(),
-          profile,
-          field,
-          instrument.address().orElse(0),
-          trim);
-    } catch (IllegalArgumentException unfit) {
-      throw new BadInputException(where(instrument) + ": " + unfit.getMessage(), unfit);
-    }
+    return new Binding(
+        instrument.vessel() + (instrument.worth().check() ? PairGate.CHECK : ""),
+        instrument.quantity(),
+        profile,
+        field,
+        instrument.address().orElse(0),
+        trim);
   }
 
   private Profile profile(Instrument instrument) {
-    Profile found;
-    try {
-      found = Profiles.find(instrument.device(), folder);
-    } catch (BadInputException missing) {
-      throw new BadInputException(where(instrument) + ": " + missing.getMessage(), missing);
-    }
+    Profile found = Profiles.find(instrument.device(), folder);
     Optional<Integer> baud = instrument.baud();
     return baud.isEmpty() ? found : atSpeed(found, baud.get());
   }
@@ -108,13 +149,5 @@ public final class PortPlans {
         profile.framing(),
         profile.polling(),
         profile.fields());
-  }
-
-  private String where(Instrument instrument) {
-    return cellar.file()
-        + ", vessel."
-        + instrument.vessel()
-        + ".readings."
-        + instrument.quantity().word();
   }
 }

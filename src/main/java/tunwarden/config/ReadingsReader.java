@@ -18,7 +18,7 @@ final class ReadingsReader {
       "{ device = \"text-line\", port = \"/dev/ttyUSB0\", field = \"P\" }";
 
   /** Behind a quantity's word: a second instrument that only vouches for the first. */
-  private static final String CHECK = "-check";
+  static final String CHECK = "-check";
 
   private static final String TWO_POINTS = "0.02 bar = 0 bar, 2.05 bar = 2 bar";
 
@@ -65,7 +65,8 @@ final class ReadingsReader {
             new Instrument.Worth(
                 accuracy(section, quantity.kind()),
                 section.parsed("calibration", text -> calibration(text, quantity.kind())),
-                check));
+                check,
+                section.text("out-of-service")));
     section.close();
     return instrument;
   }

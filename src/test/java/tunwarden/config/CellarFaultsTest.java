@@ -75,6 +75,16 @@ class CellarFaultsTest {
             + " alarms.margin_low: there is no such key here; did you mean 'margin-low'?",
         "[vessel.FV2]\\n | [alarms]\\nstale = \"0 s\"\\n[vessel.FV2]\\n | line 2, alarms.stale:"
             + " '0 s' is no time at all",
+        "[vessel.FV2]\\n | [alarms.each.leek]\\n[vessel.FV2]\\n | line 1,"
+            + " alarms.each.leek: there is no such key here; did you mean 'leak'?",
+        "[vessel.FV2]\\n | [alarms.each.vacuum]\\non-delay = \"2 min\"\\n[vessel.FV2]\\n | line"
+            + " 2, alarms.each.vacuum.on-delay: '2 min' is too long; write at most 60 s",
+        "[vessel.FV2]\\n | [alarms.each.vacuum]\\nswitched-off = \"no\"\\n[vessel.FV2]\\n | line"
+            + " 2, alarms.each.vacuum.switched-off: write why in a few words; an alarm of high"
+            + " priority cannot be switched off for good, it can be shelved or taken out of service"
+            + " with the alarms command",
+        "[vessel.FV2]\\n | [notice]\\nfrom-priority = \"loud\"\\n[vessel.FV2]\\n | line 2,"
+            + " notice.from-priority: 'loud' is no priority; write advice, caution, warning or high",
         "[vessel.FV2]\\n | [display]\\nunits = \"imperial\"\\n[vessel.FV2]\\n | line 2,"
             + " display.units: 'imperial' is not a set of units; write one of metric, us, si",
         "[vessel.FV2]\\n | [notice]\\ncommand = \"ring\"\\n[vessel.FV2]\\n | line 2,"

@@ -8,15 +8,22 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.Duration;
+import java.time.Instant;
 import java.util.List;
+import java.util.Map;
 import java.util.Optional;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
+import tunwarden.alarm.AlarmKind;
 import tunwarden.alarm.AlarmSettings;
+import tunwarden.alarm.Priority;
 import tunwarden.journal.RecorderSettings;
+import tunwarden.notice.NoticeRules;
 import tunwarden.physics.gas.Gas;
 import tunwarden.physics.liquid.BeerMethod;
 import tunwarden.physics.liquid.LiquidKind;
+import tunwarden.reading.Fault;
+import tunwarden.reading.Quality;
 import tunwarden.reading.Quantity;
 import tunwarden.units.BadInputException;
 import tunwarden.units.Display;
@@ -143,6 +150,53 @@ class CellarFileTest {
     assertEquals(AlarmSettings.DEFAULT.longestShelf(), cellar.alarms().longestShelf());
     assertEquals(Display.US, cellar.alarms().display());
     assertEquals(AlarmSettings.DEFAULT, Cellars.parse(Cellars.LEAST).alarms());
+  }
+
+  @Test
+  void eachAlarmCanBeSetByItself() {
+    Cellar cellar =
+        Cellars.parse(
+            Cellars.LEAST
+                + """
+                [alarms]
+                liquid-full-within = "3 K"
+                deadband = "0.05 bar"
+                longest-shelf = "8 h"
+                [alarms.each.margin-low]
+                on-delay = "30 s"
+                [alarms.each.leak]
+                switched-off = "the sampling tap drips"
+                [notice]
+                command = ["ring-bell"]
+                from-priority = "warning"
+                together = "20 s"
+                per-hour = 4
+                """);
+    AlarmSettings alarms = cellar.alarms();
+    assertEquals(3, alarms.liquidFullWithinK(), 1e-9);
+    assertEquals(0.05e5, alarms.deadbands().pressurePa(), 1e-6);
+    assertEquals(Duration.ofHours(8), alarms.longestShelf());
+    assertEquals(AlarmSettings.Delays.seconds(30, 60), alarms.delays(AlarmKind.MARGIN_LOW));
+    assertEquals(AlarmSettings.DEFAULT.delays(AlarmKind.VACUUM), alarms.delays(AlarmKind.VACUUM));
+    assertEquals(Map.of(AlarmKind.LEAK, "the sampling tap drips"), alarms.manner().switchedOff());
+    assertEquals(
+        new NoticeRules(Priority.WARNING, Duration.ofSeconds(20), 4), cellar.notice().rules());
+    assertEquals(NoticeRules.USUAL, Cellars.parse(Cellars.LEAST).notice().rules());
+  }
+
+  @Test
+  void anInstrumentOutOfServiceIsCheckedButNotRead() {
+    Cellar cellar =
+        Cellars.parse(
+            Cellars.LEAST.replace(
+                "field = \"T\"", "field = \"T\", out-of-service = \"being calibrated\""));
+    assertEquals(1, PortPlans.of(cellar).get(0).bindings().size());
+    assertEquals(
+        List.of(Quality.OUT_OF_SERVICE),
+        cellar.instruments().stream()
+            .flatMap(instrument -> instrument.outOfService(Instant.EPOCH).stream())
+            .map(Fault::quality)
+            .toList());
   }
 
   @Test

@@ -136,6 +136,9 @@ public final class LiveDashboard {
 
   private void begin(StationLoop loop) {
     loop.start();
+    cellar.instruments().stream()
+        .flatMap(instrument -> instrument.outOfService(clock.instant()).stream())
+        .forEach(loop.inlet());
     ports.forEach(PortRunner::start);
   }
 

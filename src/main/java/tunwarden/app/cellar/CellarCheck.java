@@ -39,12 +39,12 @@ final class CellarCheck implements Callable<Integer> {
     Cellar cellar;
     try {
       cellar = CellarFile.read(file);
+      PortPlans.of(cellar);
     } catch (BadCellarException wrong) {
       PrintWriter err = spec.commandLine().getErr();
       wrong.problems().forEach(err::println);
       return WRONG_INPUT;
     }
-    PortPlans.of(cellar);
     describe(cellar, spec.commandLine().getOut());
     return 0;
   }

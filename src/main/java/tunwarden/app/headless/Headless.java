@@ -37,6 +37,7 @@ import tunwarden.serve.Served;
 import tunwarden.serve.Server;
 import tunwarden.station.AlarmKeeper;
 import tunwarden.station.Sink;
+import tunwarden.station.StationLoop;
 import tunwarden.units.BadInputException;
 
 /**
@@ -124,6 +125,7 @@ public final class Headless implements AutoCloseable {
     keeping.resume(cellar, watching.station(), alarms);
     recorder.start();
     say("start", "Watching " + cellar.vessels().size() + " vessel(s) of " + cellar.file() + ".");
+    sayWhatIsOff(cellar);
     if (plan.serve().isPresent()) {
       server = Optional.of(new Server(plan.serve().get(), plan.token(), served(events)));
       server.ifPresent(s -> console.accept("Serving on http:/" + s.address() + "/"));
@@ -164,6 +166,16 @@ public final class Headless implements AutoCloseable {
   private Served.RecorderFigures figures() {
     return new Served.RecorderFigures(
         recorder.accepted(), recorder.dropped(), recorder.waiting(), recorder.isFailing());
+  }
+
+  private void sayWhatIsOff(Cellar cellar) {
+    cellar
+        .alarms()
+        .manner()
+        .switchedOff()
+        .forEach(
+            (kind, why) ->
+                say("start", "The alarm " + kind.id() + " is switched off: " + why + "."));
   }
 
   private void report(AlarmKind kind, boolean active, String text) {
@@ -264,6 +276,7 @@ public final class Headless implements AutoCloseable {
       Channels.of(cellar, System.getenv());
       change(next);
       report(AlarmKind.CONFIGURATION, false, "");
+      sayWhatIsOff(cellar);
       say("reload", "The cellar file was read again: " + cellar.vessels().size() + " vessel(s).");
     } catch (BadInputException | IOException bad) {
       String text = "The cellar file was not taken: " + bad.getMessage();
@@ -295,6 +308,11 @@ public final class Headless implements AutoCloseable {
     Set<String> ids = new HashSet<>();
     cellar.vessels().forEach(vessel -> ids.add(vessel.id()));
     return ids;
+  }
+
+  /** The present loop. */
+  StationLoop loop() {
+    return watching.loop();
   }
 
   /** What is served and where, if it is. */

@@ -23,6 +23,7 @@ final class Watching implements AutoCloseable {
   private final Cellar cellar;
   private final Station station;
   private final StationLoop loop;
+  private final InstantSource clock;
   private final List<PortRunner> ports = new ArrayList<>();
   private volatile boolean closing;
 
@@ -33,6 +34,7 @@ final class Watching implements AutoCloseable {
    */
   Watching(Cellar cellar, ByteLinkFactory links, InstantSource clock, List<Sink> sinks) {
     this.cellar = cellar;
+    this.clock = clock;
     StationSettings pacing = StationSettings.USUAL.withStale(cellar.alarms().stale());
     this.station =
         new Station(cellar.vessels(), Estimators.standard(), Assembly.FORECASTS, pacing, sinks);
@@ -66,6 +68,9 @@ final class Watching implements AutoCloseable {
 
   void start() {
     loop.start();
+    cellar.instruments().stream()
+        .flatMap(instrument -> instrument.outOfService(clock.instant()).stream())
+        .forEach(loop.inlet());
     ports.forEach(PortRunner::start);
   }
 

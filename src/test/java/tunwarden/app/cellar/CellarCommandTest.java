@@ -141,10 +141,26 @@ class CellarCommandTest {
     assertTrue(
         Ran.tunwarden("cellar", "check", file.toString()).refused().contains("has no field 'Q'"));
     Files.writeString(file, example.replace("\"text-line\"", "\"text-lime\""));
-    assertTrue(
-        Ran.tunwarden("cellar", "check", file.toString())
-            .refused()
-            .contains("there is no device profile 'text-lime'"));
+    Ran both = Ran.tunwarden("cellar", "check", file.toString());
+    assertEquals(2, both.code());
+    List<String> told = both.err().lines().toList();
+    assertEquals(2, told.size(), both.err());
+    List<String> lines = Files.readAllLines(file);
+    for (String quantity : List.of("pressure", "temperature")) {
+      int line = 1;
+      while (!lines.get(line - 1).startsWith(quantity + " =")) {
+        line++;
+      }
+      String begin = " line " + line + ", vessel.";
+      assertTrue(
+          told.stream()
+              .anyMatch(
+                  s ->
+                      s.contains(begin)
+                          && s.contains(".readings." + quantity + ": ")
+                          && s.contains("there is no device profile 'text-lime'")),
+          begin + " in " + both.err());
+    }
   }
 
   @Test

@@ -21,6 +21,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.concurrent.Callable;
 import java.util.concurrent.CopyOnWriteArrayList;
+import java.util.concurrent.CountDownLatch;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
@@ -162,6 +163,43 @@ class HeadlessTest {
     alarms(0, "unshelve", "leak", "--vessel", "FV2");
     alarms(0, "in-service", "vacuum", "--vessel", "FV2");
     assertFalse(alarms(0, "list").contains("shelved"));
+  }
+
+  @Test
+  void aStalledLoopFailsTheHealthPageWhileThePagesStillAnswer() throws Exception {
+    await("metrics", () -> says("/metrics", "gauge{vessel=\"FV2\"}"));
+    assertEquals(200, get("/health").statusCode());
+    CountDownLatch release = new CountDownLatch(1);
+    headless
+        .loop()
+        .submit(
+            () -> {
+              try {
+                release.await();
+              } catch (InterruptedException e) {
+                Thread.currentThread().interrupt();
+              }
+            });
+    await("the stall", () -> get("/health").statusCode() == 503);
+    assertTrue(says("/health", "The watching loop has not come round for "));
+    assertTrue(says("/", "has not come round"), "the status page says so too");
+    assertEquals(200, get("/metrics").statusCode());
+    release.countDown();
+    await("health", () -> get("/health").statusCode() == 200);
+  }
+
+  @Test
+  void anInstrumentOutOfServiceSuppressesWhatRestsOnIt() throws Exception {
+    links.set(1.45);
+    await("the alarm", () -> says("/events", "above earliest lift raised"));
+    String out = "field = \"P\", out-of-service = \"being calibrated\" }";
+    Files.writeString(cellar, Files.readString(cellar).replace("field = \"P\" }", out));
+    headless.reload();
+    await("suppression", () -> says("/events", "above earliest lift suppressed"));
+    assertFalse(says("/state", "instrument-stale"), "nobody expects it to speak");
+    Files.writeString(cellar, Files.readString(cellar).replace(out, "field = \"P\" }"));
+    headless.reload();
+    await("the alarm again", () -> says("/events", "above earliest lift no longer suppressed"));
   }
 
   @Test
