@@ -92,6 +92,29 @@ final class LogChoice {
     return sources;
   }
 
+  /** The vessels whose logs lie in a folder; what is wrong with one shows when it is read. */
+  List<Fleet.Member> members(Path folder, VesselOptions described) throws IOException {
+    List<Fleet.Member> members = new ArrayList<>();
+    for (FleetFolder.Bundle bundle : FleetFolder.bundles(folder)) {
+      Set<String> named;
+      try {
+        named = named(LogFile.open(bundle.logs().get(0), options()));
+      } catch (BadInputException bad) {
+        named = Set.of(LogOptions.UNNAMED);
+      }
+      for (String written : named) {
+        String id = written.equals(LogOptions.UNNAMED) ? bundle.name() : written;
+        if (ids.isEmpty() || ids.contains(id)) {
+          members.add(
+              new Fleet.Member(
+                  named.size() > 1 && !bundle.name().equals(id) ? bundle.name() + "-" + id : id,
+                  () -> source(id, id, bundle.logs(), described)));
+        }
+      }
+    }
+    return members;
+  }
+
   private Reporter.Source source(String title, String id, List<Path> logs, VesselOptions described)
       throws IOException {
     Vessel vessel = vessel(id, described);

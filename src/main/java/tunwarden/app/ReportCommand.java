@@ -43,7 +43,8 @@ import tunwarden.units.Quantities;
       "  tunwarden report logger.csv --cellar cellar.toml --vessel FV2 --zone Europe/Vienna \\",
       "      --columns time=Zeit,pressure=Druck/mbar,temperature=T/C --json -",
       "  tunwarden report day.csv ... --what-if relief=1.2bar,vent=08:30@0.3bar --html try.html",
-      "  tunwarden report one.csv two.csv --compare ... --html both.html"
+      "  tunwarden report one.csv two.csv --compare ... --html both.html",
+      "  tunwarden report tunwarden-data/readings --cellar cellar.toml --html pages"
     })
 final class ReportCommand implements Callable<Integer> {
   @Spec private CommandSpec spec;
@@ -51,22 +52,28 @@ final class ReportCommand implements Callable<Integer> {
   @Parameters(
       arity = "1..*",
       paramLabel = "LOG",
-      description = "Logs of one vessel, in any order; .gz is read too.")
+      description = {
+        "Logs of one vessel, in any order; .gz is read too. Or one folder: every log in it, and",
+        "the logs of every folder in it, are a vessel; then a table is printed."
+      })
   private List<Path> logs;
 
   @Option(
       names = "--json",
       paramLabel = "FILE",
-      description = "Report as JSON; - is standard output.")
+      description = "Report as JSON; - is standard output. For a folder: a folder.")
   private String json;
 
   @Option(
       names = "--series",
       paramLabel = "FILE",
-      description = "Estimate row by row as CSV; - is standard output.")
+      description = "Estimate row by row as CSV; - is standard output. For a folder: a folder.")
   private String series;
 
-  @Option(names = "--html", paramLabel = "FILE", description = "Report to print or send.")
+  @Option(
+      names = "--html",
+      paramLabel = "FILE",
+      description = "Report to print or send. For a folder: a folder.")
   private String html;
 
   @Option(names = "--every", paramLabel = "TIME", description = "Thin the series, as 60s or 5min.")
@@ -93,17 +100,13 @@ final class ReportCommand implements Callable<Integer> {
 
   @Override
   public Integer call() throws IOException {
+    if (logs.size() == 1 && Files.isDirectory(logs.get(0))) {
+      return fleet(logs.get(0));
+    }
     List<Reporter.Source> sources = choice.sources(logs, described, compare);
     double ambientPa = sources.get(0).vessel().site().ambientPaAbsolute();
     Reporter.Settings settings =
-        new Reporter.Settings(
-            causal,
-            everyOrZero(),
-            Optional.ofNullable(whatIf).map(text -> WhatIf.parse(text, ambientPa)),
-            choice.zone(),
-            command(),
-            new Main.Version().getVersion()[0],
-            html != null);
+        settings(Optional.ofNullable(whatIf).map(text -> WhatIf.parse(text, ambientPa)));
     if (series != null && sources.size() > 1) {
       throw new BadInputException("--series: it holds one vessel; leave out --compare");
     }
@@ -119,6 +122,35 @@ final class ReportCommand implements Callable<Integer> {
     chapters.forEach(chapter -> chapter.notes().forEach(note -> err.println("note: " + note)));
     write(chapters);
     return 0;
+  }
+
+  private Reporter.Settings settings(Optional<WhatIf> tried) {
+    String program = new Main.Version().getVersion()[0];
+    return new Reporter.Settings(
+        causal, everyOrZero(), tried, choice.zone(), command(), program, html != null);
+  }
+
+  private int fleet(Path folder) throws IOException {
+    if (compare || whatIf != null) {
+      throw new BadInputException(
+          (compare ? "--compare" : "--what-if") + ": name logs, not a folder of them");
+    }
+    Fleet.Outputs outputs =
+        new Fleet.Outputs(
+            folderOf("--json", json), folderOf("--html", html), folderOf("--series", series));
+    PrintWriter err = spec.commandLine().getErr();
+    Reporter reporter = new Reporter(Estimators.wordless(), settings(Optional.empty()));
+    List<FleetLine> lines =
+        new Fleet(reporter, outputs, err).read(choice.members(folder, described));
+    spec.commandLine().getOut().print(FleetLine.table(lines));
+    return lines.stream().allMatch(line -> line.analysis().isPresent()) ? 0 : 1;
+  }
+
+  private static Optional<Path> folderOf(String option, String text) {
+    if (text != null && (text.equals("-") || Files.isRegularFile(Path.of(text)))) {
+      throw new BadInputException(option + ": for a folder of logs name a folder for the results");
+    }
+    return Optional.ofNullable(text).map(Path::of);
   }
 
   private Chapter read(Reporter reporter, Reporter.Source source, Progress progress)
