@@ -30,6 +30,17 @@ final class Scripts {
   private static final double WARM_C = 24;
   private static final double VENT_M2 = 2e-5;
 
+  /** A bright tank on eight bar behind a regulator of 2 mm, wanted at 5.2 g/L. */
+  private static final Prospects ON_SUPPLY =
+      new Prospects(
+          Optional.empty(),
+          Optional.of(new Prospects.Target(5.2, OptionalDouble.empty())),
+          Optional.of(
+              new Prospects.Supply(
+                  8 * BAR, Optional.of(new ReliefOrifice(0.002, 0.6)), OptionalDouble.empty())),
+          OptionalDouble.empty(),
+          OptionalDouble.empty());
+
   private Scripts() {}
 
   /**
@@ -94,7 +105,7 @@ final class Scripts {
           site,
           OptionalDouble.of(WARM_C + Constants.ZERO_CELSIUS_K),
           Accuracy.usual(volumeM3),
-          Prospects.NONE);
+          id.equals("BT1") ? ON_SUPPLY : Prospects.NONE);
     }
   }
 

@@ -61,7 +61,7 @@ final class Ferments {
         Display.METRIC.gasContent(come.middle())
             + " of gas to come ("
             + Words.ends(come, 1, 2)
-            + "), "
+            + " g/L), "
             + gravity(now)
             + age(track, present.at())
             + ", "

@@ -102,7 +102,7 @@ final class ReliefShares {
 
   private static String percent(double share) {
     double percent = PERCENT * share;
-    return Display.number(percent, percent < 1 ? 1 : 0);
+    return percent < 0.1 ? "less than 0.1" : Display.number(percent, percent < 1 ? 1 : 0);
   }
 
   private static List<Caution> cautions(List<Demand> demands) {

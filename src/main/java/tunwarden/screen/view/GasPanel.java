@@ -160,7 +160,7 @@ final class GasPanel {
               .whatIf(WhatIf.Kind.WARM)
               .flatMap(WhatIf::toLift)
               .filter(time -> width >= ROOMY)
-              .map(time -> ", " + Words.range(time) + " after cooling is lost")
+              .map(time -> ", " + Words.briefRange(time) + " after cooling is lost")
               .orElse("");
       named(relief ? "" : "lifts", "if warmed to " + at + soon, Role.NORMAL);
     }
@@ -196,7 +196,7 @@ final class GasPanel {
                                 + ")"
                             : ""))
             .orElse("");
-    String lift = each.toLift().map(time -> ", lifts in " + Words.range(time)).orElse("");
+    String lift = each.toLift().map(time -> ", lifts in " + Words.briefRange(time)).orElse("");
     String detail = pressure.isEmpty() ? " " + InUnits.of(each.detail(), units) : "";
     return InUnits.of(each.words(), units) + pressure + lift + detail;
   }

@@ -63,12 +63,7 @@ final class VentView {
     VentQuestion question =
         new VentQuestion(
             target, Optional.of(vent.path()), described.site().room(), VentQuestion.USUAL_BOUND);
-    line("vent to", units.gauge(target) + "   from " + units.gauge(now), Role.STRONG);
-    String kd = Display.number(vent.dischargeCoefficient(), 1);
-    line(
-        "through",
-        Display.number(MILLI * vent.orificeM(), 0) + " mm, discharge coefficient " + kd,
-        Role.NORMAL);
+    drawQuestion(vent, target, now);
     VentBench.Outcome outcome = VentBench.of(described, estimate.get(), question);
     if (outcome.answer().isEmpty()) {
       y++;
@@ -76,6 +71,23 @@ final class VentView {
       return;
     }
     drawAnswer(outcome.answer().get(), now, target);
+  }
+
+  private void drawQuestion(VentState vent, double target, double now) {
+    String to = units.gauge(target) + "   from " + units.gauge(now);
+    String kd = Display.number(vent.dischargeCoefficient(), 1);
+    String path = Display.number(MILLI * vent.orificeM(), 0) + " mm, discharge coefficient " + kd;
+    if (isRoomy()) {
+      line("vent to", to, Role.STRONG);
+      line("through", path, Role.NORMAL);
+    } else {
+      line(
+          "vent to", to + "   through " + path.replace("discharge coefficient", "Kd"), Role.STRONG);
+    }
+  }
+
+  private boolean isRoomy() {
+    return area.rows() >= ROOMY;
   }
 
   private void drawAnswer(VentAnswer answer, double now, double target) {
@@ -87,9 +99,7 @@ final class VentView {
     answer
         .blowdownS()
         .ifPresent(s -> line("in", range(s, 1, 0) + " s, the vent full open", Role.NORMAL));
-    line(
-        "then, if held", range(answer.followsKg(), 1, 2) + " kg more from the liquid", Role.STRONG);
-    line("", "most of it within " + Words.range(answer.followTime()), Role.NORMAL);
+    drawFollowing(answer);
     line("or shut again", "back to " + pressureRange(answer.reboundPaGauge()), Role.STRONG);
     drawFoam(answer.supersaturation());
     answer.room().ifPresent(this::drawRoom);
@@ -116,6 +126,17 @@ final class VentView {
     canvas.put(x, y++, area.right() - x, words, Role.DIM);
   }
 
+  private void drawFollowing(VentAnswer answer) {
+    String more = range(answer.followsKg(), 1, 2) + " kg more";
+    if (isRoomy()) {
+      line("then, if held", more + " from the liquid", Role.STRONG);
+      line("", "most of it within " + Words.range(answer.followTime()), Role.NORMAL);
+    } else {
+      String time = Words.briefRange(answer.followTime());
+      line("then, if held", more + ", most of it in " + time, Role.STRONG);
+    }
+  }
+
   private void drawFoam(Spread supersaturation) {
     boolean foams = supersaturation.high() > VentQuestion.USUAL_BOUND;
     String bound = Display.number(100 * VentQuestion.USUAL_BOUND, 0);
@@ -127,9 +148,15 @@ final class VentView {
   private void drawRoom(RoomAfter room) {
     String once = ppm(room.onceCo2());
     String held = ppm(room.heldCo2());
-    line("room CO2", once + " at once, " + held + " if held open, no fan", Role.STRONG);
-    room.ventilatedCo2()
-        .ifPresent(with -> line("", ppm(with) + " at most with the air changes", Role.NORMAL));
+    if (isRoomy() || room.ventilatedCo2().isEmpty()) {
+      line("room CO2", once + " at once, " + held + " if held open, no fan", Role.STRONG);
+      room.ventilatedCo2()
+          .ifPresent(with -> line("", ppm(with) + " at most with the air changes", Role.NORMAL));
+    } else {
+      String with = ppm(room.ventilatedCo2().get());
+      line(
+          "room CO2", once + " at once, " + held + " held, " + with + " with the fan", Role.STRONG);
+    }
   }
 
   private static String ppm(Spread share) {
@@ -181,7 +208,7 @@ final class VentView {
 
   /** A blank line where there is room for one. */
   private void gap() {
-    y += area.rows() >= ROOMY ? 1 : 0;
+    y += isRoomy() ? 1 : 0;
   }
 
   private void text(String text, Role role) {

@@ -112,7 +112,7 @@ final class WhatIfView {
       return "";
     }
     if (row.toLift().isPresent()) {
-      return "in " + Words.range(row.toLift().get());
+      return "in " + Words.briefRange(row.toLift().get());
     }
     double lift = relief.get().earliestLiftPaGauge();
     if (row.paGauge().get().high() < lift) {

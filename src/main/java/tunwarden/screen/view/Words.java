@@ -8,6 +8,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import tunwarden.forecast.TimeRange;
+import tunwarden.units.Display;
 
 /** Times and lengths of time as words, and lines broken between words. */
 final class Words {
@@ -75,6 +76,28 @@ final class Words {
   static String range(TimeRange range) {
     String high = range.high().map(h -> "to " + length(h)).orElse("or never");
     return length(range.middle()) + " (" + length(range.low()) + " " + high + ")";
+  }
+
+  /** The same in one unit, for narrow columns: {@code 5.3 h (4.7 to 6.5)}. */
+  static String briefRange(TimeRange range) {
+    long s = Math.max(0, range.middle().toSeconds());
+    boolean days = s >= 2 * DAY_S;
+    long unit = s < 2 * MINUTE_S ? 1 : s < 2 * HOUR_S ? MINUTE_S : days ? DAY_S : HOUR_S;
+    String symbol = unit == 1 ? "s" : unit == MINUTE_S ? "min" : days ? "d" : "h";
+    int decimals = unit >= HOUR_S && s < 10 * unit ? 1 : 0;
+    String high = range.high().map(h -> "to " + in(h, unit, decimals)).orElse("or never");
+    return in(range.middle(), unit, decimals)
+        + " "
+        + symbol
+        + " ("
+        + in(range.low(), unit, decimals)
+        + " "
+        + high
+        + ")";
+  }
+
+  private static String in(Duration duration, long unitS, int decimals) {
+    return Display.number(Math.max(0, duration.toSeconds()) / (double) unitS, decimals);
   }
 
   /** Lines of at most so many columns, broken at blanks. */
