@@ -80,6 +80,9 @@ final class RoughDay {
             startK);
     vessel.fill(between(0.5, 0.75) * reliefPa, 0, 1);
     ending = plan();
+    if (noisePa < 0.4 * stepPa) {
+      plans.removeIf(plan -> plan.kind().equals("frozen")); // such a gauge stands still by itself
+    }
     stated = random.nextInt(4) > 0 || ending.kind().equals("over-relief");
     double opens = reliefPa - between(0, 0.09) * BAR;
     if (!ending.kind().equals("over-relief")) {
@@ -136,6 +139,7 @@ final class RoughDay {
     } else if (ending.kind().equals("leak")) {
       truth.add(new Day.Truth("leak", ending.at(), END, 0));
     }
+    truth.removeIf(each -> each.from() > END - 120);
     truth.sort(Comparator.comparingDouble(Day.Truth::from));
     String about =
         String.format(

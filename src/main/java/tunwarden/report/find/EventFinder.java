@@ -12,11 +12,23 @@ import tunwarden.vessel.Vessel;
 
 /** Fed every row of one vessel, it names the events once the log has ended. Memory is bounded. */
 public final class EventFinder {
+  private static final double LEAST_PA = 350;
+
+  /** A slow movement this much larger than the quick ones in it is no mere sum of them. */
+  private static final double MORE = 1.4;
+
+  private static final long LASTING_MS = 200_000;
+
   private static final double SLOWEST_CHARGE_PA_PER_S = 40;
+
+  /** Scatter below this share of the last digit cannot be trusted to move it. */
+  private static final double LIVELY = 0.35;
 
   private final Vessel vessel;
   private final GapTracker gaps = new GapTracker();
-  private final MovementTracker movements = new MovementTracker();
+  private final MovementTracker movements = MovementTracker.ofRows();
+  private final SlowTracker tenSeconds = new SlowTracker(10_000, false, this::leastPa);
+  private final SlowTracker minutes = new SlowTracker(60_000, true, this::leastPa);
   private final StillTracker still = new StillTracker();
   private final WarmingTracker warming = new WarmingTracker();
   private final Optional<OverTracker> over;
@@ -31,8 +43,12 @@ public final class EventFinder {
   public void add(Point point) {
     if (gaps.add(point)) {
       movements.silence();
+      tenSeconds.silence();
+      minutes.silence();
     }
     movements.add(point);
+    tenSeconds.add(point);
+    minutes.add(point);
     still.add(point);
     warming.add(point);
     over.ifPresent(tracker -> tracker.add(point));
@@ -41,13 +57,15 @@ public final class EventFinder {
   /** The events, in order of time; call once, after the last row. */
   public List<Event> finish() {
     movements.silence();
+    tenSeconds.silence();
+    minutes.silence();
     still.finish();
     warming.finish();
     over.ifPresent(OverTracker::finish);
     List<Event> events = new ArrayList<>();
     Naming naming = new Naming(vessel, usualU95Pa());
     List<StillTracker.Stretch> frozen = frozen();
-    Echoes.without(movements.movements()).stream()
+    Echoes.without(allMovements()).stream()
         .filter(m -> frozen.stream().noneMatch(s -> s.explains(m)))
         .filter(m -> !isGivenOff(m))
         .forEach(m -> events.add(naming.movement(m)));
@@ -58,6 +76,29 @@ public final class EventFinder {
     addOver(events, naming);
     events.sort(Comparator.comparing(Event::time).thenComparing(Event::kind));
     return events;
+  }
+
+  private double leastPa() {
+    return Math.max(LEAST_PA, 2 * movements.noise().step());
+  }
+
+  /** The quick ones, and of the slower ones those that are not made up of quick ones. */
+  private List<Movement> allMovements() {
+    List<Movement> all = new ArrayList<>(movements.movements());
+    for (SlowTracker slower : List.of(tenSeconds, minutes)) {
+      for (Movement slow : slower.movements()) {
+        List<Movement> parts = all.stream().filter(slow::meets).toList();
+        double known = parts.stream().mapToDouble(Movement::changePa).sum();
+        boolean lasting = slow.untilMs() - slow.fromMs() > LASTING_MS;
+        double enough = lasting && parts.size() == 1 ? 1 / MORE : MORE;
+        if (Math.abs(slow.changePa()) > enough * Math.abs(known)) {
+          all.removeAll(parts);
+          all.add(slow);
+        }
+      }
+    }
+    all.sort(Comparator.comparingLong(Movement::fromMs));
+    return all;
   }
 
   /** A rise this slow is what a liquid gives off once it is shut in, not gas let in. */
@@ -94,7 +135,8 @@ public final class EventFinder {
   private List<StillTracker.Stretch> frozen() {
     List<StillTracker.Stretch> longest = still.longest();
     List<StillTracker.Stretch> frozen = new ArrayList<>();
-    boolean many = longest.size() > 8;
+    boolean lively = movements.noise().sigma() >= LIVELY * movements.noise().step();
+    boolean many = lively && longest.size() > 8;
     double usual = many ? longest.get(longest.size() / 2).seconds() : 0;
     double long3 = many ? longest.get(2).seconds() : 0;
     for (StillTracker.Stretch stretch : longest) {

@@ -12,7 +12,19 @@ package tunwarden.report.find;
  */
 record Movement(
     long fromMs, long untilMs, double fromPa, double toPa, double kelvin, double sharpness) {
+  private static final long NEAR_MS = 60_000;
+
   double changePa() {
     return toPa - fromPa;
+  }
+
+  /** The same with another begin, milliseconds since 1970, and the pressure there. */
+  Movement beginning(long ms, double pa) {
+    return new Movement(ms, untilMs, pa, toPa, kelvin, sharpness);
+  }
+
+  /** Whether both were under way at some time, or nearly. */
+  boolean meets(Movement other) {
+    return fromMs <= other.untilMs + NEAR_MS && other.fromMs <= untilMs + NEAR_MS;
   }
 }

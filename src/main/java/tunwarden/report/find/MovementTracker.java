@@ -2,6 +2,7 @@ package tunwarden.report.find;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.function.DoubleSupplier;
 
 /**
  * Finds movements and spikes in a pressure signal. A shut vessel follows its temperature and its
@@ -15,6 +16,11 @@ final class MovementTracker {
   private static final double FLOOR_PA = 350;
   private static final int SPIKE_ROWS = 3;
 
+  private static final double SLOWEST_PA_PER_S = 8;
+
+  private final double slowestPaPerS;
+  private final DoubleSupplier leastPa;
+  private final boolean means;
   private final NoiseGauge noise = new NoiseGauge();
   private final Course course = new Course(COURSE_ROWS);
   private final List<Point> away = new ArrayList<>();
@@ -26,9 +32,31 @@ final class MovementTracker {
   private double extremePa;
   private Point extreme;
 
+  private MovementTracker(double slowestPaPerS, DoubleSupplier leastPa, boolean means) {
+    this.slowestPaPerS = slowestPaPerS;
+    this.leastPa = leastPa;
+    this.means = means;
+  }
+
+  /** A tracker fed every row. */
+  static MovementTracker ofRows() {
+    return new MovementTracker(SLOWEST_PA_PER_S, () -> FLOOR_PA, false);
+  }
+
+  /**
+   * A tracker fed means, which have no last digit.
+   *
+   * @param slowestPaPerS a movement that gets slower than this has ended
+   * @param leastPa smallest change that counts
+   */
+  static MovementTracker ofMeans(double slowestPaPerS, DoubleSupplier leastPa) {
+    return new MovementTracker(slowestPaPerS, leastPa, true);
+  }
+
   /** Smallest change that counts, Pa. */
   double threshold() {
-    return Math.max(FLOOR_PA, Math.max(6 * noise.sigma(), 2.5 * noise.step()));
+    double byNoise = Math.max(6 * noise.sigma(), means ? 0 : 2.5 * noise.step());
+    return Math.max(leastPa.getAsDouble(), byNoise);
   }
 
   void add(Point point) {
@@ -116,7 +144,8 @@ final class MovementTracker {
     boolean down = extremePa < level();
     double further = down ? extremePa - point.paGauge() : point.paGauge() - extremePa;
     double seconds = Math.max(1, (point.ms() - extreme.ms()) / 1000.0);
-    boolean quick = further > Math.max(noise.step(), threshold() / 8) && further / seconds > 8;
+    double least = Math.max(means ? 0 : noise.step(), means ? 0 : threshold() / 8);
+    boolean quick = further > least && further / seconds > slowestPaPerS;
     if (quick) {
       extreme = point;
       extremePa = point.paGauge();
