@@ -17,6 +17,25 @@ class IncidentDaysTest {
   }
 
   @Test
+  void eventsAreFoundOnAFewRoughDays() {
+    DayScore score = new DayScore();
+    for (long seed = 101; seed <= 106; seed++) {
+      score.add(new RoughDay(seed).run());
+    }
+    judge(score);
+  }
+
+  @Test
+  @Tag("long")
+  void eventsAreFoundOnManyRoughDays() {
+    DayScore score = new DayScore();
+    for (long seed = 3000; seed < 3040; seed++) {
+      score.add(new RoughDay(seed).run());
+    }
+    judge(score);
+  }
+
+  @Test
   @Tag("long")
   void eventsAreFoundOnManyDays() {
     DayScore score = new DayScore();

@@ -14,30 +14,34 @@ final class Line {
   }
 
   void add(Point point) {
-    double t = point.ms() - originMs;
+    add(point.ms(), point.paGauge());
+  }
+
+  void add(long ms, double value) {
+    double t = ms - originMs;
     n++;
     sumT += t;
-    sumP += point.paGauge();
+    sumP += value;
     sumTt += t * t;
-    sumTp += t * point.paGauge();
+    sumTp += t * value;
   }
 
   int count() {
     return n;
   }
 
-  /** Pa for every millisecond. */
+  /** Change for every millisecond. */
   double slope() {
     double spread = sumTt - sumT * sumT / n;
     return spread > 0 ? (sumTp - sumT * sumP / n) / spread : 0;
   }
 
-  /** Pa at the origin. */
+  /** Value at the origin. */
   double atOrigin() {
     return sumP / n - slope() * sumT / n;
   }
 
-  /** Pa so many milliseconds after the origin. */
+  /** Value so many milliseconds after the origin. */
   double at(double ms) {
     return atOrigin() + slope() * ms;
   }

@@ -19,10 +19,10 @@ final class SlowTracker {
   private static final double LONGEST_S = 2700;
 
   /** After the end it goes on falling at no more than this share of the pace before. */
-  private static final double GOES_ON = 0.3;
+  private static final double GOES_ON = 0.2;
 
   /** The last part of a fall is no slower than this share of the whole. */
-  private static final double LAST_PACE = 0.4;
+  private static final double LAST_PACE = 0.55;
 
   /** The part of a fall that tells when it began. */
   private static final double EARLY = 0.08;

@@ -30,6 +30,7 @@ final class WarmingTracker {
   private long minute = Long.MIN_VALUE;
   private double sum;
   private int count;
+  private double sumMs;
   private double baseK = Double.NaN;
   private double topK;
   private double topMs;
@@ -47,13 +48,15 @@ final class WarmingTracker {
     minute = now;
     lastMs = point.ms();
     sum += point.kelvin();
+    sumMs += point.ms() - minute * MINUTE_MS;
     count++;
   }
 
   private void closeMinute() {
     double mean = sum / count;
-    double ms = (minute + 0.5) * MINUTE_MS;
+    double ms = minute * MINUTE_MS + sumMs / count;
     sum = 0;
+    sumMs = 0;
     count = 0;
     minutes.add(new double[] {ms, mean});
     if (minutes.size() > 6 * BASE_MINUTES) {
@@ -122,21 +125,21 @@ final class WarmingTracker {
   /** Where the line through the first part of the rise meets the level before it. */
   private double meeting(int onset) {
     int last = minutes.size() - 1;
-    double early = Double.NaN;
-    double earlyMs = 0;
     double top = minutes.get(last)[1];
+    Line rise = new Line((long) minutes.get(onset)[0]);
+    boolean begun = false;
     for (int i = onset; i <= last; i++) {
       double share = (minutes.get(i)[1] - baseK) / (top - baseK);
-      if (share > 0.2 && Double.isNaN(early)) {
-        early = minutes.get(i)[1];
-        earlyMs = minutes.get(i)[0];
+      begun |= share > 0.2;
+      if (begun) {
+        rise.add((long) minutes.get(i)[0], minutes.get(i)[1]);
       }
-      if (share > 0.6) {
-        double slope = (minutes.get(i)[1] - early) / (minutes.get(i)[0] - earlyMs);
-        return slope > 0 ? earlyMs - (early - baseK) / slope : minutes.get(onset)[0];
+      if (share > 0.8) {
+        break;
       }
     }
-    return minutes.get(onset)[0];
+    boolean rises = rise.count() > 1 && rise.slope() > 0;
+    return minutes.get(onset)[0] + (rises ? (baseK - rise.atOrigin()) / rise.slope() : 0);
   }
 
   private void follow(double ms, double mean) {
