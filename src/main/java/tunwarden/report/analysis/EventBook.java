@@ -1,5 +1,6 @@
 package tunwarden.report.analysis;
 
+import java.time.Duration;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.LinkedHashMap;
@@ -18,6 +19,7 @@ final class EventBook {
   private static final Set<EventKind> BY_MODEL =
       Set.of(EventKind.LEAK, EventKind.DRIFT, EventKind.UNEXPLAINED);
 
+  private static final Duration SAME_LEAK = Duration.ofHours(4);
   private static final double WORTH_TELLING = 0.5;
 
   private final Map<String, Event> running = new LinkedHashMap<>();
@@ -36,8 +38,38 @@ final class EventBook {
     List<Event> merged = new ArrayList<>(found);
     running.values().stream()
         .filter(event -> event.confidence() >= WORTH_TELLING)
-        .forEach(merged::add);
+        .sorted(Comparator.comparing(Event::time))
+        .forEach(event -> join(merged, event));
     merged.sort(Comparator.comparing(Event::time).thenComparing(Event::kind));
     return merged;
+  }
+
+  /** A leak that the model lost sight of for a while is still the same leak. */
+  private static void join(List<Event> merged, Event event) {
+    Event last = merged.isEmpty() ? null : merged.get(merged.size() - 1);
+    boolean same =
+        last != null
+            && event.kind() == EventKind.LEAK
+            && last.kind() == EventKind.LEAK
+            && event.time().isBefore(last.until().plus(SAME_LEAK));
+    if (same) {
+      merged.set(merged.size() - 1, both(last, event));
+    } else {
+      merged.add(event);
+    }
+  }
+
+  private static Event both(Event first, Event second) {
+    return new Event(
+        first.kind(),
+        first.vessel(),
+        first.time(),
+        second.until(),
+        second.open(),
+        first.fromPaGauge(),
+        second.toPaGauge(),
+        first.gasKg() + second.gasKg(),
+        Math.max(first.confidence(), second.confidence()),
+        second.why());
   }
 }
