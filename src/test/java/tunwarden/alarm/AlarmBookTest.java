@@ -313,6 +313,29 @@ class AlarmBookTest {
   }
 
   @Test
+  void theEarlyEdgeOfTheRangeCountsWithinHalfTheLimit() {
+    for (long t : new long[] {0, 60}) {
+      fold(Assessments.of(V).at(t).soonestIn(Duration.ofMinutes(125)));
+    }
+    assertEquals(AlarmState.NORMAL, state(AlarmKind.TIME_TO_RELIEF_SHORT));
+    for (long t : new long[] {70, 130}) {
+      fold(Assessments.of(V).at(t).soonestIn(Duration.ofMinutes(80)));
+    }
+    assertEquals(
+        "At the upper edge of its range the trend reaches the valve's earliest opening in"
+            + " 1 h 20 min, likely not within 2 d.",
+        text(AlarmKind.TIME_TO_RELIEF_SHORT));
+    for (long t : new long[] {140, 440}) {
+      fold(Assessments.of(V).at(t).soonestIn(Duration.ofMinutes(135)));
+    }
+    assertEquals(AlarmState.UNACKNOWLEDGED, state(AlarmKind.TIME_TO_RELIEF_SHORT), "deadband");
+    for (long t : new long[] {450, 750}) {
+      fold(Assessments.of(V).at(t).soonestIn(Duration.ofMinutes(145)));
+    }
+    assertEquals(AlarmState.RETURNED_UNACKNOWLEDGED, state(AlarmKind.TIME_TO_RELIEF_SHORT));
+  }
+
+  @Test
   void stationAlarmsAreReportedAndReturned() {
     take(book.report(AlarmKind.DISK, true, "The data folder is full.", second(0)));
     assertEquals("The data folder is full.", book.alarms(AlarmBook.STATION).get(0).text());

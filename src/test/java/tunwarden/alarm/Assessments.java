@@ -36,6 +36,7 @@ public final class Assessments {
   private Observed pressure = observed(0.8e5, Quality.GOOD);
   private Observed temperature = observed(277.15, Quality.GOOD);
   private Optional<TimeRange> timeToLift = Optional.empty();
+  private Optional<Duration> soonestToLift = Optional.empty();
   private OptionalDouble liquidFullK = OptionalDouble.empty();
   private final List<Projection> projections = new ArrayList<>();
   private final List<Event> events = new ArrayList<>();
@@ -87,6 +88,12 @@ public final class Assessments {
 
   public Assessments liftIn(Duration middle) {
     timeToLift = Optional.of(new TimeRange(middle, middle.dividedBy(2), Optional.empty()));
+    return soonestIn(middle.dividedBy(2));
+  }
+
+  /** The early edge of the trend's range, whatever the likely time. */
+  public Assessments soonestIn(Duration early) {
+    soonestToLift = Optional.of(early);
     return this;
   }
 
@@ -123,7 +130,7 @@ public final class Assessments {
         new Outlook(
             projections,
             timeToLift,
-            timeToLift.map(TimeRange::low),
+            soonestToLift,
             Duration.ofHours(48),
             OptionalDouble.empty(),
             liquidFullK,
