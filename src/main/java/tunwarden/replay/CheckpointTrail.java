@@ -10,6 +10,12 @@ import java.util.List;
  */
 final class CheckpointTrail {
   private static final int MOST = 128;
+  private static final int LEAST = 16;
+
+  /** Vessels whose places take little room. */
+  private static final int FEW_VESSELS = 4;
+
+  private final int most;
 
   /**
    * One place.
@@ -23,6 +29,11 @@ final class CheckpointTrail {
   private final List<Place> places = new ArrayList<>();
   private long spacing = 256;
 
+  /** A trail that keeps fewer places the more vessels each of them holds. */
+  CheckpointTrail(int vessels) {
+    most = Math.max(LEAST, MOST / Math.max(1, vessels / FEW_VESSELS));
+  }
+
   /** Whether a place is wanted after this many rows. */
   boolean wants(long rows) {
     return places.isEmpty() || rows >= places.get(places.size() - 1).rows() + spacing;
@@ -30,7 +41,7 @@ final class CheckpointTrail {
 
   void add(Place place) {
     places.add(place);
-    if (places.size() > MOST) {
+    if (places.size() > most) {
       for (int i = places.size() - 2; i > 0; i -= 2) {
         places.remove(i);
       }

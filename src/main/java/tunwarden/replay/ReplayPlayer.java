@@ -14,7 +14,7 @@ public final class ReplayPlayer implements Closeable {
   private final RowSource.Supplier log;
   private final ReplayTarget target;
   private final Duration tick;
-  private final CheckpointTrail trail = new CheckpointTrail();
+  private final CheckpointTrail trail;
   private RowSource rows;
   private LogRow upcoming;
   private long fed;
@@ -34,6 +34,7 @@ public final class ReplayPlayer implements Closeable {
       throws IOException {
     this.log = log;
     this.target = target;
+    this.trail = new CheckpointTrail(target.vessels());
     this.tick = tick;
     this.rows = log.open();
     this.upcoming = rows.next();

@@ -14,6 +14,11 @@ public interface ReplayTarget {
   /** Data time has reached {@code now} and nothing has arrived for a tick. */
   void tick(Instant now);
 
+  /** How many vessels a checkpoint holds: the more, the fewer are kept. */
+  default int vessels() {
+    return 1;
+  }
+
   /** Where the target stands now. */
   Object checkpoint();
 

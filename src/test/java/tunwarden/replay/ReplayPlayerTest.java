@@ -107,7 +107,7 @@ class ReplayPlayerTest {
 
   @Test
   void placesToReturnToStayFew() {
-    CheckpointTrail trail = new CheckpointTrail();
+    CheckpointTrail trail = new CheckpointTrail(3);
     for (long rows = 0; rows < 5_000_000; rows++) {
       if (trail.wants(rows)) {
         trail.add(new CheckpointTrail.Place(rows, START.plusSeconds(rows), rows));

@@ -12,10 +12,12 @@ import tunwarden.station.Station;
  */
 final class StationTarget implements ReplayTarget {
   private final Assembly assembly;
+  private final int vessels;
   private volatile Instant reached = Instant.MIN;
 
-  StationTarget(Assembly assembly) {
+  StationTarget(Assembly assembly, int vessels) {
     this.assembly = assembly;
+    this.vessels = vessels;
   }
 
   private record Place(Station.Checkpoint station, AlarmBook alarms, Instant time) {}
@@ -30,6 +32,11 @@ final class StationTarget implements ReplayTarget {
   public synchronized void tick(Instant now) {
     reached = now;
     assembly.station().tick(now);
+  }
+
+  @Override
+  public int vessels() {
+    return vessels;
   }
 
   @Override
