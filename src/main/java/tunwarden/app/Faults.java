@@ -15,6 +15,7 @@ import picocli.CommandLine.Model.OptionSpec;
 import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.ParseResult;
 import picocli.CommandLine.UnmatchedArgumentException;
+import tunwarden.screen.terminal.NoTerminalException;
 import tunwarden.units.BadInputException;
 
 /** Turns whatever went wrong into one sentence on standard error and an exit code. */
@@ -40,6 +41,10 @@ final class Faults {
     if (fault instanceof BadInputException input) {
       line.getErr().println(oneLine(input.getMessage()));
       return WRONG_INPUT;
+    }
+    if (fault instanceof NoTerminalException none) {
+      line.getErr().println(oneLine(none.getMessage()));
+      return FAILED;
     }
     Throwable cause = fault instanceof UncheckedIOException ? fault.getCause() : fault;
     if (cause instanceof IOException io) {

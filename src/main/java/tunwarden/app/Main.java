@@ -19,6 +19,7 @@ import tunwarden.app.board.RehearsalDashboard;
 import tunwarden.app.cellar.CellarCommand;
 import tunwarden.app.instruments.InstrumentsCommand;
 import tunwarden.app.options.Commands;
+import tunwarden.app.options.Entry;
 import tunwarden.app.options.ScreenOptions;
 import tunwarden.app.reckon.Reckon;
 import tunwarden.config.CellarFile;
@@ -51,19 +52,19 @@ public final class Main implements Callable<Integer> {
   static final String NAME = "tunwarden";
 
   /** Every command, in the order the help lists them; add a class here to add a command. */
-  private static final List<Class<?>> COMMANDS =
+  private static final List<Entry> COMMANDS =
       List.of(
-          WatchCommand.class, //
-          ReplayCommand.class, //
-          ReportCommand.class, //
-          HeadlessCommand.class, //
-          AlarmsCommand.class, //
-          Reckon.class, //
-          RehearseCommand.class, //
-          InstrumentsCommand.class, //
-          CellarCommand.class, //
-          CompletionCommand.class, //
-          ManualCommand.class);
+          Entry.of("watch", WatchCommand.class),
+          Entry.of("replay", ReplayCommand.class),
+          Entry.of("report", ReportCommand.class),
+          Entry.of("headless", HeadlessCommand.class),
+          Entry.of("alarms", AlarmsCommand.class),
+          Entry.of("reckon", Reckon.class),
+          Entry.of("rehearse", RehearseCommand.class),
+          Entry.of("instruments", InstrumentsCommand.class),
+          Entry.of("cellar", CellarCommand.class),
+          Entry.of("completion", CompletionCommand.class),
+          Entry.of("manual", ManualCommand.class));
 
   private static final Set<String> DASHBOARDS = Set.of("", "watch", "replay");
   private static final int HELP_WIDTH = 90;

@@ -79,4 +79,24 @@ class MainTest {
     assertTrue(ran.err().contains("flange") && ran.err().contains(LogFile.path().toString()));
     assertFalse(ran.err().contains("\tat "));
   }
+
+  /**
+   * The name in the list finds a command when it is asked for, the one on its class at other times.
+   */
+  @Test
+  void everyCommandIsFoundByItsOwnName() {
+    everyNameHolds(Main.commandLine(), "");
+  }
+
+  private static void everyNameHolds(CommandLine line, String path) {
+    line.getSubcommands()
+        .forEach(
+            (name, command) -> {
+              String words = (path + " " + name).strip();
+              Ran ran = Ran.tunwarden((words + " --help").split(" "));
+              assertEquals(0, ran.code(), words + ran.err());
+              assertTrue(ran.out().contains("tunwarden " + words), ran.out());
+              everyNameHolds(command, words);
+            });
+  }
 }

@@ -4,6 +4,7 @@ import java.util.List;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Spec;
+import tunwarden.app.options.Entry;
 import tunwarden.app.options.Group;
 
 /** {@code alarms}: the alarms of a running {@code headless}, from another terminal. */
@@ -25,15 +26,15 @@ public final class AlarmsCommand implements Runnable, Group {
   @Spec private CommandSpec spec;
 
   @Override
-  public List<Class<?>> members() {
+  public List<Entry> members() {
     return List.of(
-        ListAlarms.class,
-        AcknowledgeAlarms.class,
-        ShelveAlarm.class,
-        UnshelveAlarm.class,
-        AlarmOutOfService.class,
-        AlarmInService.class,
-        WriteNote.class);
+        Entry.of("list", ListAlarms.class),
+        Entry.of("acknowledge", AcknowledgeAlarms.class),
+        Entry.of("shelve", ShelveAlarm.class),
+        Entry.of("unshelve", UnshelveAlarm.class),
+        Entry.of("out-of-service", AlarmOutOfService.class),
+        Entry.of("in-service", AlarmInService.class),
+        Entry.of("note", WriteNote.class));
   }
 
   @Override

@@ -98,7 +98,7 @@ final class Playback {
             (vessel, quantity) -> new SignalSource(quantity.column(), show.name(), () -> ""),
             List.of(),
             List.of());
-    StationTarget fed = new StationTarget(assembly);
+    StationTarget fed = new StationTarget(assembly, show.vessels().size());
     target.set(fed);
     ReplayPlayer player = new ReplayPlayer(show.rows(), fed, TICK);
     fed.begin(player.start());

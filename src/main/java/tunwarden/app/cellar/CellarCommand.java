@@ -5,6 +5,7 @@ import picocli.CommandLine.Command;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Spec;
+import tunwarden.app.options.Entry;
 import tunwarden.app.options.Group;
 
 /** Heading of what can be done with a cellar file. */
@@ -20,8 +21,8 @@ public final class CellarCommand implements Runnable, Group {
   @Spec private CommandSpec spec;
 
   @Override
-  public List<Class<?>> members() {
-    return List.of(CellarNew.class, CellarCheck.class);
+  public List<Entry> members() {
+    return List.of(Entry.of("new", CellarNew.class), Entry.of("check", CellarCheck.class));
   }
 
   @Override

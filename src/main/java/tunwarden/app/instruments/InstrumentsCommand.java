@@ -4,6 +4,7 @@ import java.util.List;
 import picocli.CommandLine.Command;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.Spec;
+import tunwarden.app.options.Entry;
 import tunwarden.app.options.Group;
 
 /** Everything about instruments that needs no cellar file. */
@@ -22,13 +23,13 @@ public final class InstrumentsCommand implements Runnable, Group {
   @Spec private CommandSpec spec;
 
   @Override
-  public List<Class<?>> members() {
+  public List<Entry> members() {
     return List.of(
-        ListCommand.class,
-        PortsCommand.class,
-        CheckCommand.class,
-        ListenCommand.class,
-        ProbeCommand.class);
+        Entry.of("list", ListCommand.class),
+        Entry.of("ports", PortsCommand.class),
+        Entry.of("check", CheckCommand.class),
+        Entry.of("listen", ListenCommand.class),
+        Entry.of("probe", ProbeCommand.class));
   }
 
   @Override

@@ -5,7 +5,6 @@ import static picocli.CommandLine.Model.UsageMessageSpec.SECTION_KEY_FOOTER_HEAD
 
 import java.util.List;
 import picocli.CommandLine;
-import picocli.CommandLine.Command;
 
 /**
  * Puts commands under a command line. Only the one that the arguments name is built, since reading
@@ -18,16 +17,16 @@ public final class Commands {
    * Adds the command that is named at a place among the arguments, or all of them.
    *
    * @param line the command line to add to
-   * @param classes the commands
+   * @param entries the commands
    * @param args the whole arguments
    * @param place where the name stands
    */
-  public static void add(CommandLine line, List<Class<?>> classes, String[] args, int place) {
+  public static void add(CommandLine line, List<Entry> entries, String[] args, int place) {
     String named = place < args.length ? args[place] : "";
-    boolean known = classes.stream().anyMatch(type -> nameOf(type).equals(named));
-    for (Class<?> type : classes) {
-      if (!known || nameOf(type).equals(named)) {
-        CommandLine added = new CommandLine(type);
+    boolean known = entries.stream().anyMatch(entry -> entry.name().equals(named));
+    for (Entry entry : entries) {
+      if (!known || entry.name().equals(named)) {
+        CommandLine added = new CommandLine(entry.type());
         added.getHelpSectionMap().put(SECTION_KEY_FOOTER_HEADING, help -> "");
         added.getHelpSectionMap().put(SECTION_KEY_FOOTER, WorkedExamples::footer);
         if (added.getCommand() instanceof Group group) {
@@ -36,9 +35,5 @@ public final class Commands {
         line.addSubcommand(added);
       }
     }
-  }
-
-  private static String nameOf(Class<?> type) {
-    return type.getAnnotation(Command.class).name();
   }
 }

@@ -5,6 +5,7 @@ import picocli.CommandLine.Command;
 import picocli.CommandLine.Model.CommandSpec;
 import picocli.CommandLine.ParameterException;
 import picocli.CommandLine.Spec;
+import tunwarden.app.options.Entry;
 import tunwarden.app.options.Group;
 
 /** Heading of the kinds of answer. */
@@ -23,24 +24,24 @@ import tunwarden.app.options.Group;
       "  tunwarden reckon hold --help"
     })
 public final class Reckon implements Runnable, Group {
-  private static final List<Class<?>> KINDS =
+  private static final List<Entry> KINDS =
       List.of(
-          Dissolved.class,
-          Hold.class,
-          Warm.class,
-          Chill.class,
-          VentTrial.class,
-          Sealing.class,
-          SupplyTrial.class,
-          ReliefCheck.class,
-          VacuumCheck.class,
-          Solubility.class,
-          Flow.class);
+          Entry.of("dissolved", Dissolved.class),
+          Entry.of("hold", Hold.class),
+          Entry.of("warm", Warm.class),
+          Entry.of("chill", Chill.class),
+          Entry.of("vent", VentTrial.class),
+          Entry.of("seal", Sealing.class),
+          Entry.of("supply", SupplyTrial.class),
+          Entry.of("relief", ReliefCheck.class),
+          Entry.of("vacuum", VacuumCheck.class),
+          Entry.of("solubility", Solubility.class),
+          Entry.of("flow", Flow.class));
 
   @Spec private CommandSpec spec;
 
   @Override
-  public List<Class<?>> members() {
+  public List<Entry> members() {
     return KINDS;
   }
 
