@@ -14,9 +14,9 @@ final class LadderSvg {
   private static final int WIDTH = 340;
   private static final int SCALE_X = 74;
   private static final int LABEL_X = 108;
-  private static final int LINE = 19;
-  private static final int TOP = 34;
-  private static final int HEADING_Y = 10;
+  private static final int LINE = 23;
+  private static final int TOP = 38;
+  private static final int HEADING_Y = 12;
 
   private LadderSvg() {}
 

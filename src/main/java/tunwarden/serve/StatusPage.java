@@ -29,7 +29,7 @@ final class StatusPage {
       section{background:var(--card);border:1px solid var(--line);border-radius:.4rem;padding:.7rem}
       .big{font-size:1.5rem;font-variant-numeric:tabular-nums}.soft{color:var(--soft);font-size:.9rem}
       dl{display:grid;grid-template-columns:auto 1fr;gap:.1rem .8rem;margin:.4rem 0}dt{color:var(--soft)}dd{margin:0;text-align:right}
-      svg.ladder{width:100%;max-width:26rem;height:auto;font:13px system-ui,sans-serif}
+      svg.ladder{width:100%;max-width:26rem;height:auto;font:15px system-ui,sans-serif}
       svg text{fill:var(--soft)}svg .end{text-anchor:end}svg line,svg polyline{stroke:var(--line);fill:none;stroke-width:1.5}
       svg text.limit{fill:var(--ink)}svg text.now{fill:var(--ink);font-weight:700}svg polyline.now{stroke:var(--ink);stroke-width:3}
       svg polyline.forecast{stroke-dasharray:3 3}
@@ -65,10 +65,25 @@ final class StatusPage {
     served.state().assessments().stream()
         .sorted(Comparator.comparingDouble(StatusPage::shareLeft))
         .forEach(assessment -> vessel(page, assessment, book, display));
-    page.append("</main><footer>Advice beside the instruments, never a safety function. ")
+    page.append("</main><footer>");
+    switchedOff(page, book);
+    page.append("Advice beside the instruments, never a safety function. ")
         .append("Before going in to a vessel that vents: measure the CO2 in the room.</footer>")
         .append("</body></html>");
     return page.toString();
+  }
+
+  private static void switchedOff(StringBuilder page, AlarmBook book) {
+    book.settings()
+        .manner()
+        .switchedOff()
+        .forEach(
+            (kind, why) ->
+                page.append("Never raised here: ")
+                    .append(Html.escape(kind.word()))
+                    .append(" (")
+                    .append(Html.escape(why))
+                    .append("). "));
   }
 
   private static String title(AlarmBook book) {
@@ -169,8 +184,10 @@ final class StatusPage {
           .append(Html.escape(alarm.kind().word()))
           .append("</b> <span class=\"soft\">")
           .append(Html.escape(alarm.state().word()))
+          .append(alarm.shelvedUntil().map(end -> " until " + time(end.toString())).orElse(""))
           .append(", since ")
           .append(time(alarm.since().toString()))
+          .append(alarm.remark().isEmpty() ? "" : ", said: " + Html.escape(alarm.remark()))
           .append("</span><br>")
           .append(Html.escape(alarm.text()))
           .append("<br><span class=\"soft\">")
@@ -193,7 +210,7 @@ final class StatusPage {
 
   private static String quality(Observed observed) {
     String age = observed.at().isPresent() ? ", " + observed.age().toSeconds() + " s old" : "";
-    return "pressure " + observed.quality().why() + age;
+    return "pressure: " + observed.quality().why() + age;
   }
 
   private static String time(String instant) {
