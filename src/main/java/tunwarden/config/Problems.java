@@ -21,7 +21,9 @@ final class Problems {
   void add(List<String> path, String sentence) {
     int line = lines.lineOf(path);
     String key = path.isEmpty() ? "" : ", " + String.join(".", path);
-    found.add(new Problem(line, file + " line " + line + key + ": " + sentence));
+    String words = file + " line " + line + key + ": " + sentence;
+    // What is quoted from the file may hold what a terminal obeys.
+    found.add(new Problem(line, words.replaceAll("\\p{Cntrl}", "?")));
   }
 
   int count() {

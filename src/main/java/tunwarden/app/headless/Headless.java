@@ -20,6 +20,7 @@ import tunwarden.alarm.AlarmKind;
 import tunwarden.app.keeping.Keeping;
 import tunwarden.config.Cellar;
 import tunwarden.config.CellarFile;
+import tunwarden.journal.Harmless;
 import tunwarden.journal.JournalEntry;
 import tunwarden.journal.JournalReader;
 import tunwarden.journal.Recorder;
@@ -185,7 +186,7 @@ public final class Headless implements AutoCloseable {
   }
 
   private void say(String kind, String text) {
-    console.accept(text);
+    console.accept(Harmless.text(text));
     recorder.write(JournalEntry.station(clock.instant(), kind, text));
   }
 
