@@ -55,14 +55,6 @@ public final class History {
     }
   }
 
-  /** Forgets everything. */
-  public synchronized void clear() {
-    for (int i = 0; i < BIN_S.length; i++) {
-      pressure[i].clear();
-      temperature[i].clear();
-    }
-  }
-
   /** Forgets what came after that time, as after going back in a replay. */
   public synchronized void forgetAfter(Instant time) {
     for (int i = 0; i < BIN_S.length; i++) {

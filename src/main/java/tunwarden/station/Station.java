@@ -27,7 +27,6 @@ public final class Station {
   private final Map<String, VesselWatch> watches = new LinkedHashMap<>();
   private final List<Sink> sinks;
   private final Duration tickGap;
-  private long unknownVessels;
 
   /**
    * A station that has seen nothing yet.
@@ -51,11 +50,10 @@ public final class Station {
     this.tickGap = Duration.ofSeconds(1);
   }
 
-  /** Digests one sample; one of a vessel that is not in the cellar is counted and dropped. */
+  /** Digests one sample; one of a vessel that is not in the cellar is dropped. */
   public void accept(Sample sample) {
     VesselWatch watch = watches.get(sample.vessel());
     if (watch == null) {
-      unknownVessels++;
       return;
     }
     Step step = watch.digest(sample);
@@ -102,11 +100,6 @@ public final class Station {
     if (watch != null) {
       watch.restore(VesselMemory.fresh(state));
     }
-  }
-
-  /** How many samples named a vessel that is not in the cellar. */
-  public long unknownVessels() {
-    return unknownVessels;
   }
 
   /** The station's memory at one moment; opaque and immutable. */

@@ -86,7 +86,7 @@ class HistoryTest {
     History.Trace now =
         history.window(START.plusSeconds(999_999), START.plusSeconds(1_000_002), 3).pressure();
     assertEquals(200_000, now.last()[1]);
-    history.clear();
+    history.forgetAfter(START.minusSeconds(1));
     assertFalse(history.window(START, START.plusSeconds(10), 1).pressure().has(0));
   }
 

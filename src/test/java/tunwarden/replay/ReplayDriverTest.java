@@ -55,15 +55,33 @@ class ReplayDriverTest {
     }
   }
 
+  @Test
+  void aLongWayThroughTheLogIsFollowedAndCanBeStopped() throws Exception {
+    AtomicLong seen = new AtomicLong();
+    try (Bench bench = new Bench(1000)) {
+      bench.driver.pause(true);
+      bench.target.onSample =
+          () -> {
+            if (seen.incrementAndGet() == 120) {
+              bench.driver.stopSeeking();
+            }
+          };
+      bench.driver.start();
+      bench.driver.seek(START.plusSeconds(4000));
+      bench.until(() -> seen.get() >= 120 && bench.driver.status().seek().isEmpty());
+      assertTrue(bench.driver.status().rows() <= 200, "stands at " + bench.driver.status());
+    }
+  }
+
   /** A driver whose waits pass at once while the counter moves on by what was waited for. */
   private static final class Bench implements AutoCloseable {
     private final AtomicLong nanos = new AtomicLong();
+    private final ReplayPlayerTest.Listening target = new ReplayPlayerTest.Listening();
     private final ReplayDriver driver;
 
     Bench(double pace) throws IOException {
       ReplayPlayer player =
-          new ReplayPlayer(
-              ReplayPlayerTest.rows(500), new ReplayPlayerTest.Listening(), Duration.ofSeconds(60));
+          new ReplayPlayer(ReplayPlayerTest.rows(500), target, Duration.ofSeconds(60));
       driver =
           new ReplayDriver(
               player,

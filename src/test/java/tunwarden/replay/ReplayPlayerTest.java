@@ -22,10 +22,12 @@ class ReplayPlayerTest {
   /** Remembers all it was told; its checkpoint is how much that was. */
   static final class Listening implements ReplayTarget {
     final List<String> heard = new ArrayList<>();
+    volatile Runnable onSample = () -> {};
 
     @Override
     public void accept(Sample sample) {
       heard.add(sample.time() + "");
+      onSample.run();
     }
 
     @Override

@@ -17,6 +17,8 @@ import tunwarden.assess.Margins;
 import tunwarden.assess.Observed;
 import tunwarden.assess.Rung;
 import tunwarden.estimate.Estimate;
+import tunwarden.estimate.Event;
+import tunwarden.estimate.EventKind;
 import tunwarden.estimate.Mode;
 import tunwarden.forecast.Caution;
 import tunwarden.forecast.Outlook;
@@ -110,6 +112,7 @@ public final class Boards {
         now.minusSeconds(30_000),
         now.plusSeconds(20_000),
         now,
+        "",
         List.of(
             new ReplayStatus.TimeMark(now.minusSeconds(5_000), "BT1", "vent"),
             new ReplayStatus.TimeMark(now.plusSeconds(9_000), "BT1", "lift")));
@@ -224,7 +227,18 @@ public final class Boards {
             ladder(vessel, bar, outlook),
             List.of(),
             List.of());
-    return new VesselBoard(assessment, alarms, history(bar, celsius, now));
+    return new VesselBoard(
+        assessment, alarms, history(bar, celsius, now), goingOn(vessel.id(), now));
+  }
+
+  /** One vessel has been losing gas since the morning. */
+  private static List<Event> goingOn(String id, Instant now) {
+    Instant since = now.minusSeconds(7_800);
+    return id.equals("CK4")
+        ? List.of(
+            new Event(
+                EventKind.LEAK, id, since, now, true, 0.62 * BAR, 0.55 * BAR, 0.021, 0.8, "falls"))
+        : List.of();
   }
 
   private static Margins margins(double pa, double set) {

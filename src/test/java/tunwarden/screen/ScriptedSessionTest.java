@@ -5,6 +5,7 @@ import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.List;
+import java.util.stream.Collectors;
 import org.junit.jupiter.api.Test;
 import tunwarden.alarm.AlarmKind;
 import tunwarden.alarm.AlarmState;
@@ -166,7 +167,7 @@ class ScriptedSessionTest {
   void helpShowsTheKeysOfThePageAndAnyKeyClosesIt() {
     Sessions session = on(Origin.LIVE).type("v?");
     assertTrue(session.screen().contains("Vessel page"));
-    assertTrue(session.screen().contains("scale from 0 to relief set"));
+    assertTrue(session.screen().contains("0 to relief set, or close"));
     session.press(Key.Kind.DOWN);
     assertFalse(session.screen().contains("Vessel page"));
   }
@@ -194,5 +195,39 @@ class ScriptedSessionTest {
     assertTrue(session.screen().contains("STALE"), session.screen());
     assertTrue(session.screen().contains("96 s"));
     assertTrue(session.type("v").screen().contains("! STALE"), session.screen());
+  }
+
+  @Test
+  void helpOnASmallScreenShowsEveryKeyOfThePageInWholeAlsoInAReplay() {
+    Board board = Boards.three(Origin.REPLAY, Boards.NOW);
+    for (Page page : Page.values()) {
+      String screen =
+          new Sessions(board, new Size(80, 24)).press(Key.typed(page.letter())).type("?").screen();
+      String help = screen.lines().skip(3).collect(Collectors.joining("\n"));
+      assertFalse(help.contains("…"), screen);
+      for (String words :
+          List.of(
+              "pause, go on",
+              "one row",
+              "go to a time",
+              "mark this moment",
+              "draw afresh",
+              "leave")) {
+        assertTrue(screen.contains(words), words + " is missing:\n" + screen);
+      }
+    }
+  }
+
+  @Test
+  void whatGoesOnIsOnTheVesselPageInLocalTime() {
+    Sessions session = on(Origin.LIVE).type("/CK4").press(Key.Kind.ENTER).type("v");
+    assertTrue(session.screen().contains("leak since 08:52, 0.62 to 0.55 bar g"), session.screen());
+  }
+
+  @Test
+  void enterInTheJournalOfAReplayGoesToThatTime() {
+    Sessions session = on(Origin.REPLAY).type("j").press(Key.Kind.END).press(Key.Kind.ENTER);
+    assertEquals(List.of("seek 2026-03-02T08:32:31Z"), session.asked());
+    assertEquals(List.of(), on(Origin.LIVE).type("j").press(Key.Kind.ENTER).asked());
   }
 }

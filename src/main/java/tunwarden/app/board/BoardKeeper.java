@@ -14,6 +14,7 @@ import tunwarden.assess.Assessment;
 import tunwarden.assess.Assessor;
 import tunwarden.assess.History;
 import tunwarden.assess.Observed;
+import tunwarden.estimate.Event;
 import tunwarden.estimate.Step;
 import tunwarden.forecast.Outlook;
 import tunwarden.reading.Sample;
@@ -56,6 +57,7 @@ public final class BoardKeeper implements Sink {
   private final SignalTally signals;
   private final JournalPages journal;
   private final Map<String, Assessment> latest = new ConcurrentHashMap<>();
+  private final GoingOn goingOn = new GoingOn();
   private final Map<String, History> histories = new ConcurrentHashMap<>();
 
   /** A board on which nothing has been seen yet. */
@@ -99,6 +101,7 @@ public final class BoardKeeper implements Sink {
     String id = assessment.vessel().id();
     histories.get(id).add(assessment);
     latest.put(id, assessment);
+    goingOn.assessed(assessment);
     journal.assessed(assessment);
   }
 
@@ -107,8 +110,14 @@ public final class BoardKeeper implements Sink {
     journal.add(entry);
   }
 
+  /** What is going on, to be given back with {@link #backTo}. */
+  Map<String, List<Event>> goingOn() {
+    return goingOn.kept();
+  }
+
   /** Forgets what came after a time, as when a replay goes back. */
-  void backTo(Instant time) {
+  void backTo(Instant time, Map<String, List<Event>> goingOnThen) {
+    goingOn.restore(goingOnThen);
     histories.values().forEach(history -> history.forgetAfter(time));
     journal.forgetAfter(time);
   }
@@ -121,7 +130,11 @@ public final class BoardKeeper implements Sink {
       Assessment assessment = latest.get(vessel.id());
       if (assessment != null) {
         boards.add(
-            new VesselBoard(assessment, book.alarms(vessel.id()), histories.get(vessel.id())));
+            new VesselBoard(
+                assessment,
+                book.alarms(vessel.id()),
+                histories.get(vessel.id()),
+                goingOn.of(vessel.id())));
       }
     }
     return new Board(

@@ -89,7 +89,7 @@ public class LiveDesk implements Desk {
 
   @Override
   public String stopWork() {
-    return "";
+    return "nothing is under way";
   }
 
   @Override

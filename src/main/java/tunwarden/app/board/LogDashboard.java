@@ -35,20 +35,28 @@ public final class LogDashboard {
     try (RowSource rows = log.open()) {
       LogRow first = rows.next();
       try (Survey survey = new Survey(log, vessels, first.time())) {
+        ReplayReport report = new ReplayReport(log, vessels, reportCommand);
         Playback.Helpers helpers =
             new Playback.Helpers(
                 survey::start,
                 () -> Optional.of(survey.last()),
                 survey::marks,
-                survey::progress,
-                survey::close,
-                new ReplayReport(log, vessels, reportCommand)::write);
+                () -> report.progress().or(survey::progress),
+                () -> stop(report, survey),
+                report::write);
         String name = log.path().getFileName().toString();
         Playback.run(
             new Playback.Show(name, Origin.REPLAY, vessels, log, pace, alarms, Duration.ZERO),
             helpers,
             front);
       }
+    }
+  }
+
+  /** Stops what is shown as progress: the report, or else the survey. */
+  private static void stop(ReplayReport report, Survey survey) {
+    if (!report.stop()) {
+      survey.close();
     }
   }
 }

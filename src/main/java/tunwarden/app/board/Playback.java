@@ -8,7 +8,8 @@ import java.util.List;
 import java.util.Locale;
 import java.util.Optional;
 import java.util.concurrent.atomic.AtomicReference;
-import java.util.function.Function;
+import java.util.function.BiFunction;
+import java.util.function.Consumer;
 import java.util.function.Supplier;
 import tunwarden.alarm.AlarmSettings;
 import tunwarden.replay.ReplayDriver;
@@ -60,7 +61,7 @@ final class Playback {
    * @param marks times at which something happened, as far as known
    * @param progress long work under way
    * @param stopWork stops it
-   * @param report writes a report of a vessel and says where
+   * @param report writes a report of a vessel, says where, and later tells how it ended
    */
   record Helpers(
       Runnable begin,
@@ -68,7 +69,7 @@ final class Playback {
       Supplier<List<TimeMark>> marks,
       Supplier<Optional<Progress>> progress,
       Runnable stopWork,
-      Function<String, String> report) {
+      BiFunction<String, Consumer<String>, String> report) {
     static final Helpers NONE =
         new Helpers(
             () -> {},
@@ -76,7 +77,7 @@ final class Playback {
             List::of,
             Optional::empty,
             () -> {},
-            vessel -> "a report is made from a log: tunwarden report LOG");
+            (vessel, told) -> "a report is made from a log: tunwarden report LOG");
   }
 
   private Playback(Show show, Front front) {
@@ -152,6 +153,13 @@ final class Playback {
     Instant end = helpers.last().get().filter(at::isBefore).orElse(at);
     return Optional.of(
         new ReplayStatus(
-            show.name(), now.pace(), now.paused(), now.start(), end, at, helpers.marks().get()));
+            show.name(),
+            now.pace(),
+            now.paused(),
+            now.start(),
+            end,
+            at,
+            now.failure().orElse(""),
+            helpers.marks().get()));
   }
 }

@@ -65,7 +65,11 @@ final class PlaybackDesk implements Desk {
 
   @Override
   public String report(String vessel) {
-    return helpers.report().apply(vessel);
+    return helpers
+        .report()
+        .apply(
+            vessel,
+            words -> assembly.board().write(new JournalEntry(now(), vessel, "report", words)));
   }
 
   @Override

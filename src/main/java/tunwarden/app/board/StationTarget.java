@@ -1,7 +1,10 @@
 package tunwarden.app.board;
 
 import java.time.Instant;
+import java.util.List;
+import java.util.Map;
 import tunwarden.alarm.AlarmBook;
+import tunwarden.estimate.Event;
 import tunwarden.reading.Sample;
 import tunwarden.replay.ReplayTarget;
 import tunwarden.station.Station;
@@ -20,7 +23,11 @@ final class StationTarget implements ReplayTarget {
     this.vessels = vessels;
   }
 
-  private record Place(Station.Checkpoint station, AlarmBook alarms, Instant time) {}
+  private record Place(
+      Station.Checkpoint station,
+      AlarmBook alarms,
+      Map<String, List<Event>> goingOn,
+      Instant time) {}
 
   @Override
   public synchronized void accept(Sample sample) {
@@ -41,7 +48,11 @@ final class StationTarget implements ReplayTarget {
 
   @Override
   public synchronized Object checkpoint() {
-    return new Place(assembly.station().checkpoint(), assembly.alarms().book(), reached);
+    return new Place(
+        assembly.station().checkpoint(),
+        assembly.alarms().book(),
+        assembly.board().goingOn(),
+        reached);
   }
 
   @Override
@@ -49,7 +60,7 @@ final class StationTarget implements ReplayTarget {
     Place place = (Place) checkpoint;
     assembly.station().restore(place.station());
     assembly.alarms().restore(place.alarms());
-    assembly.board().backTo(place.time());
+    assembly.board().backTo(place.time(), place.goingOn());
     reached = place.time();
   }
 

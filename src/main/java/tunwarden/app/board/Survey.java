@@ -32,12 +32,16 @@ import tunwarden.vessel.Vessel;
 final class Survey implements AutoCloseable {
   private static final Logger LOG = LoggerFactory.getLogger(Survey.class);
 
+  private static final long PUBLISH_EVERY_NANOS = 250_000_000L;
+
   private final LogFile log;
   private final Station station;
   private final long size;
   private final List<TimeMark> marks = new ArrayList<>();
   private final Thread thread = new Thread(this::read, "survey");
   private volatile long startedNanos = System.nanoTime();
+  private boolean unpublished;
+  private long publishedNanos;
   private volatile long bytesRead;
   private volatile boolean stopped;
   private volatile boolean ended;
@@ -96,6 +100,9 @@ final class Survey implements AutoCloseable {
           station.accept(sample);
         }
         last = row.time();
+        if (unpublished && System.nanoTime() - publishedNanos > PUBLISH_EVERY_NANOS) {
+          publish();
+        }
       }
     } catch (IOException | BadLogException e) {
       LOG.warn("the survey of {} ended early", log.path(), e);
@@ -104,8 +111,20 @@ final class Survey implements AutoCloseable {
     ended = true;
   }
 
+  /** Events are found when they end, so that one may belong before others already known. */
+  private void insert(TimeMark mark) {
+    int at = marks.size();
+    while (at > 0 && marks.get(at - 1).time().isAfter(mark.time())) {
+      at--;
+    }
+    marks.add(at, mark);
+    unpublished = true;
+  }
+
   private void publish() {
     shown = List.copyOf(marks);
+    unpublished = false;
+    publishedNanos = System.nanoTime();
   }
 
   private final class Marker implements Sink {
@@ -115,9 +134,7 @@ final class Survey implements AutoCloseable {
         if (event.open()) {
           continue;
         }
-        marks.add(new TimeMark(event.time(), event.vessel(), event.kind().word()));
-        marks.sort(java.util.Comparator.comparing(TimeMark::time));
-        publish();
+        insert(new TimeMark(event.time(), event.vessel(), event.kind().word()));
       }
     }
   }

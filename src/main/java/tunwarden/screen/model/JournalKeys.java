@@ -8,7 +8,7 @@ final class JournalKeys {
 
   private JournalKeys() {}
 
-  static Optional<Model> press(Model model, Key key) {
+  static Optional<Turn> press(Model model, Key key) {
     JournalState journal = model.journal();
     int last = JournalRows.of(model.board(), journal.filter()).size() - 1;
     return switch (key.kind()) {
@@ -18,11 +18,21 @@ final class JournalKeys {
       case PAGE_DOWN -> to(model, journal.row() + PAGE_STEP, last);
       case HOME -> to(model, 0, last);
       case END -> to(model, last, last);
+      case ENTER -> goThere(model);
       default -> Optional.empty();
     };
   }
 
-  private static Optional<Model> to(Model model, int row, int last) {
-    return Optional.of(model.edit().journal(model.journal().withRow(Math.min(row, last))).done());
+  /** In a replay, goes to the time of the chosen row. */
+  private static Optional<Turn> goThere(Model model) {
+    JournalRows rows = JournalRows.of(model.board(), model.journal().filter());
+    return model.board().replay().isEmpty()
+        ? Optional.empty()
+        : rows.time(model.journal().row()).map(time -> Turn.asking(model, desk -> desk.seek(time)));
+  }
+
+  private static Optional<Turn> to(Model model, int row, int last) {
+    JournalState there = model.journal().withRow(Math.min(row, last));
+    return Optional.of(Turn.to(model.edit().journal(there).done()));
   }
 }

@@ -1,5 +1,6 @@
 package tunwarden.screen.model;
 
+import java.time.Instant;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
@@ -42,6 +43,15 @@ public record JournalRows(List<Alarm> alarms, List<JournalEntry> entries) {
 
   public int size() {
     return alarms.size() + entries.size();
+  }
+
+  /** When what stands on that row began, if there is one. */
+  public Optional<Instant> time(int row) {
+    if (row < 0 || row >= size()) {
+      return Optional.empty();
+    }
+    return Optional.of(
+        row < alarms.size() ? alarms.get(row).since() : entries.get(row - alarms.size()).time());
   }
 
   /** The alarm on that row, if it is one. */

@@ -12,6 +12,7 @@ import java.util.List;
  * @param from first time in the log
  * @param to last time in the log
  * @param position time of the newest row played
+ * @param trouble why it cannot go on, as one sentence; empty as long as it can
  * @param events times at which something happened, in order, as far as known
  */
 public record ReplayStatus(
@@ -21,6 +22,7 @@ public record ReplayStatus(
     Instant from,
     Instant to,
     Instant position,
+    String trouble,
     List<TimeMark> events) {
   /** Keeps its own copy. */
   public ReplayStatus {

@@ -133,7 +133,7 @@ public final class Update {
       case CELLAR -> CellarKeys.press(model, key).map(Turn::to);
       case VESSEL -> VesselKeys.press(model, key).map(Turn::to);
       case VENT -> VentKeys.press(model, key).map(Turn::to);
-      case JOURNAL -> JournalKeys.press(model, key).map(Turn::to);
+      case JOURNAL -> JournalKeys.press(model, key);
       case SIGNALS -> Optional.empty();
     };
   }

@@ -13,6 +13,7 @@ import tunwarden.screen.model.Board;
 import tunwarden.screen.model.Desk;
 import tunwarden.screen.model.Key;
 import tunwarden.screen.model.Model;
+import tunwarden.screen.model.Origin;
 import tunwarden.screen.model.Request;
 import tunwarden.screen.model.Size;
 import tunwarden.screen.model.Turn;
@@ -25,12 +26,18 @@ import tunwarden.screen.view.ScreenView;
  * thread of its own draws. The model goes from one to the other through one reference.
  */
 final class Session {
-  private static final long DRAW_EVERY_MS = 250;
+  /** Something played is watched moving; what is live changes once a second. */
+  private static final long PLAYED_BEAT_MS = 300;
+
+  private static final long LIVE_BEAT_MS = 1_000;
+
+  /** After the turn of the second, so that the clock is never seen to skip one. */
+  private static final long AFTER_THE_SECOND_MS = 20;
 
   /** Keys are looked for often while someone types, seldom while nobody does. */
   private static final long BUSY_POLL_MS = 10;
 
-  private static final long IDLE_POLL_MS = 60;
+  private static final long IDLE_POLL_MS = 100;
   private static final int BUSY_POLLS = 300;
 
   private final Terminal terminal;
@@ -144,7 +151,7 @@ final class Session {
           shown = true;
           options.onceShown().run();
         }
-        pause();
+        pause(beat(board));
       }
     } catch (IOException terminalGone) {
       over = true;
@@ -163,12 +170,20 @@ final class Session {
     frames.show(now, whole);
   }
 
+  private static long beat(Board board) {
+    if (board.origin() != Origin.LIVE) {
+      return PLAYED_BEAT_MS;
+    }
+    long into = Math.floorMod(board.now().toEpochMilli(), LIVE_BEAT_MS);
+    return LIVE_BEAT_MS - into + AFTER_THE_SECOND_MS;
+  }
+
   /** Waits for the next beat or a key, whichever comes first. */
-  private void pause() {
+  private void pause(long mostMs) {
     synchronized (wake) {
       try {
         if (!woken) {
-          wake.wait(DRAW_EVERY_MS);
+          wake.wait(mostMs);
         }
         woken = false;
       } catch (InterruptedException e) {

@@ -11,7 +11,6 @@ import tunwarden.screen.model.Origin;
 import tunwarden.screen.model.Page;
 import tunwarden.screen.model.Progress;
 import tunwarden.screen.model.Prompt;
-import tunwarden.units.InUnits;
 
 /**
  * What stands around every page: header, alarm strip, and the bottom line with keys or a question.
@@ -102,7 +101,7 @@ final class FrameView {
             + worst.kind().word()
             + gone
             + ": "
-            + InUnits.of(worst.text(), model.look().units());
+            + Told.of(worst.text(), model.look().units(), model.board());
     canvas.put(0, 1, end, text, role);
   }
 

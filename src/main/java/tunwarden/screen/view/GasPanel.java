@@ -33,6 +33,7 @@ final class GasPanel {
   private final Assessment assessment;
   private final Standing standing;
   private final String lately;
+  private final List<String> goingOn;
   private final List<Line> lines = new ArrayList<>();
   private final int width;
 
@@ -45,6 +46,7 @@ final class GasPanel {
     this.assessment = vessel.assessment();
     this.standing = Standing.of(vessel, board);
     this.lately = Lately.of(vessel, board.now(), units);
+    this.goingOn = Happenings.goingOn(vessel, board, units);
   }
 
   static void draw(Canvas canvas, Area area, Display units, VesselBoard vessel, Board board) {
@@ -67,6 +69,7 @@ final class GasPanel {
     if (!lately.isEmpty()) {
       named("lately", lately, Role.NORMAL);
     }
+    goingOn.forEach(words -> named("now", words, Role.STRONG));
     writeMargin();
     writeOutlook(assessment.outlook());
     for (Caution caution : assessment.outlook().cautions()) {

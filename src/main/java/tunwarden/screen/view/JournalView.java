@@ -6,7 +6,6 @@ import tunwarden.alarm.AlarmState;
 import tunwarden.screen.model.JournalEntry;
 import tunwarden.screen.model.JournalRows;
 import tunwarden.screen.model.Model;
-import tunwarden.units.InUnits;
 
 /** Standing alarms, then what was written down, newest first; the chosen row in full below. */
 final class JournalView {
@@ -65,8 +64,7 @@ final class JournalView {
       canvas.put(x + TIME, y, VESSEL - 1, e.vessel(), Role.NORMAL);
       canvas.put(x + TIME + VESSEL, y, KIND - 1, e.kind(), Role.NORMAL);
       int textX = x + TIME + VESSEL + KIND;
-      canvas.put(
-          textX, y, area.right() - textX, InUnits.of(e.text(), model.look().units()), Role.NORMAL);
+      canvas.put(textX, y, area.right() - textX, told(e.text(), model), Role.NORMAL);
     }
     if (chosen) {
       for (int x = area.x(); x < area.right(); x++) {
@@ -93,13 +91,17 @@ final class JournalView {
 
   private static String stateWords(Model model, Alarm alarm) {
     String until =
-        alarm.shelvedUntil().map(t -> " until " + Words.minute(t, model.board().zone())).orElse("");
+        alarm.shelvedUntil().map(t -> " until " + Words.when(t, model.board())).orElse("");
     return alarm.priority().word()
         + ", "
         + alarm.state().word()
         + until
         + ": "
-        + InUnits.of(alarm.text(), model.look().units());
+        + told(alarm.text(), model);
+  }
+
+  private static String told(String text, Model model) {
+    return Told.of(text, model.look().units(), model.board());
   }
 
   private static String time(Model model, java.time.Instant time) {
@@ -116,7 +118,7 @@ final class JournalView {
             .map(a -> a.text() + " " + a.action())
             .orElseGet(() -> rows.entries().get(chosen - rows.alarms().size()).text());
     int y = area.y() + 1;
-    String turned = InUnits.of(text, model.look().units());
+    String turned = told(text, model);
     for (String line : Words.wrap(turned, area.columns() - 4)) {
       if (y < area.bottom()) {
         canvas.put(area.x() + 2, y++, line, Role.NORMAL);

@@ -2,6 +2,8 @@ package tunwarden.screen.view;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
 import tunwarden.screen.model.Model;
 import tunwarden.screen.model.Page;
 
@@ -35,7 +37,7 @@ final class KeyHints {
               new Hint("+ -", "zoom"),
               new Hint("[ ]", "back, forth in time"),
               new Hint("End", "follow the present"),
-              new Hint("y", "scale from 0 to relief set"),
+              new Hint("y", "0 to relief set, or close"),
               new Hint("l", "enter a laboratory value"));
       case VENT ->
           List.of(
@@ -49,7 +51,7 @@ final class KeyHints {
               new Hint("arrows", "choose a row"),
               new Hint("/", "show only what contains"),
               new Hint("a", "acknowledge the alarm"),
-              new Hint("h", "shelve it, or bring it back"));
+              new Hint("h", "shelve, or bring back"));
       case SIGNALS -> List.of();
     };
   }
@@ -57,10 +59,10 @@ final class KeyHints {
   /** Keys that work on every page. */
   static List<Hint> everywhere() {
     List<Hint> hints = new ArrayList<>();
-    for (Page page : Page.values()) {
-      hints.add(new Hint(String.valueOf(page.letter()), page.title()));
-    }
-    hints.add(new Hint("a", "acknowledge the worst alarm"));
+    hints.add(letters(Page.CELLAR, Page.VESSEL));
+    hints.add(letters(Page.VENT, Page.JOURNAL));
+    hints.add(letters(Page.SIGNALS));
+    hints.add(new Hint("a", "acknowledge the worst"));
     hints.add(new Hint("h", "shelve the alarm"));
     hints.add(new Hint("n", "write a note"));
     hints.add(new Hint("r", "write a report"));
@@ -73,6 +75,11 @@ final class KeyHints {
     return hints;
   }
 
+  private static Hint letters(Page... pages) {
+    String keys = Stream.of(pages).map(p -> "" + p.letter()).collect(Collectors.joining(" "));
+    return new Hint(keys, Stream.of(pages).map(Page::title).collect(Collectors.joining(", ")));
+  }
+
   /** Keys of a replay. */
   static List<Hint> replay() {
     return List.of(
@@ -81,6 +88,7 @@ final class KeyHints {
         new Hint(".", "one row"),
         new Hint("e E", "next, earlier event"),
         new Hint("k", "go to a time"),
+        new Hint("Enter", "in the journal: go there"),
         new Hint("m", "mark this moment"));
   }
 

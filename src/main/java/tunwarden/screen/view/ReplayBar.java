@@ -14,6 +14,11 @@ final class ReplayBar {
   static void draw(Canvas canvas, int y, Board board) {
     ReplayStatus replay = board.replay().orElseThrow();
     canvas.fill(0, y, canvas.columns(), " ", Role.NORMAL);
+    if (!replay.trouble().isEmpty()) {
+      canvas.fill(0, y, canvas.columns(), " ", Role.CAUTION_BAR);
+      canvas.put(0, y, " ! " + replay.trouble(), Role.CAUTION_BAR);
+      return;
+    }
     String pace = "×" + Display.number(replay.pace(), 0);
     String state = replay.paused() ? " PAUSED " + pace + " " : " playing " + pace + " ";
     int x = canvas.put(0, y, state, replay.paused() ? Role.ORIGIN : Role.STRONG);

@@ -8,6 +8,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
 import tunwarden.forecast.TimeRange;
+import tunwarden.screen.model.Board;
 import tunwarden.units.Display;
 
 /** Times and lengths of time as words, and lines broken between words. */
@@ -39,6 +40,13 @@ final class Words {
 
   static String full(Instant time, ZoneId zone) {
     return FULL.format(time.atZone(zone));
+  }
+
+  /** Time of day, with the day before it unless that is today's. */
+  static String when(Instant time, Board board) {
+    ZoneId zone = board.zone();
+    boolean today = time.atZone(zone).toLocalDate().equals(board.now().atZone(zone).toLocalDate());
+    return today ? minute(time, zone) : dayAndMinute(time, zone);
   }
 
   /** Two units at most: {@code 45 s}, {@code 5 min}, {@code 5 h 20 min}, {@code 3 d 4 h}. */

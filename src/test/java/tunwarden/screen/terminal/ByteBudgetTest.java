@@ -85,7 +85,7 @@ class ByteBudgetTest {
 
   private static Board board(double bar, History history, Instant now) {
     VesselBoard made = Boards.vessel("FV2", "pale ale", bar, 4.2, now, List.of());
-    VesselBoard vessel = new VesselBoard(made.assessment(), made.alarms(), history);
+    VesselBoard vessel = new VesselBoard(made.assessment(), made.alarms(), history, List.of());
     return Boards.board(Origin.LIVE, now, List.of(vessel));
   }
 }

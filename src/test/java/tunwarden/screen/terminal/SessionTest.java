@@ -31,6 +31,7 @@ class SessionTest {
   private static final class Watched extends DefaultVirtualTerminal {
     private volatile boolean inScreen;
     private volatile int entered;
+    private int bells;
     private volatile boolean closed;
     private final CountDownLatch stalled = new CountDownLatch(1);
     private volatile boolean stalls;
@@ -56,6 +57,11 @@ class SessionTest {
     public void close() {
       closed = true;
       super.close();
+    }
+
+    @Override
+    public void bell() {
+      bells++;
     }
 
     @Override
@@ -107,6 +113,26 @@ class SessionTest {
     terminal.addInput(new KeyStroke('c', true, false));
     run(() -> Boards.three(Origin.LIVE, Boards.NOW));
     terminal.wasGivenBack();
+  }
+
+  @Test
+  void theBellRingsForANewAlarmOnlyWhereItIsWanted() {
+    assertEquals(1, bellsWith(true));
+    assertEquals(0, bellsWith(false));
+  }
+
+  private int bellsWith(boolean wanted) {
+    Watched watched = new Watched();
+    DashboardOptions options =
+        new DashboardOptions(
+            Look.USUAL,
+            false,
+            wanted,
+            OutputStream.nullOutputStream(),
+            () -> watched.addInput(new KeyStroke('c', true, false)));
+    Board board = Boards.three(Origin.LIVE, Boards.NOW);
+    assertTimeoutPreemptively(PATIENCE, () -> Dashboard.runOn(watched, () -> board, desk, options));
+    return watched.bells;
   }
 
   @Test

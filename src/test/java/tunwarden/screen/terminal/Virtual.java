@@ -7,6 +7,8 @@ import com.googlecode.lanterna.screen.Screen;
 import com.googlecode.lanterna.screen.TerminalScreen;
 import com.googlecode.lanterna.terminal.virtual.DefaultVirtualTerminal;
 import java.io.IOException;
+import java.util.LinkedHashMap;
+import java.util.Map;
 import tunwarden.screen.model.Model;
 import tunwarden.screen.model.Size;
 import tunwarden.screen.view.Canvas;
@@ -58,19 +60,50 @@ final class Virtual {
     return all.toString();
   }
 
-  /** One letter for the paint of every cell, a legend below. */
+  /**
+   * One letter for the paint of every cell, runs of a letter counted, rows alike counted, a legend
+   * below: {@code 3 x a20 b60} is three rows of twenty cells of a and sixty of b.
+   */
   String paint() {
     StringBuilder all = new StringBuilder();
-    java.util.LinkedHashMap<String, Character> legend = new java.util.LinkedHashMap<>();
+    Map<String, Character> legend = new LinkedHashMap<>();
+    String before = "";
+    int alike = 0;
     for (int y = 0; y < terminal.getTerminalSize().getRows(); y++) {
-      for (int x = 0; x < terminal.getTerminalSize().getColumns(); x++) {
-        String ink = ink(terminal.getCharacter(x, y));
-        all.append(legend.computeIfAbsent(ink, k -> (char) ('a' + legend.size())));
+      String row = runs(y, legend);
+      if (!row.equals(before)) {
+        append(all, alike, before);
+        alike = 0;
       }
-      all.append('\n');
+      before = row;
+      alike++;
     }
+    append(all, alike, before);
     legend.forEach((ink, letter) -> all.append(letter).append(' ').append(ink).append('\n'));
     return all.toString();
+  }
+
+  private static void append(StringBuilder all, int alike, String row) {
+    if (alike > 0) {
+      all.append(alike == 1 ? "" : alike + " x ").append(row).append('\n');
+    }
+  }
+
+  private String runs(int y, Map<String, Character> legend) {
+    StringBuilder row = new StringBuilder();
+    char before = 0;
+    int run = 0;
+    for (int x = 0; x < terminal.getTerminalSize().getColumns(); x++) {
+      String ink = ink(terminal.getCharacter(x, y));
+      char letter = legend.computeIfAbsent(ink, k -> (char) ('a' + legend.size()));
+      if (run > 0 && letter != before) {
+        row.append(before).append(run).append(' ');
+        run = 0;
+      }
+      before = letter;
+      run++;
+    }
+    return row.append(before).append(run).toString();
   }
 
   private static String ink(TextCharacter cell) {

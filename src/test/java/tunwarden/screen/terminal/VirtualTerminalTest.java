@@ -30,23 +30,24 @@ import tunwarden.units.Display;
 /** What reaches the terminal: themes, wide characters, resizing, and any keys whatever. */
 class VirtualTerminalTest {
   private static final Size SIZE = new Size(80, 24);
+  private static final List<Size> SIZES = List.of(SIZE, new Size(120, 40), new Size(200, 60));
 
   @ParameterizedTest
   @EnumSource(Theme.class)
   void everyThemePaintsEveryPageAsRecorded(Theme theme) throws IOException {
     Look look = new Look(Display.METRIC, theme, Glyphs.BLOCKS);
     StringBuilder all = new StringBuilder();
-    for (Page page : Page.values()) {
-      Virtual virtual = new Virtual(SIZE);
-      Model start = Model.start(Boards.three(Origin.REHEARSAL, Boards.NOW), look, SIZE);
-      Model model = Update.key(start, Key.typed(page.letter())).model();
-      Canvas canvas = virtual.show(model);
-      assertEquals(canvas.text(), virtual.text(), page + " in " + theme);
-      if (page != Page.VENT) {
-        all.append(page.title()).append('\n').append(virtual.paint()).append('\n');
+    for (Size size : SIZES) {
+      for (Page page : Page.values()) {
+        Virtual virtual = new Virtual(size);
+        Model start = Model.start(Boards.three(Origin.REHEARSAL, Boards.NOW), look, size);
+        Canvas canvas = virtual.show(Update.key(start, Key.typed(page.letter())).model());
+        assertEquals(canvas.text(), virtual.text(), page + " in " + theme);
+        String head = page.title() + " " + size.columns() + "x" + size.rows();
+        all.append(head).append('\n').append(virtual.paint()).append('\n');
       }
     }
-    GoldenFile.check("paint-80x24-" + theme.name().toLowerCase(Locale.ROOT), all.toString());
+    GoldenFile.check("paint-" + theme.name().toLowerCase(Locale.ROOT), all.toString());
   }
 
   @Test

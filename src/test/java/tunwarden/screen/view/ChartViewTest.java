@@ -27,7 +27,7 @@ class ChartViewTest {
 
   private static String screen(History history, Glyphs glyphs, String keys) {
     VesselBoard made = Boards.vessel("FV2", "ale", 0.5, 4, Boards.NOW, List.of());
-    VesselBoard vessel = new VesselBoard(made.assessment(), List.of(), history);
+    VesselBoard vessel = new VesselBoard(made.assessment(), List.of(), history, List.of());
     Board board = Boards.board(Origin.LIVE, Boards.NOW, List.of(vessel));
     Model model = Model.start(board, Look.USUAL.withGlyphs(glyphs), SIZE);
     for (char key : keys.toCharArray()) {
