@@ -101,7 +101,9 @@ final class KeyHints {
       hints.addAll(replay().subList(0, 2));
     }
     hints.addAll(own.subList(0, Math.min(4, own.size())));
-    hints.add(new Hint("a", "acknowledge"));
+    if (model.page() != Page.JOURNAL) {
+      hints.add(new Hint("a", "acknowledge"));
+    }
     hints.add(new Hint("u", "units"));
     hints.add(new Hint("q", "leave"));
     return hints;
