@@ -221,7 +221,7 @@ class ScriptedSessionTest {
   @Test
   void whatGoesOnIsOnTheVesselPageInLocalTime() {
     Sessions session = on(Origin.LIVE).type("/CK4").press(Key.Kind.ENTER).type("v");
-    assertTrue(session.screen().contains("leak since 08:52, 0.62 to 0.55 bar g"), session.screen());
+    assertTrue(session.screen().contains("leak since 08:52, from 0.62 bar g"), session.screen());
   }
 
   @Test

@@ -25,8 +25,8 @@ import tunwarden.vessel.Vessel;
 /** The dashboard over rows that are played at a pace: a log, or a rehearsal. */
 final class Playback {
   private static final Duration TICK = Duration.ofSeconds(10);
-  private static final DateTimeFormatter TIME_OF_DAY =
-      DateTimeFormatter.ofPattern("HH:mm", Locale.ROOT);
+  private static final DateTimeFormatter DAY_AND_MINUTE =
+      DateTimeFormatter.ofPattern("MM-dd HH:mm", Locale.ROOT);
 
   private final Show show;
   private final Front front;
@@ -135,12 +135,12 @@ final class Playback {
   }
 
   private Optional<Progress> seeking(tunwarden.replay.ReplayStatus.Seek seek) {
-    double whole = Math.max(1, Duration.between(seek.from(), seek.to()).toMillis());
-    double done = Duration.between(seek.from(), target.get().reached()).toMillis();
+    double whole = Math.max(1, Duration.between(seek.from(), seek.to()).toSeconds());
+    double done = Duration.between(seek.from(), target.get().reached()).toSeconds();
     Duration spent = Duration.ofNanos(System.nanoTime() - seek.sinceNanos());
     String what = show.origin() == Origin.REPLAY ? "going to " : "playing up to ";
     return Progress.after(
-        spent, what + TIME_OF_DAY.format(seek.to().atZone(front.zone())), done / whole);
+        spent, what + DAY_AND_MINUTE.format(seek.to().atZone(front.zone())), done / whole);
   }
 
   /** A rehearsal has no end to show on a time bar. */

@@ -22,7 +22,7 @@ public record Progress(String words, double share, Optional<Duration> left) {
     double done = Math.max(0, Math.min(1, share));
     Optional<Duration> left =
         done > LEAST_TO_JUDGE_BY
-            ? Optional.of(Duration.ofSeconds(Math.round(spent.toSeconds() * (1 - done) / done)))
+            ? Optional.of(Duration.ofMillis(Math.round(spent.toMillis() * (1 - done) / done)))
             : Optional.empty();
     return Optional.of(new Progress(words, done, left));
   }

@@ -10,31 +10,30 @@ import tunwarden.units.BadQuantityException;
 import tunwarden.units.Kind;
 import tunwarden.units.Quantities;
 
-/** Reads where to go in a replay: a time of day, a full time, or so much back or forth. */
+/**
+ * Reads where to go in a replay: a time of day, a full time, or so much back or forth. Where a long
+ * log ends may not be known yet, so that a time after it is taken as it is: it leads to the end.
+ */
 final class SeekTime {
+  /** A hundred years, s. */
+  private static final double FURTHEST_S = 3.2e9;
+
   private SeekTime() {}
 
   /**
-   * The moment meant, kept within the log.
+   * The moment meant, not before the log begins.
    *
    * @throws BadQuantityException when the text is no time
    */
   static Instant parse(String text, ReplayStatus replay, ZoneId zone) {
     Instant meant = text.matches("[+-].*") ? relative(text, replay) : absolute(text, replay, zone);
-    return clamp(meant, replay);
-  }
-
-  private static Instant clamp(Instant meant, ReplayStatus replay) {
-    if (meant.isBefore(replay.from())) {
-      return replay.from();
-    }
-    return meant.isAfter(replay.to()) ? replay.to() : meant;
+    return meant.isBefore(replay.from()) ? replay.from() : meant;
   }
 
   private static Instant relative(String text, ReplayStatus replay) {
     double seconds = Quantities.parse(text, Kind.DURATION);
-    double most = replay.to().getEpochSecond() - (double) replay.from().getEpochSecond() + 1;
-    return replay.position().plusMillis((long) (1000 * Math.max(-most, Math.min(most, seconds))));
+    double kept = Math.max(-FURTHEST_S, Math.min(FURTHEST_S, seconds));
+    return replay.position().plusMillis((long) (1000 * kept));
   }
 
   private static Instant absolute(String text, ReplayStatus replay, ZoneId zone) {

@@ -13,16 +13,15 @@ import tunwarden.units.Display;
 final class Happenings {
   private Happenings() {}
 
-  /** What goes on with a vessel at this moment: {@code leak since 09:14, 0.62 to 0.55 bar g}. */
+  /** What goes on with a vessel at this moment: {@code leak since 09:14, from 0.62 bar g}. */
   static List<String> goingOn(VesselBoard vessel, Board board, Display units) {
     return vessel.goingOn().stream().map(event -> words(event, board, units)).toList();
   }
 
   private static String words(Event event, Board board, Display units) {
     String what = event.kind().word().replace('-', ' ');
-    String from = units.pressureNumber(event.fromPaGauge());
-    String change = from + " to " + units.gauge(event.toPaGauge());
-    return what + " since " + Words.when(event.time(), board) + ", " + change;
+    String since = what + " since " + Words.when(event.time(), board);
+    return since + ", from " + units.gauge(event.fromPaGauge());
   }
 
   /** Events of a vessel from the replay and from the journal, in no order. */

@@ -1,5 +1,6 @@
 package tunwarden.screen.view;
 
+import java.util.List;
 import java.util.Optional;
 import tunwarden.alarm.Alarm;
 import tunwarden.alarm.AlarmState;
@@ -12,21 +13,23 @@ final class JournalView {
   private static final int TIME = 15;
   private static final int VESSEL = 9;
   private static final int KIND = 24;
-  private static final int FULL_ROWS = 4;
+  private static final int MOST_FULL_ROWS = 7;
 
   private JournalView() {}
 
   static void draw(Canvas canvas, Area area, Model model) {
     JournalRows rows = JournalRows.of(model.board(), model.journal().filter());
     drawHead(canvas, area, model, rows);
-    int shown = area.rows() - 1 - FULL_ROWS;
     int chosen = Math.min(model.journal().row(), Math.max(0, rows.size() - 1));
+    List<String> full = rows.size() == 0 ? List.of() : full(model, rows, chosen, area.columns());
+    int fullRows = Math.min(MOST_FULL_ROWS, full.size() + 1);
+    int shown = area.rows() - 1 - fullRows;
     int first = Math.max(0, Math.min(chosen - shown / 2, rows.size() - shown));
     for (int i = 0; i < Math.min(shown, rows.size() - first); i++) {
       drawRow(canvas, area, area.y() + 1 + i, model, rows, first + i, first + i == chosen);
     }
     if (rows.size() > 0) {
-      drawFull(canvas, area.below(area.rows() - FULL_ROWS), model, rows, chosen);
+      drawFull(canvas, area.below(area.rows() - fullRows), full);
     }
   }
 
@@ -109,17 +112,18 @@ final class JournalView {
   }
 
   /** The chosen row, unshortened. */
-  private static void drawFull(
-      Canvas canvas, Area area, Model model, JournalRows rows, int chosen) {
-    canvas.fill(area.x(), area.y(), area.columns(), "─", Role.DIM);
-    Optional<Alarm> alarm = rows.alarm(chosen);
+  private static List<String> full(Model model, JournalRows rows, int chosen, int columns) {
     String text =
-        alarm
+        rows.alarm(chosen)
             .map(a -> a.text() + " " + a.action())
             .orElseGet(() -> rows.entries().get(chosen - rows.alarms().size()).text());
+    return Words.wrap(told(text, model), columns - 4);
+  }
+
+  private static void drawFull(Canvas canvas, Area area, List<String> lines) {
+    canvas.fill(area.x(), area.y(), area.columns(), "─", Role.DIM);
     int y = area.y() + 1;
-    String turned = told(text, model);
-    for (String line : Words.wrap(turned, area.columns() - 4)) {
+    for (String line : lines) {
       if (y < area.bottom()) {
         canvas.put(area.x() + 2, y++, line, Role.NORMAL);
       }

@@ -24,7 +24,9 @@ final class ReplayBar {
     int x = canvas.put(0, y, state, replay.paused() ? Role.ORIGIN : Role.STRONG);
     x = canvas.put(x + 1, y, canvas.columns() / 4, replay.log() + " ", Role.NORMAL);
     x = canvas.put(x, y, Words.dayAndMinute(replay.from(), board.zone()) + " ", Role.DIM);
-    String to = " " + Words.dayAndMinute(replay.to(), board.zone()) + " ";
+    // Until a log has been read once, where it ends is not known.
+    String more = board.progress().isPresent() ? "… " : " ";
+    String to = " " + Words.dayAndMinute(replay.to(), board.zone()) + more;
     int end = canvas.putRight(canvas.columns(), y, to, Role.DIM);
     int width = end - x;
     if (width < 8) {
