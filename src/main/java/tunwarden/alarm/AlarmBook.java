@@ -202,10 +202,13 @@ public final class AlarmBook {
 
   private Folded folded(String vessel, Page next, List<Transition> out, Instant at) {
     int raised = 0;
+    int chatter = 0;
     for (Transition transition : out) {
-      raised += transition.annunciates() ? 1 : 0;
+      boolean told = transition.annunciates();
+      raised += told ? 1 : 0;
+      chatter += told && transition.alarm().chattering() ? 1 : 0;
     }
-    AlarmCounts counted = counts.count(raised, at);
+    AlarmCounts counted = counts.count(raised, chatter, at);
     if (next == page(vessel) && counted == counts) {
       return new Folded(this, List.of());
     }

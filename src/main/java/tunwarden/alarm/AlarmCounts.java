@@ -10,13 +10,15 @@ import java.util.List;
  * begins above ten in ten minutes and ends below five (ISA-18.2 and EEMUA 191, from memory).
  *
  * @param raised alarms raised since the book was begun
+ * @param chattered those of them that came and went faster than a person can follow
  * @param floods floods since then
  * @param flood whether one is going on
  * @param recent when the latest were raised, at most {@link #MOST_KEPT}
  */
-public record AlarmCounts(long raised, long floods, boolean flood, List<Instant> recent) {
+public record AlarmCounts(
+    long raised, long chattered, long floods, boolean flood, List<Instant> recent) {
   /** Nothing yet. */
-  public static final AlarmCounts ZERO = new AlarmCounts(0, 0, false, List.of());
+  public static final AlarmCounts ZERO = new AlarmCounts(0, 0, 0, false, List.of());
 
   static final int MOST_KEPT = 64;
   private static final Duration WINDOW = Duration.ofMinutes(10);
@@ -28,8 +30,12 @@ public record AlarmCounts(long raised, long floods, boolean flood, List<Instant>
     recent = List.copyOf(recent);
   }
 
-  /** Counts what was raised at {@code at} and forgets what is older than the window. */
-  AlarmCounts count(int more, Instant at) {
+  /**
+   * Counts what was raised at {@code at} and forgets what is older than the window.
+   *
+   * @param chatter how many of the raised chatter
+   */
+  AlarmCounts count(int more, int chatter, Instant at) {
     if (more == 0 && recent.isEmpty()) {
       return this;
     }
@@ -48,6 +54,7 @@ public record AlarmCounts(long raised, long floods, boolean flood, List<Instant>
     if (more == 0 && newest.size() == recent.size()) {
       return this;
     }
-    return new AlarmCounts(raised + more, floods + (now && !flood ? 1 : 0), now, newest);
+    long begun = now && !flood ? 1 : 0;
+    return new AlarmCounts(raised + more, chattered + chatter, floods + begun, now, newest);
   }
 }

@@ -24,6 +24,7 @@ final class AlarmBookJson {
   static ObjectNode write(AlarmBook book) {
     ObjectNode node = JsonNodeFactory.instance.objectNode();
     node.put("raised", book.counts().raised());
+    node.put("chattered", book.counts().chattered());
     node.put("floods", book.counts().floods());
     node.put("flood", book.counts().flood());
     times(node.putArray("recent"), book.counts().recent());
@@ -46,6 +47,7 @@ final class AlarmBookJson {
     AlarmCounts counts =
         new AlarmCounts(
             node.path("raised").asLong(),
+            node.path("chattered").asLong(),
             node.path("floods").asLong(),
             node.path("flood").asBoolean(),
             times(node.path("recent")));

@@ -9,6 +9,7 @@ import java.net.http.HttpResponse;
 import java.time.Duration;
 import java.util.Optional;
 import java.util.Set;
+import javax.net.ssl.SSLContext;
 import tunwarden.units.BadInputException;
 
 /** Posts the message as JSON over HTTPS; over plain HTTP only to this computer. */
@@ -20,11 +21,7 @@ public final class WebhookChannel implements Channel {
   private final URI uri;
   private final Optional<Secret> token;
   private final Duration answer;
-  private final HttpClient client =
-      HttpClient.newBuilder()
-          .connectTimeout(CONNECT)
-          .followRedirects(HttpClient.Redirect.NEVER)
-          .build();
+  private final HttpClient client;
 
   /**
    * A webhook.
@@ -33,10 +30,11 @@ public final class WebhookChannel implements Channel {
    * @throws BadInputException when the address is neither HTTPS nor of this computer
    */
   public WebhookChannel(URI uri, Optional<Secret> token) {
-    this(uri, token, ANSWER);
+    this(uri, token, ANSWER, Optional.empty());
   }
 
-  WebhookChannel(URI uri, Optional<Secret> token, Duration answer) {
+  /** With other certificates trusted than those of the system, if given. */
+  WebhookChannel(URI uri, Optional<Secret> token, Duration answer, Optional<SSLContext> trust) {
     boolean fit =
         "https".equals(uri.getScheme())
             || "http".equals(uri.getScheme()) && HERE.contains(uri.getHost());
@@ -47,6 +45,10 @@ public final class WebhookChannel implements Channel {
     this.uri = uri;
     this.token = token;
     this.answer = answer;
+    HttpClient.Builder builder =
+        HttpClient.newBuilder().connectTimeout(CONNECT).followRedirects(HttpClient.Redirect.NEVER);
+    trust.ifPresent(builder::sslContext);
+    this.client = builder.build();
   }
 
   @Override

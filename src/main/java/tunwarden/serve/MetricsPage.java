@@ -20,6 +20,7 @@ import java.util.OptionalDouble;
 import java.util.function.Function;
 import tunwarden.alarm.Alarm;
 import tunwarden.alarm.AlarmBook;
+import tunwarden.alarm.AlarmCounts;
 import tunwarden.alarm.AlarmState;
 import tunwarden.assess.Assessment;
 import tunwarden.assess.Observed;
@@ -60,6 +61,7 @@ final class MetricsPage {
     metrics.add(gauge("reading_age_seconds", "Age of the newest pressure.", all, a -> age(a, now)));
     metrics.add(readings(served));
     metrics.add(alarms(served.book().get(), all));
+    metrics.addAll(counts(served.book().get().counts()));
     metrics.addAll(recorder(served.recorder().get()));
     ByteArrayOutputStream out = new ByteArrayOutputStream();
     writer.write(out, new MetricSnapshots(metrics), EscapingScheme.UNDERSCORE_ESCAPING);
@@ -125,6 +127,25 @@ final class MetricsPage {
       }
     }
     return builder.build();
+  }
+
+  private static List<MetricSnapshot> counts(AlarmCounts counts) {
+    return List.of(
+        CounterSnapshot.builder()
+            .name("tunwarden_alarms_raised")
+            .help("Alarms raised.")
+            .dataPoint(counted(counts.raised()))
+            .build(),
+        CounterSnapshot.builder()
+            .name("tunwarden_alarms_chattered")
+            .help("Alarms raised the third time in a minute, or more often.")
+            .dataPoint(counted(counts.chattered()))
+            .build(),
+        CounterSnapshot.builder()
+            .name("tunwarden_alarm_floods")
+            .help("Times that alarms came faster than a person can follow.")
+            .dataPoint(counted(counts.floods()))
+            .build());
   }
 
   private static List<MetricSnapshot> recorder(Served.RecorderFigures figures) {

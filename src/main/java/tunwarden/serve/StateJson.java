@@ -34,6 +34,8 @@ final class StateJson {
     }
     alarms(node.putArray("alarms"), book.alarms(AlarmBook.STATION));
     node.put("alarms_raised", book.counts().raised());
+    node.put("alarms_chattered", book.counts().chattered());
+    node.put("alarm_floods", book.counts().floods());
     node.put("alarm_flood", book.counts().flood());
     return node;
   }

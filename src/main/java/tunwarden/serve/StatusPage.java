@@ -60,6 +60,11 @@ final class StatusPage {
         .append(time(served.clock().instant().toString()))
         .append(", refreshes every " + REFRESH_S + " s</header>");
     ailments(page, served.ailments().get());
+    if (book.counts().flood()) {
+      page.append("<div class=\"alarm caution open\"><b>flood</b> ")
+          .append(
+              "Alarms come faster than a person can follow; begin with the first vessel.</div>");
+    }
     alarms(page, book.alarms(AlarmBook.STATION));
     page.append("<main>");
     served.state().assessments().stream()
@@ -182,6 +187,7 @@ final class StatusPage {
           .append(alarm.priority().word())
           .append(": ")
           .append(Html.escape(alarm.kind().word()))
+          .append(alarm.chattering() ? ", chattering" : "")
           .append("</b> <span class=\"soft\">")
           .append(Html.escape(alarm.state().word()))
           .append(alarm.shelvedUntil().map(end -> " until " + time(end.toString())).orElse(""))

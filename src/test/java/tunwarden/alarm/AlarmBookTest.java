@@ -351,6 +351,7 @@ class AlarmBookTest {
       take(book.report(AlarmKind.DISK, false, "", second(10 * i + 5)));
     }
     assertTrue(book.alarms().get(0).chattering());
+    assertEquals(1, book.counts().chattered(), "the third in a minute");
     for (int i = 0; i < 12; i++) {
       take(book.fold(Assessments.of("V" + i).at(100).pressure(Quality.PORT_GONE).build()));
     }

@@ -60,7 +60,7 @@ final class CrashChild {
     say("R " + n + " " + now.toEpochMilli());
     if (n % 3 == 0) {
       JournalEntry entry = JournalEntry.station(now, JournalEntry.ALARM, String.valueOf(n));
-      AlarmCounts counts = new AlarmCounts(n, 0, false, List.of());
+      AlarmCounts counts = new AlarmCounts(n, 0, 0, false, List.of());
       AlarmBook book = AlarmBook.restored(AlarmSettings.DEFAULT, List.of(), counts);
       recorder.write(List.of(entry), new SavedState(now, book, Map.of())::bytes);
     }

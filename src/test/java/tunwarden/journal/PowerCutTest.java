@@ -107,7 +107,7 @@ class PowerCutTest {
 
   /** A book in which so many alarms were raised. */
   private static AlarmBook bookAfter(int raised) {
-    AlarmCounts counts = new AlarmCounts(raised, 0, false, List.of());
+    AlarmCounts counts = new AlarmCounts(raised, 0, 0, false, List.of());
     return AlarmBook.restored(AlarmSettings.DEFAULT, List.of(), counts);
   }
 

@@ -8,6 +8,8 @@ import static org.junit.jupiter.api.Assumptions.assumeTrue;
 
 import com.fasterxml.jackson.databind.ObjectMapper;
 import com.sun.net.httpserver.HttpServer;
+import com.sun.net.httpserver.HttpsConfigurator;
+import com.sun.net.httpserver.HttpsServer;
 import java.io.IOException;
 import java.net.InetAddress;
 import java.net.InetSocketAddress;
@@ -20,6 +22,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.CopyOnWriteArrayList;
+import javax.net.ssl.SSLContext;
 import org.junit.jupiter.api.AfterEach;
 import org.junit.jupiter.api.BeforeEach;
 import org.junit.jupiter.api.Test;
@@ -124,8 +127,41 @@ class ChannelsTest {
           exchange.close();
         });
     long begun = System.nanoTime();
-    failure(new WebhookChannel(uri().resolve("/slow"), Optional.empty(), Duration.ofMillis(300)));
+    failure(
+        new WebhookChannel(
+            uri().resolve("/slow"), Optional.empty(), Duration.ofMillis(300), Optional.empty()));
     assertTrue(System.nanoTime() - begun < 4_000_000_000L);
+  }
+
+  @Test
+  void aWebhookGoesOverHttpsToAServerThatProvesItsName() throws Exception {
+    TestCertificate certificate = TestCertificate.make(folder.resolve("localhost.p12"));
+    HttpsServer secure =
+        HttpsServer.create(new InetSocketAddress(InetAddress.getLoopbackAddress(), 0), 0);
+    secure.setHttpsConfigurator(new HttpsConfigurator(certificate.serving()));
+    secure.createContext(
+        "/",
+        exchange -> {
+          bodies.add(new String(exchange.getRequestBody().readAllBytes(), StandardCharsets.UTF_8));
+          exchange.sendResponseHeaders(204, -1);
+          exchange.close();
+        });
+    secure.start();
+    try {
+      int port = secure.getAddress().getPort();
+      URI named = URI.create("https://localhost:" + port + "/alarm");
+      Optional<SSLContext> trust = Optional.of(certificate.trusting());
+      Duration patience = Duration.ofSeconds(20);
+      new WebhookChannel(named, Optional.empty(), patience, trust).send(message());
+      assertEquals(1, bodies.size());
+      assertTrue(bodies.get(0).contains("FV2: instrument silent"));
+      failure(new WebhookChannel(named, Optional.empty()));
+      URI otherName = URI.create("https://127.0.0.1:" + port + "/alarm");
+      failure(new WebhookChannel(otherName, Optional.empty(), patience, trust));
+      assertEquals(1, bodies.size(), "nothing is sent to a server that cannot prove its name");
+    } finally {
+      secure.stop(0);
+    }
   }
 
   @Test

@@ -10,20 +10,13 @@ import com.icegreen.greenmail.util.GreenMailUtil;
 import com.icegreen.greenmail.util.ServerSetup;
 import jakarta.mail.internet.MimeMessage;
 import java.io.IOException;
-import java.io.InputStream;
 import java.net.InetAddress;
 import java.net.ServerSocket;
-import java.nio.charset.StandardCharsets;
-import java.nio.file.Files;
 import java.nio.file.Path;
-import java.security.KeyStore;
 import java.util.List;
 import java.util.Optional;
-import java.util.concurrent.TimeUnit;
-import javax.net.ssl.KeyManagerFactory;
 import javax.net.ssl.SSLContext;
 import javax.net.ssl.SSLSocketFactory;
-import javax.net.ssl.TrustManagerFactory;
 import org.junit.jupiter.api.AfterAll;
 import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
@@ -31,7 +24,6 @@ import org.junit.jupiter.api.io.TempDir;
 
 /** E-mail against a real SMTP server over TLS, with a certificate made for the test. */
 class MailChannelTest {
-  private static final String STORE_PASSWORD = "changeit";
   private static final String USER = "cellar";
   private static final String PASSWORD = "figs-and-quinces";
 
@@ -43,9 +35,9 @@ class MailChannelTest {
   @BeforeAll
   static void start() throws Exception {
     Path store = folder.resolve("localhost.p12");
-    makeCertificate(store);
+    TestCertificate certificate = TestCertificate.make(store);
     System.setProperty("greenmail.tls.keystore.file", store.toString());
-    System.setProperty("greenmail.tls.keystore.password", STORE_PASSWORD);
+    System.setProperty("greenmail.tls.keystore.password", TestCertificate.PASSWORD);
     mail =
         new GreenMail(
             new ServerSetup[] {
@@ -53,21 +45,8 @@ class MailChannelTest {
             });
     mail.setUser("cellar@brine.example", USER, PASSWORD);
     mail.start();
-    trusting = trust(store);
-    serving = serve(store);
-  }
-
-  private static SSLContext serve(Path store) throws Exception {
-    KeyStore keys = KeyStore.getInstance("PKCS12");
-    try (InputStream in = Files.newInputStream(store)) {
-      keys.load(in, STORE_PASSWORD.toCharArray());
-    }
-    KeyManagerFactory managers =
-        KeyManagerFactory.getInstance(KeyManagerFactory.getDefaultAlgorithm());
-    managers.init(keys, STORE_PASSWORD.toCharArray());
-    SSLContext context = SSLContext.getInstance("TLS");
-    context.init(managers.getKeyManagers(), null, null);
-    return context;
+    trusting = certificate.trusting().getSocketFactory();
+    serving = certificate.serving();
   }
 
   private static ServerSetup setup(String protocol) {
@@ -81,50 +60,6 @@ class MailChannelTest {
     mail.stop();
     System.clearProperty("greenmail.tls.keystore.file");
     System.clearProperty("greenmail.tls.keystore.password");
-  }
-
-  private static void makeCertificate(Path store) throws Exception {
-    Process keytool =
-        new ProcessBuilder(
-                Path.of(System.getProperty("java.home"), "bin", "keytool").toString(),
-                "-genkeypair",
-                "-alias",
-                "test",
-                "-keyalg",
-                "EC",
-                "-dname",
-                "CN=localhost",
-                "-ext",
-                "SAN=dns:localhost",
-                "-validity",
-                "30",
-                "-storetype",
-                "PKCS12",
-                "-keystore",
-                store.toString(),
-                "-storepass",
-                STORE_PASSWORD)
-            .redirectErrorStream(true)
-            .start();
-    String out = new String(keytool.getInputStream().readAllBytes(), StandardCharsets.UTF_8);
-    assertTrue(keytool.waitFor(60, TimeUnit.SECONDS));
-    assertEquals(0, keytool.exitValue(), out);
-  }
-
-  private static SSLSocketFactory trust(Path store) throws Exception {
-    KeyStore keys = KeyStore.getInstance("PKCS12");
-    try (InputStream in = Files.newInputStream(store)) {
-      keys.load(in, STORE_PASSWORD.toCharArray());
-    }
-    KeyStore trusted = KeyStore.getInstance("PKCS12");
-    trusted.load(null, null);
-    trusted.setCertificateEntry("test", keys.getCertificate("test"));
-    TrustManagerFactory managers =
-        TrustManagerFactory.getInstance(TrustManagerFactory.getDefaultAlgorithm());
-    managers.init(trusted);
-    SSLContext context = SSLContext.getInstance("TLS");
-    context.init(null, managers.getTrustManagers(), null);
-    return context.getSocketFactory();
   }
 
   private static MailChannel.Account account(String host, boolean tls, String password) {

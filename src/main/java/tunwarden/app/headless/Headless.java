@@ -8,11 +8,8 @@ import java.util.HashSet;
 import java.util.List;
 import java.util.Optional;
 import java.util.Set;
-import java.util.concurrent.CompletableFuture;
 import java.util.concurrent.CountDownLatch;
-import java.util.concurrent.ExecutionException;
 import java.util.concurrent.TimeUnit;
-import java.util.concurrent.TimeoutException;
 import java.util.function.Consumer;
 import org.slf4j.Logger;
 import org.slf4j.LoggerFactory;
@@ -26,9 +23,6 @@ import tunwarden.journal.JournalReader;
 import tunwarden.journal.Recorder;
 import tunwarden.journal.disk.Disk;
 import tunwarden.journal.disk.RealDisk;
-import tunwarden.journal.request.Reply;
-import tunwarden.journal.request.Request;
-import tunwarden.journal.request.RequestBox;
 import tunwarden.notice.Channel;
 import tunwarden.notice.Notifier;
 import tunwarden.serial.ByteLinkFactory;
@@ -48,7 +42,6 @@ import tunwarden.units.BadInputException;
 public final class Headless implements AutoCloseable {
   private static final Logger LOG = LoggerFactory.getLogger(Headless.class);
   private static final Duration STALLED = Duration.ofSeconds(5);
-  private static final Duration ANSWER_WITHIN = Duration.ofSeconds(3);
 
   private final HeadlessPlan plan;
   private final ByteLinkFactory links;
@@ -61,7 +54,7 @@ public final class Headless implements AutoCloseable {
 
   private Recorder recorder;
   private Keeping keeping;
-  private RequestBox requests;
+  private RequestDesk requests;
   private AlarmKeeper alarms;
   private Optional<Server> server = Optional.empty();
   private volatile Optional<Notifier> notifier = Optional.empty();
@@ -111,9 +104,9 @@ public final class Headless implements AutoCloseable {
 
   private void begin(Cellar cellar) throws IOException {
     recorder.repairs().forEach(console);
-    requests = new RequestBox(disk, recorder.folder().requests());
     keeping = new Keeping(recorder, disk, clock, console);
     alarms = new AlarmKeeper(keeping.book(cellar), List.of(keeping));
+    requests = new RequestDesk(recorder, disk, alarms, clock);
     EventFeed events = new EventFeed(Optional.of(reader()));
     recorder.listen(events);
     recorder.listen((entries, durable) -> notifier.ifPresent(n -> n.recorded(entries, durable)));
@@ -217,7 +210,8 @@ public final class Headless implements AutoCloseable {
         Optional<String> step = clockWatch.look();
         report(AlarmKind.CLOCK, step.isPresent(), step.orElse(""));
         watching.loop().submit(() -> alarms.change(book -> book.tick(clock.instant())));
-        serveRequests();
+        Watching present = watching;
+        requests.serve(present.cellar(), present.station(), present.loop());
         if (reloadAsked || cellarWatch.hasChanged()) {
           reloadAsked = false;
           readAgain();
@@ -225,40 +219,6 @@ public final class Headless implements AutoCloseable {
       } catch (RuntimeException e) {
         LOG.error("minding goes on after a failure", e);
       }
-    }
-  }
-
-  private void serveRequests() {
-    try {
-      requests.serve(clock.instant(), this::carryOut);
-    } catch (IOException e) {
-      LOG.warn("a request could not be answered: {}", e.toString());
-    }
-  }
-
-  /** What a person asks for is done on the station's thread; the answer is waited for here. */
-  private Reply carryOut(Request request) {
-    CompletableFuture<Reply> reply = new CompletableFuture<>();
-    Watching present = watching;
-    Deeds deeds = new Deeds(alarms, present.station()::accept, recorder::write);
-    boolean taken =
-        present
-            .loop()
-            .submit(
-                () -> reply.complete(deeds.carryOut(request, present.cellar(), clock.instant())));
-    try {
-      if (!taken) {
-        return Reply.refused("the program is too busy; ask again");
-      }
-      Reply said = reply.get(ANSWER_WITHIN.toMillis(), TimeUnit.MILLISECONDS);
-      return recorder.settle(ANSWER_WITHIN)
-          ? said
-          : new Reply(said.done(), said.text() + " (not on the disk yet: it refuses)");
-    } catch (InterruptedException e) {
-      Thread.currentThread().interrupt();
-      return Reply.refused("the program is ending");
-    } catch (ExecutionException | TimeoutException e) {
-      return Reply.refused("the program did not come to it in time; look before asking again");
     }
   }
 
