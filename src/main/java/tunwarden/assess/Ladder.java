@@ -44,7 +44,11 @@ public final class Ladder {
     rungs.add(new Rung(Rung.Kind.RELIEF_SET, relief.setPaGauge(), "relief set"));
     ReliefLevels levels = ReliefLevels.of(relief);
     rungs.add(new Rung(Rung.Kind.ACCUMULATION, levels.accumulationPaGauge(), "full flow at last"));
-    rungs.add(new Rung(Rung.Kind.EARLIEST_LIFT, levels.earliestLiftPaGauge(), "earliest lift"));
+    rungs.add(
+        new Rung(
+            Rung.Kind.EARLIEST_LIFT,
+            levels.earliestLiftPaGauge(),
+            "earliest lift" + standard(relief)));
     if (levels.operatingCeilingPaGauge() > 0) {
       rungs.add(
           new Rung(
@@ -53,5 +57,14 @@ public final class Ladder {
     if (levels.lowestReseatPaGauge() > 0) {
       rungs.add(new Rung(Rung.Kind.RESEAT, levels.lowestReseatPaGauge(), "shut again at last"));
     }
+  }
+
+  /** Which standard says so, short; nothing where the person stated the tolerance. */
+  private static String standard(ReliefSetting relief) {
+    return switch (relief.rule()) {
+      case STATED -> "";
+      case ISO_4126 -> ", ISO";
+      case ASME -> ", ASME";
+    };
   }
 }

@@ -11,6 +11,7 @@ import tunwarden.estimate.Estimate.Spread;
 import tunwarden.forecast.Ensemble;
 import tunwarden.forecast.World;
 import tunwarden.forecast.vacuum.Vacuum;
+import tunwarden.physics.answer.Warming;
 import tunwarden.physics.gas.Gas;
 import tunwarden.units.BadInputException;
 import tunwarden.units.Display;
@@ -53,6 +54,7 @@ final class VacuumCheck extends AnswerCommand {
     double limit = ensemble.present().vessel().limits().vacuumOrNonePaGauge();
     List<Spread> ends = new ArrayList<>();
     if (coolK != null) {
+      refuseWarm(ensemble.present().temperatureK());
       Spread cooled = ensemble.range(world -> world.restPaGauge(coolK));
       ends.add(put(sheet, "after_cooling_bar_g", "cooled", cooled));
       sheet.assume("cooled: shut, liquid and gas at rest again at that temperature");
@@ -76,6 +78,16 @@ final class VacuumCheck extends AnswerCommand {
     }
     margin(sheet, ends, limit);
     present.model(sheet, ensemble, "");
+  }
+
+  private void refuseWarm(double nowK) {
+    if (!(coolK >= Warming.LEAST_K && coolK <= nowK)) {
+      throw new BadInputException(
+          "--cool-to: write a temperature from "
+              + Display.METRIC.temperature(Warming.LEAST_K)
+              + " to the present "
+              + Display.METRIC.temperature(nowK));
+    }
   }
 
   /** The worst of the cases against the limit, with that case's own uncertainty. */

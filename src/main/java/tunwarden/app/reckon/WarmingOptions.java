@@ -46,9 +46,11 @@ final class WarmingOptions {
               + ", where the relations hold");
     }
     Vessel described = vessel.vessel("vessel");
+    GaugeState now = state.state(described);
+    PresentOptions.refuseRelief(described, now.paGauge());
     return new Case(
         described,
-        state.state(described),
+        now,
         state.doubt(described),
         Warming.of(described.volumeM3(), described.fillM3(), described.liquid(), described.gas()),
         toK);

@@ -158,7 +158,10 @@ class ForecastReckonTest {
     "relief --relief 1bar --orifice 15mm --kd 0.6 --pressure 2bar, below the present pressure",
     "relief --relief 1bar --orifice 3m --kd 0.6 --volume 50L --fill 45L, wider than a vessel",
     "warm TANK --to 24C --time-constant 0h, above zero",
+    "warm TANK --to 24C --relief 0.8bar, below the present pressure",
+    "chill TANK --to 0C --relief 0.8bar, below the present pressure",
     "vacuum TANK, say what happens",
+    "vacuum TANK --cool-to 10C, to the present 4.0 °C",
     "vacuum TANK --draw 1900L, more than the vessel holds",
     "vent --volume 50L --fill 50L --pressure 1bar --temperature 4C --to 0bar, full to the brim",
   })

@@ -3,7 +3,7 @@ package tunwarden.forecast.vent;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.util.Optional;
-import java.util.stream.LongStream;
+import org.junit.jupiter.api.Tag;
 import org.junit.jupiter.api.Test;
 import tunwarden.estimate.Estimate.Spread;
 import tunwarden.forecast.Ensemble;
@@ -18,32 +18,52 @@ import tunwarden.vessel.ReliefOrifice;
  */
 class VentCoverageTest {
   private static final int TRIALS = 200;
+  private static final int MANY = 2000;
   private static final double LEAST_COVERED = 0.95;
 
   @Test
   void vesselsVentedAsForecastLandWithinTheRange() {
-    var trials = LongStream.range(0, TRIALS).mapToObj(VentTrial::run).toList();
-    int once = 0;
-    int rebound = 0;
-    int held = 0;
-    int seconds = 0;
-    double reboundWidth = 0;
-    for (VentTrial trial : trials) {
-      VentAnswer answer = forecast(trial);
-      once += holds(answer.once().kg(), trial.onceKg());
-      rebound += holds(answer.reboundPaGauge(), trial.reboundPaGauge());
-      held += holds(answer.followsKg(), trial.heldKg());
-      seconds += holds(answer.blowdownS().orElseThrow(), trial.seconds());
-      reboundWidth += answer.reboundPaGauge().high() - answer.reboundPaGauge().low();
+    Found found = Found.of(TRIALS);
+    assertTrue(found.once >= LEAST_COVERED * TRIALS, found.toString());
+    assertTrue(found.rebound >= LEAST_COVERED * TRIALS, found.toString());
+    assertTrue(found.held >= LEAST_COVERED * TRIALS, found.toString());
+    assertTrue(found.seconds >= LEAST_COVERED * TRIALS, found.toString());
+  }
+
+  /**
+   * Ten times as many. The simulation strays from the solubility relation by 1 % whatever the
+   * liquid; 0.75 % is stated for water, 1.5 % for beer: so of what follows from the liquid only a
+   * little less than stated is held.
+   */
+  @Test
+  @Tag("long")
+  void manyVesselsVentedAsForecastLandWithinTheRange() {
+    Found found = Found.of(MANY);
+    assertTrue(found.once >= LEAST_COVERED * MANY, found.toString());
+    assertTrue(found.rebound >= LEAST_COVERED * MANY, found.toString());
+    assertTrue(found.held >= (LEAST_COVERED - 0.015) * MANY, found.toString());
+    assertTrue(found.seconds >= LEAST_COVERED * MANY, found.toString());
+  }
+
+  /** How often the truth lay within each range, and how wide the one of the rebound was, Pa. */
+  private record Found(int of, int once, int rebound, int held, int seconds, double widthPa) {
+    static Found of(int trials) {
+      int once = 0;
+      int rebound = 0;
+      int held = 0;
+      int seconds = 0;
+      double width = 0;
+      for (int seed = 0; seed < trials; seed++) {
+        VentTrial trial = VentTrial.run(seed);
+        VentAnswer answer = forecast(trial);
+        once += holds(answer.once().kg(), trial.onceKg());
+        rebound += holds(answer.reboundPaGauge(), trial.reboundPaGauge());
+        held += holds(answer.followsKg(), trial.heldKg());
+        seconds += holds(answer.blowdownS().orElseThrow(), trial.seconds());
+        width += answer.reboundPaGauge().high() - answer.reboundPaGauge().low();
+      }
+      return new Found(trials, once, rebound, held, seconds, width / trials);
     }
-    String found =
-        String.format(
-            "of %d: at once %d, rebound %d (mean width %.0f Pa), held %d, time %d",
-            TRIALS, once, rebound, reboundWidth / TRIALS, held, seconds);
-    assertTrue(once >= LEAST_COVERED * TRIALS, found);
-    assertTrue(rebound >= LEAST_COVERED * TRIALS, found);
-    assertTrue(held >= LEAST_COVERED * TRIALS, found);
-    assertTrue(seconds >= LEAST_COVERED * TRIALS, found);
   }
 
   private static VentAnswer forecast(VentTrial trial) {
