@@ -7,6 +7,7 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.function.Consumer;
+import tunwarden.alarm.AlarmKind;
 import tunwarden.app.keeping.Keeping;
 import tunwarden.app.keeping.Signals;
 import tunwarden.config.Cellar;
@@ -65,7 +66,6 @@ public final class LiveDashboard {
     try (Recorder recorder = Recorder.open(data.get(), disk, cellar.recording(), clock)) {
       List<String> said = new ArrayList<>();
       Keeping keeping = new Keeping(recorder, disk, clock, said::add);
-      recorder.start();
       dashboard.watch(plans, front, Optional.of(new Record(recorder, keeping, said)));
     }
   }
@@ -113,6 +113,11 @@ public final class LiveDashboard {
           r.said().forEach(words -> assembly.board().write(note(words)));
         });
     try (StationLoop loop = new StationLoop(assembly.station(), clock)) {
+      record.ifPresent(
+          r -> {
+            r.recorder().watchDisk((failing, text) -> disk(failing, text, loop, assembly));
+            r.recorder().start();
+          });
       Consumer<Sample> open = loop.inlet();
       Consumer<Sample> inlet = PairGate.over(plans, sample -> take(sample, open));
       plans.forEach(plan -> ports.add(new PortRunner(plan, links, inlet, clock)));
@@ -128,6 +133,15 @@ public final class LiveDashboard {
       ports.forEach(PortRunner::close);
     }
     record.ifPresent(r -> r.keeping().keep());
+  }
+
+  /** On the recorder's thread. */
+  private void disk(boolean failing, String text, StationLoop loop, Assembly assembly) {
+    loop.submit(
+        () ->
+            assembly
+                .alarms()
+                .change(book -> book.report(AlarmKind.DISK, failing, text, clock.instant())));
   }
 
   private JournalEntry note(String words) {

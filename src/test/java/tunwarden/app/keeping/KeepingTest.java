@@ -1,6 +1,7 @@
 package tunwarden.app.keeping;
 
 import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertFalse;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
 import java.io.IOException;
@@ -69,15 +70,18 @@ class KeepingTest {
       recorder = Recorder.open(data, new RealDisk(), cellar.recording(), () -> now);
       keeping = new Keeping(recorder, new RealDisk(), () -> now, said::add);
       alarms = new AlarmKeeper(keeping.book(cellar), List.of(keeping));
-      station =
-          new Station(
-              cellar.vessels(),
-              Estimators.standard(),
-              Assembly.FORECASTS,
-              StationSettings.USUAL,
-              List.of(alarms, recorder, keeping));
+      station = over(cellar);
       keeping.resume(cellar, station, alarms);
       recorder.start();
+    }
+
+    Station over(Cellar cellar) {
+      return new Station(
+          cellar.vessels(),
+          Estimators.standard(),
+          Assembly.FORECASTS,
+          StationSettings.USUAL,
+          List.of(alarms, recorder, keeping));
     }
 
     /** Readings every ten seconds, rising. */
@@ -174,6 +178,27 @@ class KeepingTest {
     Files.writeString(file, CELLAR.replace("1800 L", "1700 L"));
     try (Life again = new Life()) {
       assertTrue(again.said().contains("starts afresh; its description has changed."), again::said);
+    }
+  }
+
+  @Test
+  void aChangedFileKeepsWhatIsKnownUnlessTheEstimateRestsOnTheChange() throws IOException {
+    try (Life life = new Life()) {
+      life.watch(60);
+      Estimate before = life.estimate();
+      Cellar old = CellarFile.read(file);
+      Files.writeString(file, CELLAR.replace("1.5 bar", "1.8 bar"));
+      Cellar limits = CellarFile.read(file);
+      Station second = life.over(limits);
+      life.keeping.goOver(old, life.station, limits, second);
+      assertEquals(before, second.checkpoint().states().get("FV2").estimate().orElseThrow());
+      assertFalse(life.said().contains("afresh; its description"), life::said);
+      Files.writeString(file, CELLAR.replace("1800 L", "1700 L"));
+      Cellar fill = CellarFile.read(file);
+      Station third = life.over(fill);
+      life.keeping.goOver(limits, second, fill, third);
+      assertTrue(third.checkpoint().states().get("FV2").estimate().isEmpty());
+      assertTrue(life.said().contains("afresh; its description has changed"), life::said);
     }
   }
 
