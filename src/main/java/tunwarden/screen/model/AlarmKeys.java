@@ -30,8 +30,7 @@ final class AlarmKeys {
     Alarm alarm = meant.get();
     if (alarm.priority() == Priority.HIGH) {
       Prompt prompt =
-          Prompt.about(
-              alarm, Prompt.Purpose.ACKNOWLEDGE, name(alarm) + ": say in a word what is done");
+          Prompt.about(alarm, Prompt.Purpose.ACKNOWLEDGE, name(alarm) + ": what is done");
       return Optional.of(Turn.to(model.edit().ask(prompt).done()));
     }
     return Optional.of(Turn.asking(model, desk -> desk.acknowledge(alarm, "")));

@@ -102,7 +102,7 @@ final class Answers {
         Prompt.about(
                 alarm,
                 Prompt.Purpose.SHELVE_UNTIL,
-                "Shelve " + AlarmKeys.name(alarm) + " for how long (30 min, at most 24 h)")
+                "Shelve " + AlarmKeys.name(alarm) + " for (30 min, most 24 h)")
             .carrying(reason);
     return Turn.to(model.edit().ask(next).done());
   }

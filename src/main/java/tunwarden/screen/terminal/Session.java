@@ -48,6 +48,7 @@ final class Session {
   private final AtomicReference<Model> model;
   private final Object wake = new Object();
   private final Thread drawing = new Thread(this::drawUntilOver, "screen");
+  private volatile Board seen;
   private volatile boolean repaint;
   private volatile boolean over;
   private volatile RuntimeException failure;
@@ -61,7 +62,8 @@ final class Session {
     this.desk = desk;
     this.options = options;
     Size size = size(screen.getTerminalSize());
-    this.model = new AtomicReference<>(Model.start(latest.get(), options.look(), size));
+    this.seen = latest.get();
+    this.model = new AtomicReference<>(Model.start(seen, options.look(), size));
     drawing.setDaemon(true);
   }
 
@@ -118,7 +120,8 @@ final class Session {
     if (key.is(Key.Kind.REPAINT)) {
       repaint = true;
     }
-    Turn turn = Update.key(model.get().withBoard(latest.get()), key);
+    // What a key means is decided by what the person has seen, not by what came in since.
+    Turn turn = Update.key(model.get().withBoard(seen), key);
     Model next = turn.model();
     for (Request request : turn.requests()) {
       String said = request.of(desk);
@@ -168,6 +171,7 @@ final class Session {
     Size size = size(screen.getTerminalSize());
     Model now = model.get().withBoard(board).withSize(size);
     frames.show(now, whole);
+    seen = board;
   }
 
   private static long beat(Board board) {

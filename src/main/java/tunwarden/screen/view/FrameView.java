@@ -16,6 +16,9 @@ import tunwarden.screen.model.Prompt;
  * What stands around every page: header, alarm strip, and the bottom line with keys or a question.
  */
 final class FrameView {
+  /** Columns kept for the answer beside a long question. */
+  private static final int LEAST_ANSWER = 16;
+
   private FrameView() {}
 
   /** Draws the frame and returns what is left for the page. */
@@ -151,10 +154,12 @@ final class FrameView {
     drawLine(canvas, y, "", Role.ASK);
     String tail = prompt.purpose().isYesOrNo() ? "  y yes   n no " : "  Enter take   Esc leave ";
     int end = canvas.putRight(canvas.columns(), y, tail, Role.ASK);
-    int x = canvas.put(1, y, end * 2 / 3, prompt.question(), Role.ASK);
     if (prompt.purpose().isYesOrNo()) {
+      canvas.put(1, y, end - 1, prompt.question(), Role.ASK);
       return;
     }
+    int room = Math.max(end * 2 / 3, end - LEAST_ANSWER);
+    int x = canvas.put(1, y, room, prompt.question(), Role.ASK);
     x = canvas.put(x, y, ": ", Role.ASK);
     String text = prompt.text();
     while (canvas.width(text) > Math.max(1, end - x - 1)) {
