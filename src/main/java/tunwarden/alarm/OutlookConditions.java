@@ -16,7 +16,7 @@ final class OutlookConditions {
   /**
    * The likely time alone would let a vessel of which little is known lift unannounced; the early
    * edge of its range within the whole limit would cry wolf each time that range is wide. It counts
-   * within half the limit: on simulated vessels no false alarm more than the likely time gives.
+   * within half the limit: on simulated vessels that gave no false alarm more than the likely time.
    */
   private static final int EARLY = 2;
 

@@ -17,6 +17,7 @@ import tunwarden.assess.Rung;
 import tunwarden.estimate.Estimate;
 import tunwarden.forecast.Outlook;
 import tunwarden.forecast.TimeRange;
+import tunwarden.forecast.WhatIf;
 import tunwarden.units.Constants;
 import tunwarden.units.Unit;
 
@@ -96,11 +97,33 @@ final class StateJson {
 
   private static void outlook(ObjectNode node, Outlook outlook) {
     outlook.timeToLift().ifPresent(range -> time(node.putObject("time_to_lift"), range));
+    outlook
+        .soonestToLift()
+        .ifPresent(soonest -> node.put("soonest_to_lift_s", soonest.toSeconds()));
     number(node, "horizon_s", outlook.horizon().toSeconds());
     number(node, "lift_temperature_c", celsius(outlook.liftTemperatureK()));
     number(node, "liquid_full_c", celsius(outlook.liquidFullK()));
     ArrayNode cautions = node.putArray("cautions");
     outlook.cautions().forEach(caution -> cautions.add(caution.text()));
+    ArrayNode whatIfs = node.putArray("what_if");
+    outlook.whatIfs().forEach(each -> whatIf(whatIfs.addObject(), each));
+  }
+
+  private static void whatIf(ObjectNode node, WhatIf each) {
+    node.put("kind", each.kind().word());
+    node.put("words", each.words());
+    each.paGauge()
+        .ifPresent(
+            pa -> {
+              number(node, "bar_g", Unit.BAR.fromSi(pa.middle()));
+              number(node, "low_bar_g", Unit.BAR.fromSi(pa.low()));
+              number(node, "high_bar_g", Unit.BAR.fromSi(pa.high()));
+            });
+    each.toLift().ifPresent(range -> time(node.putObject("time_to_lift"), range));
+    node.put("detail", each.detail());
+    node.put("assumes", each.assumes());
+    ArrayNode cautions = node.putArray("cautions");
+    each.cautions().forEach(caution -> cautions.add(caution.text()));
   }
 
   private static void time(ObjectNode node, TimeRange range) {

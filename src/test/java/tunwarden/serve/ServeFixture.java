@@ -17,8 +17,12 @@ import tunwarden.alarm.AlarmSettings;
 import tunwarden.alarm.Assessments;
 import tunwarden.assess.Assessment;
 import tunwarden.assess.Ladder;
+import tunwarden.estimate.Estimate;
 import tunwarden.estimate.Outcome;
 import tunwarden.estimate.Step;
+import tunwarden.forecast.Caution;
+import tunwarden.forecast.TimeRange;
+import tunwarden.forecast.WhatIf;
 import tunwarden.journal.JournalEntry;
 import tunwarden.journal.JournalLines;
 import tunwarden.reading.Quality;
@@ -55,6 +59,20 @@ final class ServeFixture {
     }
   }
 
+  private static final WhatIf FAILED_SUPPLY =
+      new WhatIf(
+          WhatIf.Kind.SUPPLY,
+          "supply fails open",
+          Optional.of(new Estimate.Spread(8e5, 8e5, 8e5)),
+          Optional.of(
+              new TimeRange(
+                  Duration.ofSeconds(14),
+                  Duration.ofSeconds(11),
+                  Optional.of(Duration.ofSeconds(17)))),
+          "the setting of 1.50 bar g in 17 s",
+          "nothing lets gas out",
+          List.of(new Caution(true, "Shut the supply at its source first.")));
+
   private static Vessel titled(String id, String title) {
     Vessel plain = Assessments.vessel(id);
     return new Vessel(
@@ -82,7 +100,7 @@ final class ServeFixture {
             bare.temperature(),
             bare.estimate(),
             bare.margins(),
-            bare.outlook(),
+            bare.outlook().with(List.of(FAILED_SUPPLY)),
             Ladder.of(bare.vessel().limits(), bare.pressure(), bare.outlook()),
             bare.events(),
             bare.notes());

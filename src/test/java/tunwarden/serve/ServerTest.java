@@ -47,6 +47,11 @@ class ServerTest {
     assertEquals(0.08, fv2.path("relief_margin_bar").asDouble(), 1e-9);
     assertEquals("margin-low", fv2.path("alarms").get(0).path("alarm").asText());
     assertEquals("good", fv2.path("pressure_quality").asText());
+    JsonNode supply = fv2.path("what_if").get(0);
+    assertEquals("supply", supply.path("kind").asText());
+    assertEquals(8, supply.path("bar_g").asDouble());
+    assertEquals(14, supply.path("time_to_lift").path("middle_s").asLong());
+    assertEquals(1, supply.path("cautions").size());
     assertEquals("bad", state.path("vessels").get(2).path("pressure_quality").asText());
   }
 
