@@ -2,6 +2,7 @@ package tunwarden.report.hindsight;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.OptionalDouble;
 import tunwarden.estimate.Estimate;
 import tunwarden.forecast.Present;
 import tunwarden.physics.liquid.LiquidKind;
@@ -20,6 +21,15 @@ final class Search {
   /** Headspaces tried, in standard deviations of the stated fill. */
   private static final double[] ROOMS = {-2.2, -1.1, 0, 1.1, 2.2};
 
+  /** Headspaces over the stated one that a wrong size or fill would make. */
+  private static final double[] OTHER_ROOMS = {0.1, 0.2, 0.35, 0.6, 1.7, 3, 5, 10, 20};
+
+  /** In standard deviations of the stated fill. */
+  private static final double FAR = 3;
+
+  /** By so much the log of the likelihood must be greater. Judgement. */
+  private static final double FAR_BETTER = Double.parseDouble(System.getProperty("far", "8"));
+
   /** Classes of air beyond what was stated, Pa: middle, spread and chance. Judgement. */
   private static final double[] AIR_PA = {500, 25_000, 65_000};
 
@@ -30,7 +40,7 @@ final class Search {
   private static final double MADE = 1;
 
   private static final double LITTLE_MADE = 0.02;
-  private static final double FERMENTS_CHANCE = 0.1;
+  private static final double FERMENTS_CHANCE = 0.03;
 
   /** What a liquid holds at first, of what it would at rest; a richer one is possible. */
   private static final double START_SHARE = 0.6;
@@ -94,6 +104,41 @@ final class Search {
     return new Band(course, outcomes);
   }
 
+  /**
+   * Headspace over the stated one, where another one explains the log far better than any that the
+   * accuracy of the fill allows; empty where the stated one will do, or nothing tells.
+   */
+  OptionalDouble otherRoom() {
+    HeadspaceFilter filter = new HeadspaceFilter(course, shutAtFirst());
+    double stated = Double.NEGATIVE_INFINITY;
+    for (double room : ROOMS) {
+      stated = Math.max(stated, best(filter, roomSigma * room));
+    }
+    double other = Double.NEGATIVE_INFINITY;
+    double share = 1;
+    for (double each : OTHER_ROOMS) {
+      boolean allowed = Math.abs(Math.log(each)) < FAR * roomSigma;
+      double log = allowed ? stated : best(filter, Math.log(each));
+      share = log > other ? each : share;
+      other = Math.max(other, log);
+    }
+    return other - stated > FAR_BETTER ? OptionalDouble.of(share) : OptionalDouble.empty();
+  }
+
+  private double best(HeadspaceFilter filter, double lnRoom) {
+    double best = Double.NEGATIVE_INFINITY;
+    for (int i = 0; i < RATES; i++) {
+      double lnRate = usualLnRate + 3 * lnRateSigma * (2.0 * i / (RATES - 1) - 1);
+      for (int air = 0; air < AIR_PA.length; air++) {
+        best = Math.max(best, filter.run(assumption(lnRate, lnRoom, 0, air, false)).log());
+        if (ferments) {
+          best = Math.max(best, filter.run(assumption(lnRate, lnRoom, 0, air, true)).log());
+        }
+      }
+    }
+    return best;
+  }
+
   /** Chance that the headspace is shut where nothing is known. Judgement. */
   private double shutAtFirst() {
     return switch (vessel.closure()) {
@@ -109,9 +154,9 @@ final class Search {
       double lnRate = from + (to - from) * i / (RATES - 1);
       for (double room : ROOMS) {
         for (int air = 0; air < AIR_PA.length; air++) {
-          assumptions.add(assumption(lnRate, room, air, false));
+          assumptions.add(assumption(lnRate, roomSigma * room, room, air, false));
           if (ferments) {
-            assumptions.add(assumption(lnRate, room, air, true));
+            assumptions.add(assumption(lnRate, roomSigma * room, room, air, true));
           }
         }
       }
@@ -119,7 +164,8 @@ final class Search {
     return assumptions;
   }
 
-  private Assumption assumption(double lnRate, double room, int air, boolean making) {
+  private Assumption assumption(
+      double lnRate, double lnRoom, double room, int air, boolean making) {
     double rate = (lnRate - usualLnRate) / lnRateSigma;
     double madePerStep = course.stepS / DAY_S * (making ? MADE : LITTLE_MADE);
     double startSd = START_SD_SHARE * course.rest[0];
@@ -130,7 +176,7 @@ final class Search {
             + Math.log(making ? FERMENTS_CHANCE : 1 - FERMENTS_CHANCE);
     return new Assumption(
         Math.exp(lnRate),
-        Math.exp(roomSigma * room),
+        Math.exp(lnRoom),
         new double[] {0, start, start, AIR_PA[air], making ? madePerStep : 0},
         new double[] {0, sq(startSd), sq(startSd), sq(AIR_SD_PA[air]), sq(madePerStep)},
         logPrior,

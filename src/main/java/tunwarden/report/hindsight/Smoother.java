@@ -17,7 +17,7 @@ public final class Smoother {
   private static final int LEAST_BINS = 12;
 
   /** From this share of weight on, what the look back does not go by is too likely. */
-  private static final double MOST_ODD = 0.3;
+  private static final double MOST_ODD = 0.2;
 
   private static final double PURE = 0.99;
 

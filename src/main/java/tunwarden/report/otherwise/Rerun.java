@@ -36,6 +36,7 @@ public final class Rerun {
   private static final double VENT_M2 = 5e-5;
   private static final double FOLLOWS_AT_ONCE_S = 1;
   private static final double GAS_WARMING_S = 90;
+  private static final double LOST_KG = 1e-9;
 
   private final Analysis analysis;
   private final Belief belief;
@@ -44,6 +45,7 @@ public final class Rerun {
   private final Vessel vessel;
   private int lifts;
   private boolean wasLifting;
+  private double lostKg;
   private double peakPa = Double.NEGATIVE_INFINITY;
 
   private Rerun(Analysis analysis, Belief belief, WhatIf whatIf) {
@@ -90,7 +92,7 @@ public final class Rerun {
         venting = venting && simulated.paGauge() > whatIf.vent().get().toPaGauge();
         simulated.valves().vent(venting ? VENT_M2 : 0);
         simulated.advance(Math.min(1, seconds - done));
-        look(simulated);
+        look(simulated, venting);
       }
       points.put(bins.middleMs(bin), simulated.paGauge());
     }
@@ -182,12 +184,15 @@ public final class Rerun {
     simulated.valves().making(bins.made(bin));
   }
 
-  private void look(SimulatedVessel simulated) {
+  /** A wide valve may open and reseat within a step: what was lost tells. */
+  private void look(SimulatedVessel simulated, boolean venting) {
     peakPa = Math.max(peakPa, simulated.paGauge());
-    if (simulated.isLifting() && !wasLifting) {
+    boolean blew = !venting && simulated.lostKg() - lostKg > LOST_KG;
+    if (blew && !wasLifting) {
       lifts++;
     }
-    wasLifting = simulated.isLifting();
+    wasLifting = blew;
+    lostKg = simulated.lostKg();
   }
 
   private List<String> sentences(double lostKg, TreeMap<Long, Double> points) {

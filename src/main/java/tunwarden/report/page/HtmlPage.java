@@ -47,7 +47,7 @@ public final class HtmlPage {
   private void chapter(Chapter chapter, boolean several) {
     Telling telling = new Telling(chapter.zone());
     if (several) {
-      html.element("h1", chapter.title());
+      html.element("h1", "chapter", chapter.title());
     }
     html.element("p", "from", times(chapter));
     html.open("div", "lead");

@@ -8,7 +8,7 @@ import tunwarden.report.analysis.Bins;
 
 /** One plot over the time of the log: frame, axes, courses, bands, levels, events. */
 final class Plot {
-  static final int WIDTH = 960;
+  static final int WIDTH = 780;
   private static final int LEFT = 62;
   private static final int RIGHT = 62;
   private static final int TOP = 26;

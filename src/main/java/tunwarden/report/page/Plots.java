@@ -47,7 +47,7 @@ final class Plots {
     double highest = near ? Math.max(top, Unit.BAR.fromSi(vessel.getAsDouble())) : top;
     Plot plot =
         new Plot(
-            new Plot.Shape(400, 4, "Pressure and temperature over time", "pressure, bar gauge"),
+            new Plot.Shape(375, 4, "Pressure and temperature over time", "pressure, bar gauge"),
             bins,
             time,
             Math.min(0, least),
@@ -136,7 +136,7 @@ final class Plots {
     }
     Plot plot =
         new Plot(
-            new Plot.Shape(280, 0, "Dissolved CO2 over time", "dissolved CO2, g/L"),
+            new Plot.Shape(235, 0, "Dissolved CO2 over time", "dissolved CO2, g/L"),
             bins,
             time,
             least,

@@ -17,14 +17,15 @@ final class Style {
       th, td { text-align: left; vertical-align: top; padding: 0.6mm 2mm 0.6mm 0;
         border-bottom: 0.2mm solid #ccc; } td.n, th.n { text-align: right; white-space: nowrap; }
       td.t { white-space: nowrap; } tr, figure, .piece { break-inside: avoid; }
-      h2, h3 { break-after: avoid; } figure { margin: 2mm 0; }
+      h2, h3, h2 + p { break-after: avoid; } h1.chapter { break-before: page; }
+      figure { margin: 2mm 0; }
       figcaption { font-size: 9pt; color: #444; }
-      .caution { border: 0.5mm solid #111; padding: 1mm 3mm; margin: 2mm 0; }
+      .caution { break-inside: avoid; border: 0.5mm solid #111; padding: 1mm 3mm; margin: 2mm 0; }
       code { font-size: 8.5pt; overflow-wrap: anywhere; }
       .columns { display: grid; grid-template-columns: 1fr 1fr; gap: 4mm; }
       svg { width: 100%; height: auto; display: block; }
       .frame { fill: none; stroke: #888; } .grid { stroke: #e4e4e4; }
-      text { font: 11px "Liberation Sans", Arial, sans-serif; fill: #222; }
+      text { font: 11.5px "Liberation Sans", Arial, sans-serif; fill: #222; }
       .tick { fill: #555; } .second { fill: #9a5b00; } .axis { font-weight: bold; }
       .level { font-size: 10.5px; fill: #333; } .number { font-size: 9px; fill: #333; }
       .pressure { fill: none; stroke: #111; stroke-width: 1.6; }

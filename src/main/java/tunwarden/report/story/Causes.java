@@ -15,6 +15,7 @@ import tunwarden.vessel.Vessel;
 /** What may have driven the pressure, each with the evidence for and against it. */
 final class Causes {
   private static final Display DISPLAY = Telling.DISPLAY;
+  private static final double YEAST_RESTS_K = 278.15;
   private static final double NOTICED_K = 0.5;
   private static final double NOTICED_PA = 3000;
   private static final double EXPLAINS = 0.6;
@@ -107,8 +108,8 @@ final class Causes {
               + DISPLAY.pressureDifference(rise)
               + " while the temperature stayed");
     }
-    if (Math.min(first.temperatureK(), peak.temperatureK()) < 278.15) {
-      cause.against("below 5 °C most yeasts rest (common practice, no source)");
+    if (analysis.signals().temperature().greatest() < YEAST_RESTS_K) {
+      cause.against("it was never above 5 °C, where most yeasts rest (common practice, no source)");
     }
     if (rise <= NOTICED_PA) {
       cause.against("the pressure did not rise");

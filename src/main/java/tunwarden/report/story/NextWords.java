@@ -20,11 +20,12 @@ final class NextWords {
     ReportRow closest = analysis.extremes().closest();
     if (closest != null) {
       sentences.add(
-          "Closest to the relief valve's earliest conforming opening: "
-              + DISPLAY.pressureDifference(closest.marginPa())
-              + " at "
+          "The reading with the gauge's uncertainty came closest to the relief valve's earliest"
+              + " conforming opening at "
               + telling.at(closest.time())
-              + ", the gauge's uncertainty taken off.");
+              + ": "
+              + DISPLAY.pressureDifference(Math.abs(closest.marginPa()))
+              + (closest.marginPa() < 0 ? " above it." : " below it."));
     }
     if (next == Outlook.NONE) {
       sentences.add("The last rows do not allow a forecast.");
@@ -35,8 +36,7 @@ final class NextWords {
     }
     for (Projection projection : next.projections()) {
       sentences.add(
-          "Had it been left alone after the last row, "
-              + projection.words()
+          after(projection.words())
               + ": "
               + DISPLAY.gauge(projection.paGauge())
               + " ("
@@ -55,7 +55,17 @@ final class NextWords {
     return sentences;
   }
 
+  /** Whether the future is one of waiting or of doing something. */
+  private static String after(String words) {
+    return words.startsWith("in ")
+        ? "Had it been left alone after the last row, " + words
+        : "Had it been " + words.replace(", shut", " and shut") + " after the last row";
+  }
+
   private static String toLift(TimeRange range) {
+    if (range.middle().toSeconds() < 60) {
+      return "At the trend of the last rows the valve could open at any moment.";
+    }
     return "At the trend of the last rows the valve could open after "
         + Telling.duration(range.middle())
         + " (from "
