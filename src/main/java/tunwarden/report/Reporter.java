@@ -19,6 +19,7 @@ import tunwarden.report.analysis.Analyst;
 import tunwarden.report.analysis.ReportRow;
 import tunwarden.report.analysis.RowSpool;
 import tunwarden.report.analysis.Sifted;
+import tunwarden.report.hindsight.OtherRoom;
 import tunwarden.report.hindsight.Smoother;
 import tunwarden.report.otherwise.Rerun;
 import tunwarden.report.otherwise.WhatIf;
@@ -135,7 +136,7 @@ public final class Reporter {
     return new Chapter(
         source.title(),
         analysis,
-        Story.of(analysis, outlook(analysis), zone),
+        Story.of(analysis, outlook(analysis), OtherRoom.share(analysis), zone),
         belief,
         settings.page() ? CloserLook.at(source, analysis) : List.of(),
         otherwise,

@@ -69,7 +69,7 @@ final class SmootherScore {
     each.append(line(name + (smoother.isEmpty() ? " (none)" : ""), one)).append('\n');
   }
 
-  private static LogRow logRow(Row row, String id, double laboratoryU95) {
+  static LogRow logRow(Row row, String id, double laboratoryU95) {
     Instant time = START.plusMillis((long) (1000 * row.seconds()));
     List<Sample> samples = new ArrayList<>();
     samples.add(Reading.good(time, id, Quantity.TEMPERATURE, row.kelvin()));

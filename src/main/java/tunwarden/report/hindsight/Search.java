@@ -2,7 +2,6 @@ package tunwarden.report.hindsight;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.OptionalDouble;
 import tunwarden.estimate.Estimate;
 import tunwarden.forecast.Present;
 import tunwarden.physics.liquid.LiquidKind;
@@ -20,15 +19,6 @@ final class Search {
 
   /** Headspaces tried, in standard deviations of the stated fill. */
   private static final double[] ROOMS = {-2.2, -1.1, 0, 1.1, 2.2};
-
-  /** Headspaces over the stated one that a wrong size or fill would make. */
-  private static final double[] OTHER_ROOMS = {0.1, 0.2, 0.35, 0.6, 1.7, 3, 5, 10, 20};
-
-  /** In standard deviations of the stated fill. */
-  private static final double FAR = 3;
-
-  /** By so much the log of the likelihood must be greater. Judgement. */
-  private static final double FAR_BETTER = Double.parseDouble(System.getProperty("far", "8"));
 
   /** Classes of air beyond what was stated, Pa: middle, spread and chance. Judgement. */
   private static final double[] AIR_PA = {500, 25_000, 65_000};
@@ -104,39 +94,20 @@ final class Search {
     return new Band(course, outcomes);
   }
 
-  /**
-   * Headspace over the stated one, where another one explains the log far better than any that the
-   * accuracy of the fill allows; empty where the stated one will do, or nothing tells.
-   */
-  OptionalDouble otherRoom() {
+  /** The best that any rate makes of a headspace, given as the logarithm of its share. */
+  double best(double lnRoom) {
     HeadspaceFilter filter = new HeadspaceFilter(course, shutAtFirst());
-    double stated = Double.NEGATIVE_INFINITY;
-    for (double room : ROOMS) {
-      stated = Math.max(stated, best(filter, roomSigma * room));
-    }
-    double other = Double.NEGATIVE_INFINITY;
-    double share = 1;
-    for (double each : OTHER_ROOMS) {
-      boolean allowed = Math.abs(Math.log(each)) < FAR * roomSigma;
-      double log = allowed ? stated : best(filter, Math.log(each));
-      share = log > other ? each : share;
-      other = Math.max(other, log);
-    }
-    return other - stated > FAR_BETTER ? OptionalDouble.of(share) : OptionalDouble.empty();
-  }
-
-  private double best(HeadspaceFilter filter, double lnRoom) {
     double best = Double.NEGATIVE_INFINITY;
     for (int i = 0; i < RATES; i++) {
       double lnRate = usualLnRate + 3 * lnRateSigma * (2.0 * i / (RATES - 1) - 1);
-      for (int air = 0; air < AIR_PA.length; air++) {
-        best = Math.max(best, filter.run(assumption(lnRate, lnRoom, 0, air, false)).log());
-        if (ferments) {
-          best = Math.max(best, filter.run(assumption(lnRate, lnRoom, 0, air, true)).log());
-        }
-      }
+      best = Math.max(best, filter.run(assumption(lnRate, lnRoom, 0, 0, false)).log());
     }
     return best;
+  }
+
+  /** Standard deviation of the headspace by the accuracy of the fill, in logarithms. */
+  double roomSigma() {
+    return roomSigma;
   }
 
   /** Chance that the headspace is shut where nothing is known. Judgement. */

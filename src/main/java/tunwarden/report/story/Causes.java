@@ -1,7 +1,9 @@
 package tunwarden.report.story;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import java.util.OptionalDouble;
 import tunwarden.estimate.Estimate;
 import tunwarden.estimate.EventKind;
 import tunwarden.estimate.Mode;
@@ -32,14 +34,18 @@ final class Causes {
     this.peak = analysis.extremes().peak();
   }
 
-  static List<Hypothesis> of(Analysis analysis, Telling telling) {
+  static List<Hypothesis> of(Analysis analysis, OptionalDouble otherRoom, Telling telling) {
     Causes causes = new Causes(analysis, telling);
-    return List.of(
-        causes.warming(),
-        causes.fermentation(),
-        causes.supply(),
-        causes.opening(),
-        causes.sensor());
+    List<Hypothesis> all =
+        new ArrayList<>(
+            List.of(
+                causes.warming(),
+                causes.fermentation(),
+                causes.supply(),
+                causes.opening(),
+                causes.sensor()));
+    otherRoom.ifPresent(share -> all.add(causes.otherRoom(share)));
+    return all;
   }
 
   /** What a shut vessel at rest would show at the temperature of the peak. */
@@ -176,6 +182,20 @@ final class Causes {
       cause.against("the signal moved with its usual noise throughout");
     }
     return cause;
+  }
+
+  private Hypothesis otherRoom(double share) {
+    Vessel vessel = analysis.vessel();
+    double litres = 1000 * (vessel.volumeM3() - vessel.fillM3());
+    return new Hypothesis("another size or fill than stated")
+        .speaksFor(
+            String.format(
+                Locale.ROOT,
+                "a headspace of about %.0f L (to a factor of two) instead of %.0f L explains far"
+                    + " better how the pressure answers warmth and comes back after an opening",
+                share * litres,
+                litres))
+        .against("gas being made, or much air left in the headspace, can look alike");
   }
 
   private static String change(double kelvin) {

@@ -2,6 +2,7 @@ package tunwarden.report.story;
 
 import java.time.ZoneId;
 import java.util.List;
+import java.util.OptionalDouble;
 import tunwarden.forecast.Outlook;
 import tunwarden.report.analysis.Analysis;
 
@@ -28,13 +29,14 @@ public record Story(
    *
    * @param analysis what the log says
    * @param next the futures as of its last row
+   * @param otherRoom headspace over the stated one that would explain the log far better, if any
    * @param zone the zone times are told in
    */
-  public static Story of(Analysis analysis, Outlook next, ZoneId zone) {
+  public static Story of(Analysis analysis, Outlook next, OptionalDouble otherRoom, ZoneId zone) {
     Telling telling = new Telling(zone);
     return new Story(
-        new SummaryWords(analysis, telling).sentences(),
-        Causes.of(analysis, telling),
+        new SummaryWords(analysis, otherRoom, telling).sentences(),
+        Causes.of(analysis, otherRoom, telling),
         new SensorWords(analysis, telling).sentences(),
         NextWords.of(analysis, next, telling),
         Unknowns.of(analysis),

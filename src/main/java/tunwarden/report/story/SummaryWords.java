@@ -18,11 +18,13 @@ final class SummaryWords {
   private static final Display DISPLAY = Telling.DISPLAY;
 
   private final Analysis analysis;
+  private final OptionalDouble otherRoom;
   private final Telling telling;
   private final List<String> sentences = new ArrayList<>();
 
-  SummaryWords(Analysis analysis, Telling telling) {
+  SummaryWords(Analysis analysis, OptionalDouble otherRoom, Telling telling) {
     this.analysis = analysis;
+    this.otherRoom = otherRoom;
     this.telling = telling;
   }
 
@@ -36,6 +38,11 @@ final class SummaryWords {
     movements(EventKind.LEAK, "lost gas slowly", "left");
     lost();
     belief();
+    if (otherRoom.isPresent()) {
+      sentences.add(
+          "The stated size and fill do not explain the pressures well: see What may have driven it,"
+              + " and check them before anything else here is used.");
+    }
     return sentences;
   }
 
