@@ -7,7 +7,7 @@ import tunwarden.units.Display;
  * When alarms come and go. The defaults are meant to be left alone by a small producer.
  *
  * @param marginLowPa relief margin below which to warn, Pa
- * @param timeToRelief time to the earliest lift below which to warn
+ * @param timeToRelief likely time to the earliest lift below which to warn; of its early edge, half
  * @param stale age from which an instrument counts as silent; the assessment is given it
  * @param liquidFullWithinK warming that would fill the vessel with liquid, K, below which to warn
  * @param manner deadbands, delays and shelves

@@ -3,11 +3,20 @@ package tunwarden.forecast;
 import static org.junit.jupiter.api.Assertions.assertEquals;
 import static org.junit.jupiter.api.Assertions.assertTrue;
 
+import java.io.IOException;
+import java.nio.file.Path;
 import java.time.Instant;
 import java.util.OptionalDouble;
 import java.util.Random;
 import java.util.function.DoubleUnaryOperator;
 import org.junit.jupiter.api.Test;
+import tunwarden.reading.Quantity;
+import tunwarden.reading.Reading;
+import tunwarden.reading.Sample;
+import tunwarden.replay.LogFile;
+import tunwarden.replay.LogOptions;
+import tunwarden.replay.LogRow;
+import tunwarden.replay.RowSource;
 
 /** Newton's law of cooling: T = Ta − (Ta − T0) exp(−t/τ), a textbook form. */
 class WarmingHabitTest {
@@ -66,5 +75,25 @@ class WarmingHabitTest {
     habit = follow(habit, 24 * HOUR, 3, t -> 277.15);
     habit = follow(habit, 28 * HOUR, 4, newton(277.15, 15 * HOUR));
     assertEquals(15 * HOUR, habit.learnt().orElseThrow().timeS().middle(), HOUR);
+  }
+
+  /** The shipped log is simulated, by other code, with a time constant of 9 h towards 24 °C. */
+  @Test
+  void theShippedDayOfCoolingLostTeachesWhatItWasMadeWith() throws IOException {
+    WarmingHabit habit = WarmingHabit.NONE;
+    Instant until = Instant.parse("2026-03-02T11:00:00Z");
+    try (RowSource log =
+        LogFile.open(Path.of("replay-logs/cooling-lost.csv"), LogOptions.NONE).open()) {
+      for (LogRow row = log.next(); row != null && row.time().isBefore(until); row = log.next()) {
+        for (Sample sample : row.samples()) {
+          if (sample instanceof Reading read && read.quantity() == Quantity.TEMPERATURE) {
+            habit = habit.seen(read.time(), read.value(), OptionalDouble.of(AMBIENT_K));
+          }
+        }
+      }
+    }
+    WarmingHabit.Learnt learnt = habit.learnt().orElseThrow();
+    assertEquals(9 * HOUR, learnt.timeS().middle(), 0.3 * HOUR);
+    assertTrue(learnt.timeS().low() < 9 * HOUR && learnt.timeS().high() > 9 * HOUR);
   }
 }
