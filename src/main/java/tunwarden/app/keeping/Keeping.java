@@ -161,8 +161,14 @@ public final class Keeping implements Sink, AlarmKeeper.Listener {
     return now.isBefore(last) || Duration.between(last, now).compareTo(every) >= 0;
   }
 
-  /** Keeps everything as it is now; at the latest with the recorder's next flush. */
+  /**
+   * Keeps everything as it is now; at the latest with the recorder's next flush. Before {@link
+   * #resume} there is nothing to keep.
+   */
   public void keep() {
+    if (station == null) {
+      return;
+    }
     bookKept = clock.instant();
     recorder.keepState(state(alarms.book()));
     keepEstimates(bookKept);

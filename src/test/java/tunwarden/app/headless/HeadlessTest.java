@@ -203,6 +203,21 @@ class HeadlessTest {
   }
 
   @Test
+  void aStartThatFailsSaysWhyAndLetsTheFolderGo() throws Exception {
+    headless.close();
+    String sound = Files.readString(cellar);
+    Files.writeString(
+        cellar,
+        sound
+            + "[notice.webhook]\nurl = \"https://hook.example/x\"\ntoken-file = \"no-such-file\"\n");
+    String words = assertThrows(BadInputException.class, this::begin).getMessage();
+    assertTrue(words.contains("no-such-file"), words);
+    Files.writeString(cellar, sound);
+    headless = begin();
+    await("metrics", () -> says("/metrics", "gauge{vessel=\"FV2\"}"));
+  }
+
+  @Test
   void theFolderCannotBeUsedTwice() {
     String words = assertThrows(BadInputException.class, this::begin).getMessage();
     assertTrue(words.contains("in use by another"), words);
