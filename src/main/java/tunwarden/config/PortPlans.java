@@ -4,6 +4,7 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.HashMap;
 import java.util.LinkedHashMap;
 import java.util.LinkedHashSet;
 import java.util.List;
@@ -25,6 +26,7 @@ public final class PortPlans {
   private final Cellar cellar;
   private final Path folder;
 
+  private final Map<String, Profile> profiles = new HashMap<>();
   private final List<Misfit> misfits = new ArrayList<>();
 
   /** What does not fit, and the keys it stands under. */
@@ -135,7 +137,8 @@ public final class PortPlans {
   }
 
   private Profile profile(Instrument instrument) {
-    Profile found = Profiles.find(instrument.device(), folder);
+    Profile found =
+        profiles.computeIfAbsent(instrument.device(), device -> Profiles.find(device, folder));
     Optional<Integer> baud = instrument.baud();
     return baud.isEmpty() ? found : atSpeed(found, baud.get());
   }
