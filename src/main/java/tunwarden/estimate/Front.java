@@ -13,9 +13,17 @@ package tunwarden.estimate;
  *     none
  * @param flow the flow that goes on; null for none
  * @param intervalS usual time between readings
+ * @param flowS when gas was last seen passing a valve; negative infinity for never
  */
 record Front(
-    double bankS, double sumPa, int count, Point last, Point doubt, Flow flow, double intervalS) {
+    double bankS,
+    double sumPa,
+    int count,
+    Point last,
+    Point doubt,
+    Flow flow,
+    double intervalS,
+    double flowS) {
 
   /** A reading. */
   record Point(double atS, double paGauge) {}
@@ -39,7 +47,7 @@ record Front(
   }
 
   static Front start(Point first) {
-    return new Front(first.atS(), 0, 0, first, null, null, 10);
+    return new Front(first.atS(), 0, 0, first, null, null, 10, Double.NEGATIVE_INFINITY);
   }
 
   /** Adds a believed reading to the block. */
@@ -47,19 +55,20 @@ record Front(
     double gap = point.atS() - last.atS();
     double usual = intervalS + 0.1 * (Math.min(gap, 600) - intervalS);
     return new Front(
-        bankS, sumPa + point.paGauge(), count + 1, point, null, flow, Math.max(usual, 0.5));
+        bankS, sumPa + point.paGauge(), count + 1, point, null, flow, Math.max(usual, 0.5), flowS);
   }
 
   Front emptied(double atS) {
-    return new Front(atS, 0, 0, last, doubt, flow, intervalS);
+    return new Front(atS, 0, 0, last, doubt, flow, intervalS, flowS);
   }
 
   Front doubting(Point point) {
-    return new Front(bankS, sumPa, count, last, point, flow, intervalS);
+    return new Front(bankS, sumPa, count, last, point, flow, intervalS, flowS);
   }
 
+  /** With a flow that goes on, or that has just ended when there is none. */
   Front flowing(Flow other) {
-    return new Front(bankS, sumPa, count, last, null, other, intervalS);
+    return new Front(bankS, sumPa, count, last, null, other, intervalS, last.atS());
   }
 
   double meanPa() {

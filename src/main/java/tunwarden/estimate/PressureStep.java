@@ -24,6 +24,7 @@ final class PressureStep {
   private static final double LEAST_MOVE = 0.7;
   private static final double QUICK_S = 10;
   private static final double COLD_EXPONENT = 0.93;
+  private static final double RECOVERY_S = 900;
   private static final int REST_READINGS = 2;
 
   private final BankState state;
@@ -161,8 +162,16 @@ final class PressureStep {
     if (flowing) {
       variance = noise.sd() * noise.sd() + 1e4;
     }
-    bank = filter.step(bank, new Look(dt, kelvin, absolute, variance, flowing));
+    double swing = Math.abs(state.senses().warmingKPerS()) * dt;
+    bank = filter.step(bank, new Look(dt, kelvin, swing, absolute, variance, stage(flowing, atS)));
     front = front.emptied(atS);
+  }
+
+  private Look.Stage stage(boolean flowing, double atS) {
+    if (flowing) {
+      return Look.Stage.FLOWING;
+    }
+    return atS - front.flowS() < RECOVERY_S ? Look.Stage.RECOVERING : Look.Stage.CALM;
   }
 
   /** The reading after a surprising one decides: a spike, or gas on the move. */
@@ -170,6 +179,7 @@ final class PressureStep {
     Point doubt = front.doubt();
     if (Math.abs(off) <= limit) {
       book = spike(doubt);
+      noise = noise.aside(doubt.paGauge());
       front = front.doubting(null);
       ordinary();
       return;

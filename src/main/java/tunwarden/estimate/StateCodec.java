@@ -17,7 +17,7 @@ import tunwarden.vessel.Vessel;
  * kept as well. A checksum covers the whole and the vessel's description.
  */
 public final class StateCodec {
-  private static final int MAGIC = 0x54574531;
+  private static final int MAGIC = 0x54574532;
   private static final int ROOM = 16_384;
 
   private StateCodec() {}

@@ -91,11 +91,12 @@ final class StateReader {
     double bankS = number();
     double sum = number();
     double interval = number();
+    double flowed = number();
     int count = in.getInt();
     Front.Point last = point();
     Front.Point doubt = point();
     Front.Flow flow = flag() ? new Front.Flow(point(), point(), point(), in.getInt()) : null;
-    return new Front(bankS, sum, count, last, doubt, flow, interval);
+    return new Front(bankS, sum, count, last, doubt, flow, interval, flowed);
   }
 
   Estimate estimate() {

@@ -84,7 +84,7 @@ final class StateWriter {
   }
 
   void front(Front f) {
-    numbers(f.bankS(), f.sumPa(), f.intervalS());
+    numbers(f.bankS(), f.sumPa(), f.intervalS(), f.flowS());
     out.putInt(f.count());
     point(f.last());
     point(f.doubt());

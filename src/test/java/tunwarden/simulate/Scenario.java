@@ -4,6 +4,8 @@ import static tunwarden.simulate.World.BAR;
 import static tunwarden.simulate.World.DAY;
 import static tunwarden.simulate.World.HOUR;
 
+import tunwarden.vessel.Vessel;
+
 /** The situations the estimator must master, each drawn afresh from a seed. */
 public enum Scenario {
   /** Settled, then warmed or chilled, sealed. */
@@ -71,10 +73,18 @@ public enum Scenario {
     }
   };
 
+  /** Where a drink begins to freeze, roughly; the simulator knows no ice. */
+  private static final double FREEZING_K = 272.5;
+
   abstract Script script(World world);
 
   World world(long seed) {
     return new World(seed, 0, 0, this == FERMENTING);
+  }
+
+  /** The vessel of a seed as its user describes it. */
+  public Vessel vessel(long seed) {
+    return world(seed * 31 + ordinal()).described();
   }
 
   /** The log of this situation drawn from a seed. */
@@ -91,7 +101,7 @@ public enum Scenario {
 
   private static Script sealedAndWarmed(World w, double paGauge) {
     double change = (w.random.nextBoolean() ? 1 : -1) * w.between(3, 14);
-    double target = Math.max(w.startK + change, 272.5);
+    double target = Math.max(w.startK + change, FREEZING_K);
     double from = w.between(0.5, 4) * HOUR;
     double pace = w.between(0.5, 6) * HOUR;
     w.tank.fill(paGauge, 0, 1);
@@ -179,8 +189,9 @@ public enum Scenario {
   }
 
   private static Script unpurged(World w) {
-    double swing = w.between(2, 6);
     double phase = w.between(0, 6.28);
+    double room = (w.startK - FREEZING_K) / (1 + Math.sin(phase));
+    double swing = Math.min(w.between(2, 6), room);
     double air = w.between(0.3, 1) * BAR;
     w.tank.transferPerS = Math.pow(10, w.between(-5.5, -3.5));
     w.tank.fill(air - 0.6 * BAR + w.between(0.8, 1.8) * BAR, air, 1);

@@ -54,7 +54,7 @@ public final class Ahead {
       } else {
         motion.sealed(filters[i], Grid.transferPerS(kept[i]), way);
       }
-      BankFilter.disturb(filters[i], mode, way, warmed);
+      Disturbance.add(filters[i], mode, way, warmed);
     }
   }
 

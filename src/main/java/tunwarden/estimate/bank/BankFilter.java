@@ -6,30 +6,18 @@ import static tunwarden.estimate.bank.Gaussian.GAS;
 import static tunwarden.estimate.bank.Gaussian.HEAT;
 import static tunwarden.estimate.bank.Gaussian.LIQUID;
 import static tunwarden.estimate.bank.Gaussian.PACE;
-import static tunwarden.estimate.bank.Gaussian.RELATION;
 import static tunwarden.estimate.bank.Gaussian.SOURCE;
 
 /** Moves a bank through time and lets it see readings. Holds no memory of its own. */
 public final class BankFilter {
   private static final double MIX_EVERY_S = 60;
-  private static final double HOUR_S = 3600;
-  private static final double DAY_S = 86_400;
 
-  /** Slow change of a pinned level or of a nearly tight headspace: 3 mbar in an hour. */
-  private static final double LEVEL_PA2_PER_S = 300.0 * 300 / HOUR_S;
+  /** Share of the evidence that counts while gas re-warms: its pace is the same at every lift. */
+  private static final double RECOVERING_TRUST = 0.2;
 
-  /** Weather and drift of the gauge: 4 mbar in a day. */
-  private static final double BIAS_PA2_PER_S = 400.0 * 400 / DAY_S;
-
-  private static final double RELATION_PER_K = 2e-6;
-  private static final double LIQUID_SHARE = 0.002;
-  private static final double SOURCE_SHARE = 0.3;
-  private static final double SOURCE_LEAST = 0.05 * Prior.MADE_SD;
-  private static final double PACE_PER_S = 0.2 * 0.2 / DAY_S;
   private static final double DRIFT_MEMORY_S = 1200;
   private static final double DRIFT_LIMIT = 3.5;
   private static final double NOT_SEEN = -1e300;
-  private static final double COLD_MEMORY_S = 180;
   private static final double ADIABATIC_EXPONENT = 0.23;
   private static final double TAIL = 6;
 
@@ -84,7 +72,10 @@ public final class BankFilter {
     if (mixes) {
       Mixer mixer = new Mixer(solubility(before));
       mixer.mix(
-          filters, weights, shaken ? prior.whenNothingFits() : prior.transitions(unmixed), shaken);
+          filters,
+          weights,
+          shaken ? prior.whenNothingFits() : prior.transitions(unmixed),
+          shaken ? Mixer.anew(behindPa(bank, look)) : Mixer.GENTLY);
       mixer.mixPaces(filters, weights, unmixed);
     }
     Bank.Setting after =
@@ -92,13 +83,27 @@ public final class BankFilter {
             look.kelvin(), look.paAbsolute(), before.fillKelvin(), mixes ? 0 : unmixed, 0);
     Passage way = passage(before, after, look.seconds());
     double[] evidence = new double[Grid.FILTERS];
-    Worker worker = new Worker(way, look, Math.abs(look.kelvin() - before.kelvin()));
+    Worker worker = new Worker(way, look);
     for (int f = 0; f < Grid.FILTERS; f++) {
       evidence[f] = weights[f] > Mixer.ASLEEP ? worker.work(filters, weights[f], f) : NOT_SEEN;
     }
-    double[] next = look.flowing() ? weights : reweigh(weights, evidence);
+    double[] next =
+        look.flowing()
+            ? weights
+            : reweigh(weights, evidence, look.recovering() ? RECOVERING_TRUST : 1);
     double drift = shaken || look.flowing() ? 0 : drift(before.drift(), worker.surprise, look);
     return new Bank(filters, next, after.withDrift(drift));
+  }
+
+  /** How far the bank's own level lies behind a reading, Pa. */
+  private double behindPa(Bank bank, Look look) {
+    double level = 0;
+    for (int f = 0; f < Grid.FILTERS; f++) {
+      double rest = bank.mean(f, GAS) + bank.mean(f, AIR);
+      double heat = Grid.modeOf(f) == Grid.HELD ? 0 : bank.mean(f, HEAT);
+      level += bank.weights[f] * (rest * (1 + heat) + bank.mean(f, BIAS));
+    }
+    return look.paAbsolute() - medium.vapourPa(look.kelvin()) - level;
   }
 
   /**
@@ -117,15 +122,17 @@ public final class BankFilter {
     private final double[] row = new double[Gaussian.STATES];
     private final Passage way;
     private final Look look;
-    private final double warmed;
     private final double dry;
     private double surprise;
 
-    Worker(Passage way, Look look, double warmed) {
+    Worker(Passage way, Look look) {
       this.way = way;
       this.look = look;
-      this.warmed = warmed;
       this.dry = look.paAbsolute() - medium.vapourPa(look.kelvin());
+    }
+
+    private Gaussian.Considered considered() {
+      return look.recovering() ? Gaussian.Considered.AND_PACE : Gaussian.Considered.CONSTANTS;
     }
 
     /** Moves, disturbs and corrects one filter; its log-likelihood comes back. */
@@ -137,37 +144,17 @@ public final class BankFilter {
       } else {
         motion.sealed(x, Grid.transferPerS(f), way);
       }
-      disturb(x, mode, way, warmed);
+      Disturbance.add(x, mode, way, look.swingK());
       if (look.flowing()) {
         flow(x, way, look);
       }
       double miss = dry - predict(x, mode, row);
       double total = x.varianceOf(row) + look.variance();
       surprise += weight * Math.max(-4, Math.min(4, miss / Math.sqrt(total)));
-      x.condition(miss, total * Math.max(1, miss * miss / (total * 25)), true);
-      bound(x, mode);
+      x.condition(miss, total * Math.max(1, miss * miss / (total * 25)), considered());
+      bound(x, f);
       x.store(filters, f * Gaussian.STRIDE);
       return logLikelihood(miss, total);
-    }
-  }
-
-  /**
-   * Noise that stands for everything the model leaves out. The level of a sealed vessel wanders
-   * exactly as that of a pinned one, liquid and headspace together, so that a constant reading
-   * speaks for neither.
-   */
-  static void disturb(Gaussian x, int mode, Passage way, double warmed) {
-    double dt = way.seconds();
-    x.addWander(1, mode == Grid.HELD ? 0 : way.solubility(), LEVEL_PA2_PER_S * dt);
-    x.addVariance(BIAS, BIAS_PA2_PER_S * dt);
-    x.addVariance(RELATION, RELATION_PER_K * warmed);
-    double liquid = LIQUID_SHARE * x.mean[LIQUID];
-    x.addVariance(LIQUID, liquid * liquid * dt / DAY_S);
-    x.addVariance(PACE, PACE_PER_S * dt);
-    Motion.soothe(x, dt, COLD_MEMORY_S);
-    if (mode != Grid.STILL) {
-      double step = SOURCE_SHARE * Math.max(Math.abs(x.mean[SOURCE]), SOURCE_LEAST);
-      x.addVariance(SOURCE, 2 * step * step * dt / DAY_S);
     }
   }
 
@@ -189,11 +176,16 @@ public final class BankFilter {
   }
 
   /** Keeps a filter in its class of transfer and out of the impossible. */
-  private static void bound(Gaussian x, int mode) {
+  private static void bound(Gaussian x, int filter) {
+    int mode = Grid.modeOf(filter);
     if (mode == Grid.MAKING) {
       x.mean[SOURCE] = Math.max(x.mean[SOURCE], 0);
     } else if (mode == Grid.LEAKING) {
       x.mean[SOURCE] = Math.min(x.mean[SOURCE], 0);
+    }
+    if (mode == Grid.HELD) {
+      double most = Prior.MOST_SURPLUS * x.mean[LIQUID] * Grid.transferPerS(filter);
+      x.limit(SOURCE, most);
     }
     double reach = 1.5;
     x.mean[PACE] = Math.max(-reach, Math.min(reach, x.mean[PACE]));
@@ -217,7 +209,7 @@ public final class BankFilter {
     return -0.5 * Math.log(total) - 0.5 * (TAIL + 1) * Math.log(1 + miss * miss / (total * TAIL));
   }
 
-  private static double[] reweigh(double[] weights, double[] evidence) {
+  private static double[] reweigh(double[] weights, double[] evidence, double trust) {
     double best = Double.NEGATIVE_INFINITY;
     for (int f = 0; f < evidence.length; f++) {
       if (weights[f] > 1e-9) {
@@ -226,7 +218,7 @@ public final class BankFilter {
     }
     double[] next = new double[weights.length];
     for (int f = 0; f < next.length; f++) {
-      next[f] = Math.max(weights[f] * Math.exp(Math.min(evidence[f] - best, 5)), 1e-30);
+      next[f] = Math.max(weights[f] * Math.exp(trust * Math.min(evidence[f] - best, 5)), 1e-30);
     }
     return Bank.normalized(next);
   }
@@ -243,17 +235,17 @@ public final class BankFilter {
       double total = x.varianceOf(row) + standardU * standardU;
       double miss = dissolved - x.mean[LIQUID];
       evidence[f] = logLikelihood(miss, total);
-      x.condition(miss, total, false);
+      x.condition(miss, total, Gaussian.Considered.NOTHING);
       x.store(filters, f * Gaussian.STRIDE);
     }
-    return new Bank(filters, reweigh(bank.weights, evidence), bank.setting);
+    return new Bank(filters, reweigh(bank.weights, evidence, 1), bank.setting);
   }
 
   /** Somebody has worked a valve: how the headspace is connected is open again. */
   public Bank valveWorked(Bank bank) {
     double[] filters = bank.filters.clone();
     double[] weights = bank.weights.clone();
-    new Mixer(solubility(bank.setting)).mix(filters, weights, prior.afterValve(), true);
+    new Mixer(solubility(bank.setting)).mix(filters, weights, prior.afterValve(), Mixer.anew(0));
     return new Bank(filters, weights, bank.setting);
   }
 }

@@ -38,9 +38,9 @@ public final class Experiment {
       x.load(bank.filters, f * Gaussian.STRIDE);
       for (int i = 0; i < PARTS; i++) {
         motion.sealed(x, Grid.transferPerS(f), way);
-        BankFilter.disturb(x, Grid.CLOSED, way, 0);
+        Disturbance.add(x, Grid.CLOSED, way, 0);
         BankFilter.predict(x, Grid.CLOSED, row);
-        x.condition(0, x.varianceOf(row) + variance, true);
+        x.condition(0, x.varianceOf(row) + variance, Gaussian.Considered.CONSTANTS);
       }
       pooled += weight * x.variance(Gaussian.LIQUID);
       total += weight;

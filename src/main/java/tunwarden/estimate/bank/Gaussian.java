@@ -98,6 +98,15 @@ final class Gaussian {
     }
   }
 
+  /** Keeps one quantity, mean and spread, within a size. */
+  void limit(int i, double most) {
+    mean[i] = Math.max(-most, Math.min(most, mean[i]));
+    double sd = Math.sqrt(variance(i));
+    if (sd > most) {
+      scaleSpread(i, most / sd);
+    }
+  }
+
   /** Fixes one quantity at a value. */
   void pin(int i, double value) {
     mean[i] = value;
@@ -165,19 +174,17 @@ final class Gaussian {
    *
    * @param innovation measured minus expected
    * @param total variance of the measurement and the combination together
-   * @param considers whether fill, relation and bias are only considered, not learnt (Schmidt's
-   *     filter, NASA TR R-135, 1962): pressures repeat too often for their small model errors to be
-   *     trusted with these
+   * @param considers what is only considered, not learnt
    */
-  void condition(double innovation, double total, boolean considers) {
+  void condition(double innovation, double total, Considered considers) {
     for (int i = 0; i < STATES; i++) {
-      boolean fixed = considers && isConsidered(i);
+      boolean fixed = considers.has(i);
       double gain = first[i] / total;
       if (!fixed) {
         mean[i] += gain * innovation;
       }
       for (int j = 0; j <= i; j++) {
-        if (fixed && isConsidered(j)) {
+        if (fixed && considers.has(j)) {
           continue;
         }
         double value = cov[i * STATES + j] - gain * first[j];
@@ -187,7 +194,21 @@ final class Gaussian {
     }
   }
 
-  private static boolean isConsidered(int i) {
-    return i == FILL || i == RELATION || i == BIAS;
+  /**
+   * Quantities that widen the belief but are not learnt (Schmidt's filter, NASA TR R-135, 1962):
+   * pressures repeat too often for their small model errors to be trusted with these.
+   */
+  enum Considered {
+    /** All are learnt. */
+    NOTHING,
+    /** Fill, relation and bias. */
+    CONSTANTS,
+    /** The pace of transfer too. */
+    AND_PACE;
+
+    boolean has(int i) {
+      boolean constant = i == FILL || i == RELATION || i == BIAS;
+      return this != NOTHING && (constant || this == AND_PACE && i == PACE);
+    }
   }
 }

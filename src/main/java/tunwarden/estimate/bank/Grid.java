@@ -1,7 +1,7 @@
 package tunwarden.estimate.bank;
 
 /**
- * The assumptions of the bank: transfer coefficient by 0.8 of a decade, air left behind in four
+ * The assumptions of the bank: transfer coefficient by 0.6 of a decade, air left behind in four
  * classes, and five ways the headspace can be connected.
  */
 public final class Grid {
@@ -23,10 +23,10 @@ public final class Grid {
   /** How many ways of connection. */
   public static final int MODES = 5;
 
-  static final int TRANSFERS = 6;
+  static final int TRANSFERS = 7;
 
   /** Spread of ln kLa within a class; neighbouring classes overlap at one spread. */
-  static final double TRANSFER_LN_SD = 0.75;
+  static final double TRANSFER_LN_SD = 0.7;
 
   static final int AIRS = 4;
   static final int FILTERS = TRANSFERS * AIRS * MODES;
@@ -36,7 +36,7 @@ public final class Grid {
 
   static {
     for (int i = 0; i < TRANSFERS; i++) {
-      TRANSFER_PER_S[i] = Math.pow(10, -7 + i * 0.8);
+      TRANSFER_PER_S[i] = Math.pow(10, -6.6 + i * 0.6);
     }
   }
 

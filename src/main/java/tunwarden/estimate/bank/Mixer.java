@@ -11,7 +11,7 @@ import static tunwarden.estimate.bank.Grid.MODES;
  */
 final class Mixer {
   private static final double KEEPS = 0.5;
-  private static final double IDLE = 0.1;
+  private static final double IDLE = 0.5;
   private static final double LEAST_SHARE = 1e-3;
 
   /** Weight below which a filter is left alone until it is born again from its neighbours. */
@@ -19,8 +19,23 @@ final class Mixer {
 
   private static final double FLOOR = 1e-30;
 
+  /** Only modes that mostly come from others are replaced. */
+  static final Birth GENTLY = new Birth(false, 0);
+
+  /**
+   * How far modes start afresh.
+   *
+   * @param anew whether the readings have left the bank: every mode but the leading one then starts
+   *     afresh from the others
+   * @param behindPa how far the level of those others lies behind the readings, Pa
+   */
+  record Birth(boolean anew, double behindPa) {}
+
+  /** Chance that a headspace still holds air when gas begins to be made under it. */
+  private static final double PURGED = 0.02;
+
   /** Time after which a vessel's transfer coefficient may well be another, s. */
-  private static final double PACE_CHANGES_S = 3 * 86_400;
+  private static final double PACE_CHANGES_S = 10 * 86_400;
 
   private final Gaussian one = new Gaussian();
   private final Gaussian into = new Gaussian();
@@ -37,22 +52,25 @@ final class Mixer {
   /**
    * Mixes every cell of the bank in place.
    *
-   * @param anew whether the readings have left the bank: a mode with little weight of its own then
-   *     starts afresh from the others
+   * @param birth how far modes start afresh
    */
-  void mix(double[] filters, double[] weights, double[][] transitions, boolean anew) {
+  void mix(double[] filters, double[] weights, double[][] transitions, Birth birth) {
     java.util.Arrays.fill(total, 0);
     for (int f = 0; f < Grid.FILTERS; f++) {
       total[Grid.modeOf(f)] += weights[f];
     }
     for (int cell = 0; cell < Grid.FILTERS; cell += MODES) {
-      mixCell(filters, weights, cell, transitions, anew);
+      mixCell(filters, weights, cell, transitions, birth);
     }
     Bank.normalized(weights);
   }
 
+  static Birth anew(double behindPa) {
+    return new Birth(true, behindPa);
+  }
+
   private void mixCell(
-      double[] filters, double[] weights, int cell, double[][] transitions, boolean anew) {
+      double[] filters, double[] weights, int cell, double[][] transitions, Birth birth) {
     double[] next = new double[MODES];
     for (int target = 0; target < MODES; target++) {
       for (int m = 0; m < MODES; m++) {
@@ -64,10 +82,11 @@ final class Mixer {
     for (int target = 0; target < MODES; target++) {
       double own = weights[cell + target] * transitions[target][target];
       boolean weak = own < KEEPS * next[target];
-      boolean idle = anew && next[target] - own > 0.01 * own && total[target] < IDLE;
+      boolean idle = birth.anew() && next[target] - own > 0.01 * own && total[target] < IDLE;
       yields[target] = (weak || idle) && next[target] > ASLEEP;
       if (yields[target]) {
         merge(filters, weights, cell, target, transitions);
+        into.addVariance(Gaussian.GAS, birth.behindPa() * birth.behindPa());
         into.store(born, target * Gaussian.STRIDE);
       }
     }
@@ -83,7 +102,7 @@ final class Mixer {
   /** Whoever makes gas has mostly swept the air out already. */
   private static double purged(int cell, int mode, int target) {
     boolean begins = target == Grid.MAKING && mode != target;
-    return begins && Grid.airOf(cell) > 0 ? 0.1 : 1;
+    return begins && Grid.airOf(cell) > 0 ? PURGED : 1;
   }
 
   /** Moment-matched mixture of what comes from the other modes. */
@@ -117,12 +136,12 @@ final class Mixer {
     one.load(filters, filter * Gaussian.STRIDE);
     boolean keeps =
         (mode == Grid.MAKING && target == Grid.HELD)
-            || (mode == Grid.HELD && target == Grid.MAKING && one.mean[Gaussian.SOURCE] > 0);
+            || (mode == Grid.HELD && target == Grid.MAKING);
     if (!keeps) {
       Prior.beginSource(one, target);
     }
     if (mode == Grid.HELD && target == Grid.MAKING) {
-      Prior.nearRest(one, solubility);
+      Prior.aboveRest(one, solubility, Grid.transferPerS(filter));
     }
   }
 

@@ -42,6 +42,16 @@ public record Noise(int count, int run, double last, double before, double scatt
     return new Noise(newCount, newRun, pa, last, newScatter, newStep);
   }
 
+  /**
+   * After a reading that was set aside as a spike: it still tells the step the gauge is read in.
+   */
+  public Noise aside(double pa) {
+    double change = Math.abs(pa - last);
+    boolean moved = run >= 1 && change > LEAST_CHANGE_PA && change <= MOST_STEP_PA;
+    double newStep = moved && (step < 0 || change < step) ? change : step;
+    return new Noise(count, run, last, before, scatter, newStep);
+  }
+
   /** Gas has passed a valve: the next reading is not compared with those before. */
   public Noise afterJump() {
     return new Noise(count, 0, last, before, scatter, step);

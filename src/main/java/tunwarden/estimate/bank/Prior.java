@@ -21,15 +21,28 @@ final class Prior {
   private static final double MAKING_KL = 5e-5;
   private static final double KL_LN_SD = 1.6;
   private static final double EVEN_SHARE = 0.8;
-  private static final double[] AIR_SHARE = {0.97, 0.01, 0.01, 0.01};
+
+  /**
+   * Chance of each class of air left behind: small enough not to widen the interval of a vessel
+   * that shows no sign of air, large enough to be found in a few hours of changing temperature.
+   */
+  private static final double[] AIR_SHARE = {0.965, 0.0117, 0.0117, 0.0116};
+
+  /** Chance that an untold vessel is held from outside when it is first seen. */
+  private static final double HELD_UNTOLD = 0.05;
+
+  private static final double MAKING_FIRST = 0.02;
 
   /** No drink follows a relation better than this, whatever the relation claims. */
   private static final double LEAST_RELATION_U = 0.013;
 
   private static final double SOLUBILITY_PER_K = 0.03;
   private static final double FIRST_READING_PA = 200;
-  private static final double MAKING_SURPLUS = 0.06;
-  private static final double MAKING_SURPLUS_SD = 0.08;
+
+  /** A fermenting drink is seldom further above rest than this share of it. */
+  static final double MOST_SURPLUS = 0.6;
+
+  private static final double SURPLUS_SD = 0.03;
   private static final double NEAR_ATMOSPHERE_PA = 8_000;
   private static final double DAY_S = 86_400;
 
@@ -72,13 +85,13 @@ final class Prior {
   }
 
   private double[] modes() {
-    double making = 0.02 * makingShare();
+    double making = MAKING_FIRST * makingShare();
     double leaking = 0.002;
     double held =
         switch (vessel.closure()) {
           case SEALED -> 0.01;
           case SUPPLY, SPUNDING, OPEN -> 0.96;
-          default -> 0.3;
+          default -> HELD_UNTOLD;
         };
     double[] modes = new double[MODES];
     modes[HELD] = held;
@@ -91,7 +104,7 @@ final class Prior {
 
   /** A drink that should not ferment may do so all the same. */
   private double makingShare() {
-    return ferments() ? 1 : 0.1;
+    return ferments() ? 1 : 0.02;
   }
 
   boolean ferments() {
@@ -142,18 +155,29 @@ final class Prior {
     }
   }
 
-  /** A drink that makes gas under a held pressure is never far from rest, a little above it. */
-  static void nearRest(Gaussian x, double solubility) {
-    double share = 1 + MAKING_SURPLUS;
-    double slope = share * solubility * Math.exp(x.mean[Gaussian.RELATION]);
+  /**
+   * A drink that makes gas under a held pressure is above rest by what it takes to drive the gas
+   * out as fast as it is made.
+   */
+  static void aboveRest(Gaussian x, double solubility, double transfer) {
+    double slope = solubility * Math.exp(x.mean[Gaussian.RELATION]);
+    double rest = slope * x.mean[Gaussian.GAS];
+    double most = MOST_SURPLUS * rest * transfer;
+    x.pin(Gaussian.SOURCE, Math.min(MADE, 0.4 * most));
+    x.addVariance(Gaussian.SOURCE, square(Math.min(MADE_SD, 0.4 * most)));
+    double surplus = x.mean[Gaussian.SOURCE] / transfer;
     double[] gas = new double[Gaussian.STATES];
     double[] liquid = new double[Gaussian.STATES];
     gas[Gaussian.GAS] = 1;
     liquid[Gaussian.GAS] = slope;
-    liquid[Gaussian.RELATION] = slope * x.mean[Gaussian.GAS];
+    liquid[Gaussian.RELATION] = rest;
+    liquid[Gaussian.SOURCE] = 1 / transfer;
+    liquid[Gaussian.PACE] = -surplus;
+    x.pin(Gaussian.PACE, 0);
+    x.addVariance(Gaussian.PACE, square(Grid.TRANSFER_LN_SD));
     x.mixRows(gas, liquid);
-    x.mean[Gaussian.LIQUID] = slope * x.mean[Gaussian.GAS];
-    x.addVariance(Gaussian.LIQUID, square(MAKING_SURPLUS_SD * x.mean[Gaussian.LIQUID]));
+    x.mean[Gaussian.LIQUID] = rest + surplus;
+    x.addVariance(Gaussian.LIQUID, square(SURPLUS_SD * rest));
   }
 
   /** The first reading fixes the sum of CO2, air and bias. */
@@ -212,7 +236,7 @@ final class Prior {
     double toHeld = vessel.closure() == Closure.SEALED ? 0.1 * slow : slow;
     double toMaking = 0.3 * slow * makingShare();
     return rows(
-        new double[] {0, toHeld, toMaking, 0.05 * slow, 0},
+        new double[] {0, toHeld, 0.1 * toMaking, 0.02 * slow, 0},
         new double[] {0, 0, 6 * toMaking, 0, 3 * slow},
         new double[] {slow, toHeld, 0, 0, 0},
         new double[] {slow, toHeld, 0, 0, 0},

@@ -26,13 +26,16 @@ public final class Reader {
         liquid.add(bank.weights[f], mean, bank.variance(f, Gaussian.LIQUID) + own * own);
       }
     }
-    if (bank.modeWeight(Grid.HELD) > 0.5) {
-      double low = Math.max(0, liquid.quantile(UNTOLD_TAIL));
-      double high = liquid.quantile(1 - UNTOLD_TAIL);
-      return finish(bank, 0.5 * (low + high), 0.5 * (high - low));
+    double middle = Math.max(0, liquid.quantile(0.5));
+    double held = bank.modeWeight(Grid.HELD);
+    if (held <= 0.5) {
+      return finish(bank, middle, liquid.halfWidth(middle, cover(bank)));
     }
-    double centre = Math.max(0, liquid.quantile(0.5));
-    return finish(bank, centre, liquid.halfWidth(centre, cover(bank)));
+    double low = Math.max(0, liquid.quantile(UNTOLD_TAIL));
+    double high = liquid.quantile(1 - UNTOLD_TAIL);
+    double untold = Math.min(1, (held - 0.5) / 0.45);
+    double centre = middle + untold * (0.5 * (low + high) - middle);
+    return finish(bank, centre, Math.max(high - centre, centre - low));
   }
 
   /** After pressure was held the prior weighs heavily, so its tails are not cut. */
