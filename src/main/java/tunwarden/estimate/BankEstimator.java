@@ -103,7 +103,7 @@ public final class BankEstimator implements Estimator {
     double atS = seconds(reading.time());
     BankState next =
         state.withSenses(state.senses().withTemperature(verdict.track(), atS, reading.value()));
-    next = WarmWatch.look(next, reading, news);
+    next = Quarrel.check(WarmWatch.look(next, reading, news), reading, news);
     return new Step(Outcome.WAITING, verdict.quality(), "", next, news);
   }
 
@@ -149,6 +149,7 @@ public final class BankEstimator implements Estimator {
     if (!verdict.usable()) {
       return new Step(Outcome.REJECTED, verdict.quality(), verdict.reason(), judged, news);
     }
+    judged = Quarrel.check(judged, reading, news);
     if (!judged.senses().temperature().seen()) {
       return new Step(Outcome.WAITING, verdict.quality(), "no temperature yet", judged, news);
     }

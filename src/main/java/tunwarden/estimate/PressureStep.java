@@ -23,6 +23,7 @@ final class PressureStep {
   private static final double JUMP_SDS = 6;
   private static final double LEAST_MOVE = 0.7;
   private static final double QUICK_S = 10;
+  private static final double GENTLE_PA_PER_S = 60;
   private static final double COLD_EXPONENT = 0.93;
   private static final double RECOVERY_S = 900;
   private static final int REST_READINGS = 2;
@@ -98,13 +99,24 @@ final class PressureStep {
       flowOn(off);
     } else if (front.doubt() != null) {
       resolveDoubt(off, limit);
-    } else if (Math.abs(off) > limit) {
+    } else if (Math.abs(off) > limit
+        && !isGentleRise(point)
+        && !noise.mayBeOneStep(point.paGauge())) {
       front = front.doubting(point);
       remark = "far from what was expected; waiting for the next reading";
       estimate = Beliefs.carried(estimate, time, point.paGauge(), kelvin);
     } else {
       ordinary();
     }
+  }
+
+  /**
+   * Whether the pressure rises no faster than a brisk fermentation may drive it in a small
+   * headspace: that is for the bank to explain, no gas has come in by a valve.
+   */
+  private boolean isGentleRise(Point to) {
+    double rise = to.paGauge() - front.last().paGauge();
+    return rise > 0 && rise <= GENTLE_PA_PER_S * (to.atS() - front.last().atS());
   }
 
   private double jumpLimit() {
@@ -222,7 +234,7 @@ final class PressureStep {
     double change = point.paGauge() - front.last().paGauge();
     double way = flow.moving().paGauge() - flow.begin().paGauge();
     double quiet = Math.max(3 * noise.sd(), 0.3 * jumpLimit());
-    boolean moves = Math.abs(off) > quiet && change * way > 0;
+    boolean moves = Math.abs(off) > quiet && change * way > 0 && !isGentleRise(point);
     moveBank(point.paGauge(), 1, point.atS(), moves);
     front = front.with(point).emptied(point.atS());
     Flow next = moves ? flow.moves(point) : flow.rests();

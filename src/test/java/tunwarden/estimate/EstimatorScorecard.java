@@ -13,7 +13,7 @@ class EstimatorScorecard {
   @Tag("long")
   void printTheTable() {
     int seeds = Integer.getInteger("seeds", 20);
-    long first = Long.getLong("first", 1000);
+    long first = Long.getLong("first", 5000);
     double interval = Integer.getInteger("interval", 10);
     System.out.println(
         "| situation | logs | coverage | error | plain | ratio | half-width | F1 (events) | gas |");

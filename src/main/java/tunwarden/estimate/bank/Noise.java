@@ -62,6 +62,11 @@ public record Noise(int count, int run, double last, double before, double scatt
     return Math.min(Math.abs(step), MOST_STEP_PA);
   }
 
+  /** Whether a reading may be the first to show the step the gauge is read in. */
+  public boolean mayBeOneStep(double pa) {
+    return step < 0 && Math.abs(pa - last) <= MOST_STEP_PA;
+  }
+
   /** Standard deviation of one reading, Pa. */
   public double sd() {
     double coarse = coarsePa();

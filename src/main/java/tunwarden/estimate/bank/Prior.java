@@ -26,7 +26,7 @@ final class Prior {
    * Chance of each class of air left behind: small enough not to widen the interval of a vessel
    * that shows no sign of air, large enough to be found in a few hours of changing temperature.
    */
-  private static final double[] AIR_SHARE = {0.965, 0.0117, 0.0117, 0.0116};
+  private static final double[] AIR_SHARE = {0.96, 0.0134, 0.0133, 0.0133};
 
   /** Chance that an untold vessel is held from outside when it is first seen. */
   private static final double HELD_UNTOLD = 0.05;
@@ -89,7 +89,7 @@ final class Prior {
     double leaking = 0.002;
     double held =
         switch (vessel.closure()) {
-          case SEALED -> 0.01;
+          case SEALED -> 0.002;
           case SUPPLY, SPUNDING, OPEN -> 0.96;
           default -> HELD_UNTOLD;
         };
@@ -233,10 +233,10 @@ final class Prior {
   /** Chance of leaving each mode for each other within a time; rows add to one. */
   double[][] transitions(double seconds) {
     double slow = Math.min(0.2, seconds / (5 * DAY_S));
-    double toHeld = vessel.closure() == Closure.SEALED ? 0.1 * slow : slow;
+    double toHeld = vessel.closure() == Closure.SEALED ? 0.02 * slow : slow;
     double toMaking = 0.3 * slow * makingShare();
     return rows(
-        new double[] {0, toHeld, 0.1 * toMaking, 0.02 * slow, 0},
+        new double[] {0, toHeld, 0.1 * toMaking, 0.05 * slow, 0},
         new double[] {0, 0, 6 * toMaking, 0, 3 * slow},
         new double[] {slow, toHeld, 0, 0, 0},
         new double[] {slow, toHeld, 0, 0, 0},
@@ -258,9 +258,10 @@ final class Prior {
   /** The same when no filter explains the readings any more. */
   double[][] whenNothingFits() {
     double making = 0.05 * makingShare();
+    double closed = vessel.closure() == Closure.SEALED ? 0.02 : 0.15;
     return rows(
         new double[] {0, 0.02, making, 0.02, 0},
-        new double[] {0, 0, 6 * making, 0, 0.15},
+        new double[] {0, 0, 6 * making, 0, closed},
         new double[] {0.05, 0.05, 0, 0, 0.05},
         new double[] {0.05, 0.05, 0, 0, 0},
         new double[] {0, 0.02, making, 0, 0});

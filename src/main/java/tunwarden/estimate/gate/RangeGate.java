@@ -10,8 +10,8 @@ final class RangeGate {
 
   static boolean accepts(Quantity quantity, double value) {
     return switch (quantity) {
-      case PRESSURE, PRESSURE_CHECK -> value >= ABSOLUTE_VACUUM_PA_GAUGE && value <= 40e5;
-      case TEMPERATURE, HEADSPACE_TEMPERATURE, TEMPERATURE_CHECK -> value >= 233.15 && value <= 403.15;
+      case PRESSURE -> value >= ABSOLUTE_VACUUM_PA_GAUGE && value <= 40e5;
+      case TEMPERATURE, HEADSPACE_TEMPERATURE -> value >= 233.15 && value <= 403.15;
       case LEVEL -> value >= 0 && value <= 1e5;
       case BAROMETER -> value >= 4e4 && value <= 1.2e5;
       case GRAVITY -> value >= -10 && value <= 80;

@@ -14,8 +14,8 @@ final class RateGate {
   static boolean accepts(Quantity quantity, double change, double seconds) {
     double size = Math.abs(change);
     return switch (quantity) {
-      case PRESSURE, PRESSURE_CHECK -> size <= PRESSURE_PA + PRESSURE_PA_PER_S * seconds;
-      case TEMPERATURE, HEADSPACE_TEMPERATURE, TEMPERATURE_CHECK ->
+      case PRESSURE -> size <= PRESSURE_PA + PRESSURE_PA_PER_S * seconds;
+      case TEMPERATURE, HEADSPACE_TEMPERATURE ->
           size <= TEMPERATURE_K + TEMPERATURE_K_PER_S * seconds;
       default -> true;
     };
