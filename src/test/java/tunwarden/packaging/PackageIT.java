@@ -115,6 +115,7 @@ class PackageIT {
             "README.md",
             "bin/tunwarden",
             "bin/tunwarden.cmd",
+            "lib/tunwarden.classlist",
             "lib/tunwarden.jar",
             "lib/lib/lanterna-3.1.3.jar",
             "lib/native/Linux/x86_64/libjSerialComm.so",
@@ -153,6 +154,28 @@ class PackageIT {
                 + "'; COMP_WORDS=(tunwarden reckon di); COMP_CWORD=2;"
                 + " _complete_tunwarden; echo \"${COMPREPLY[@]}\"");
     assertEquals("dissolved", ran.out().strip());
+  }
+
+  /** On a terminal of its own, with the key that a person would press. */
+  @Test
+  void zshTakesTheCompletion() throws Exception {
+    assumeTrue(Files.isExecutable(Path.of("/usr/bin/zsh")), "no zsh here: completion not tried");
+    String script =
+        """
+        zmodload zsh/zpty
+        zpty shell zsh -f -i
+        zpty -w shell "PS1=; autoload -Uz compinit && compinit -u -D; source '%s'; echo rea''dy"
+        zpty -r shell told '*ready*'
+        zpty -w -n shell $'tunwarden reckon di\\t'
+        for turn in {1..40}; do
+          sleep 0.25
+          while zpty -r -t shell part; do told+=$part; done
+          [[ $told == *dissolved* ]] && break
+        done
+        print -r -- "$told"
+        """
+            .formatted(home.resolve("completion/tunwarden.bash"));
+    assertTrue(run(false, "/usr/bin/zsh", "-f", "-c", script).out().contains("reckon dissolved"));
   }
 
   @Test
