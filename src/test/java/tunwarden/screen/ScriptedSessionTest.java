@@ -230,4 +230,12 @@ class ScriptedSessionTest {
     assertEquals(List.of("seek 2026-03-02T08:32:31Z"), session.asked());
     assertEquals(List.of(), on(Origin.LIVE).type("j").press(Key.Kind.ENTER).asked());
   }
+
+  @Test
+  void aTimeAfterTheKnownEndOfALogIsTakenAndOneBeforeItsBeginIsTheBegin() {
+    Sessions session = on(Origin.REPLAY).type("k2030-01-01T00:00:00Z").press(Key.Kind.ENTER);
+    session.type("k2020-01-01T00:00:00Z").press(Key.Kind.ENTER);
+    assertEquals(
+        List.of("seek 2030-01-01T00:00:00Z", "seek 2026-03-02T02:42:31Z"), session.asked());
+  }
 }

@@ -175,7 +175,8 @@ final class Session {
   }
 
   private static long beat(Board board) {
-    if (board.origin() != Origin.LIVE) {
+    boolean slow = board.replay().map(replay -> replay.pace() <= 1).orElse(false);
+    if (board.origin() != Origin.LIVE && !slow) {
       return PLAYED_BEAT_MS;
     }
     long into = Math.floorMod(board.now().toEpochMilli(), LIVE_BEAT_MS);
