@@ -123,8 +123,11 @@ class CrashTest {
   }
 
   private void checkWhatWasKept(String where) throws IOException {
-    // Opening repairs; a folder still locked or unreadable would throw here.
-    Recorder.open(folder, new RealDisk(), RecorderSettings.USUAL, InstantSource.system()).close();
+    // A start repairs; a folder still locked or unreadable would throw here.
+    try (Recorder recorder =
+        Recorder.open(folder, new RealDisk(), RecorderSettings.USUAL, InstantSource.system())) {
+      recorder.start();
+    }
     Set<String> kept = new HashSet<>();
     for (String line : lines("journal", ".jsonl")) {
       JournalLines.read(line).orElseThrow(() -> new AssertionError(where + ": " + line));
