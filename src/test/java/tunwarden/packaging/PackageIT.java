@@ -134,6 +134,17 @@ class PackageIT {
   }
 
   @Test
+  void everyLibraryHasItsLicenceNamed() throws IOException {
+    String page = Files.readString(home.resolve("docs/licences.md"));
+    try (Stream<Path> jars = Files.list(home.resolve("lib/lib"))) {
+      for (Path jar : (Iterable<Path>) jars::iterator) {
+        String library = jar.getFileName().toString().replaceFirst("-\\d.*", "");
+        assertTrue(page.contains("| " + library + " | "), library);
+      }
+    }
+  }
+
+  @Test
   void theWindowsLauncherHasWindowsLineEnds() throws IOException {
     // Only its form is checked: no Windows was at hand to run it.
     byte[] bytes = Files.readAllBytes(home.resolve("bin/tunwarden.cmd"));
