@@ -15,14 +15,17 @@ final class LossWatch {
   private static final double LEAST_FALL_PA_PER_HOUR = 200;
   private static final double STRAIN = 3.0;
   private static final double STRAIN_S = 3600;
+  private static final double AFRESH_S = 750;
 
   private final Medium medium;
+  private final Bank before;
   private final Bank bank;
   private Watch watch;
   private EventBook book;
 
-  LossWatch(Medium medium, Bank bank, Watch watch, EventBook book) {
+  LossWatch(Medium medium, Bank before, Bank bank, Watch watch, EventBook book) {
     this.medium = medium;
+    this.before = before;
     this.bank = bank;
     this.watch = watch;
     this.book = book;
@@ -87,8 +90,7 @@ final class LossWatch {
   }
 
   private void strain(Point point, double dt, List<Event> news) {
-    boolean strained = Math.abs(bank.setting().drift()) > STRAIN;
-    double lasted = strained ? watch.strainS() + dt : Math.max(0, watch.strainS() - 0.5 * dt);
+    double lasted = strained(dt);
     watch = watch.withStrain(Math.min(lasted, 2 * STRAIN_S));
     if (lasted > STRAIN_S && !book.has(EventKind.UNEXPLAINED)) {
       String why = "for an hour the pressure has gone where no dissolved gas would take it";
@@ -98,6 +100,15 @@ final class LossWatch {
           book.close(
               EventKind.UNEXPLAINED, BankEstimator.instant(point.atS()), point.paGauge(), news);
     }
+  }
+
+  /** A bank that has started afresh and again has nothing that fits counts as long strain. */
+  private double strained(double dt) {
+    if (before.hasLostTrack()) {
+      return watch.strainS() + AFRESH_S;
+    }
+    boolean strained = Math.abs(bank.setting().drift()) > STRAIN;
+    return strained ? watch.strainS() + dt : Math.max(0, watch.strainS() - 0.5 * dt);
   }
 
   private Event event(EventKind kind, Point point, double lasted, double kg, String why) {

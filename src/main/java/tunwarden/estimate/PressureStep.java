@@ -144,7 +144,7 @@ final class PressureStep {
     front = front.with(point);
     if (point.atS() - front.bankS() >= BLOCK_S) {
       moveBank(front.meanPa(), front.count(), point.atS(), false);
-      LossWatch loss = new LossWatch(medium, bank, watch, book);
+      LossWatch loss = new LossWatch(medium, state.bank(), bank, watch, book);
       loss.look(point, state.front().bankS(), news);
       watch = loss.watch();
       book = loss.book();

@@ -61,6 +61,16 @@ class WatchesTest {
   }
 
   @Test
+  void aPressureThatNoDissolvedGasExplainsIsSaid() {
+    for (int i = 0; i < 8 * 60; i++) {
+      double swing = i < 60 ? 0 : 4e3 * Math.sin((i - 60) / 15.0);
+      row(60 * i, 1e5 + swing, KELVIN);
+    }
+    Event odd = first(EventKind.UNEXPLAINED);
+    assertTrue(odd.why().contains("no dissolved gas"), odd.why());
+  }
+
+  @Test
   void warmingAndThenLostCoolingAreTold() {
     for (int i = 0; i < 10 * 60; i++) {
       double warmed = 0.6 * i / 60.0;

@@ -7,6 +7,8 @@ import java.nio.ByteBuffer;
  * writes to the arrays after construction.
  */
 public final class Bank {
+  private static final double DRIFT_LIMIT = 3.5;
+
   final double[] filters;
   final double[] weights;
   final Setting setting;
@@ -72,6 +74,11 @@ public final class Bank {
 
   public Setting setting() {
     return setting;
+  }
+
+  /** Whether the readings have left every filter on the same side, so that it starts afresh. */
+  public boolean hasLostTrack() {
+    return Math.abs(setting.drift()) > DRIFT_LIMIT;
   }
 
   double mean(int filter, int state) {

@@ -16,7 +16,6 @@ public final class BankFilter {
   private static final double RECOVERING_TRUST = 0.2;
 
   private static final double DRIFT_MEMORY_S = 1200;
-  private static final double DRIFT_LIMIT = 3.5;
   private static final double NOT_SEEN = -1e300;
   private static final double ADIABATIC_EXPONENT = 0.23;
   private static final double TAIL = 6;
@@ -68,7 +67,7 @@ public final class BankFilter {
     boolean mixes = unmixed >= MIX_EVERY_S;
     double[] filters = bank.filters.clone();
     double[] weights = bank.weights.clone();
-    boolean shaken = mixes && Math.abs(before.drift()) > DRIFT_LIMIT;
+    boolean shaken = mixes && bank.hasLostTrack();
     if (mixes) {
       Mixer mixer = new Mixer(solubility(before));
       mixer.mix(
