@@ -15,7 +15,7 @@ final class Mixer {
   private static final double LEAST_SHARE = 1e-3;
 
   /** Weight below which a filter is left alone until it is born again from its neighbours. */
-  static final double ASLEEP = 1e-10;
+  static final double ASLEEP = 1e-6;
 
   private static final double FLOOR = 1e-30;
 
