@@ -96,12 +96,7 @@ public final class BankFilter {
 
   /** How far the bank's own level lies behind a reading, Pa. */
   private double behindPa(Bank bank, Look look) {
-    double level = 0;
-    for (int f = 0; f < Grid.FILTERS; f++) {
-      double rest = bank.mean(f, GAS) + bank.mean(f, AIR);
-      double heat = Grid.modeOf(f) == Grid.HELD ? 0 : bank.mean(f, HEAT);
-      level += bank.weights[f] * (rest * (1 + heat) + bank.mean(f, BIAS));
-    }
+    double level = new Reader(medium).expect(bank).paDry();
     return look.paAbsolute() - medium.vapourPa(look.kelvin()) - level;
   }
 

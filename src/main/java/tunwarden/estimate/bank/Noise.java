@@ -34,22 +34,24 @@ public record Noise(int count, int run, double last, double before, double scatt
       double seen = Math.min(second * second / 6, CLIP * scatter + 100);
       newScatter += (seen - scatter) / Math.min(count + 5, LEARNING);
     }
-    double change = Math.abs(pa - last);
-    boolean moved = run >= 1 && change > LEAST_CHANGE_PA;
-    double newStep = moved && (step < 0 || change < step) ? change : step;
     int newCount = Math.min(count + 1, 1_000_000);
     int newRun = Math.min(run + 1, 2);
-    return new Noise(newCount, newRun, pa, last, newScatter, newStep);
+    double most = Double.POSITIVE_INFINITY;
+    return new Noise(newCount, newRun, pa, last, newScatter, stepAfter(pa, most));
   }
 
   /**
    * After a reading that was set aside as a spike: it still tells the step the gauge is read in.
    */
   public Noise aside(double pa) {
+    return new Noise(count, run, last, before, scatter, stepAfter(pa, MOST_STEP_PA));
+  }
+
+  /** The smallest change seen, another reading included if it moved by no more than that. */
+  private double stepAfter(double pa, double most) {
     double change = Math.abs(pa - last);
-    boolean moved = run >= 1 && change > LEAST_CHANGE_PA && change <= MOST_STEP_PA;
-    double newStep = moved && (step < 0 || change < step) ? change : step;
-    return new Noise(count, run, last, before, scatter, newStep);
+    boolean moved = run >= 1 && change > LEAST_CHANGE_PA && change <= most;
+    return moved && (step < 0 || change < step) ? change : step;
   }
 
   /** Gas has passed a valve: the next reading is not compared with those before. */
