@@ -159,6 +159,9 @@ class StreamOverPtyTest {
       Eventually.within(SOON, "said", () -> runner.health().state() == LinkState.ENDLESS);
       pty.send("\n\033[2J\007nonsense\nP=ERR T=4\n");
       Eventually.within(SOON, "temperature", () -> readings(Quantity.TEMPERATURE).size() == 1);
+      // A value is handed over a moment before the health that counts its line is published.
+      Eventually.within(
+          SOON, "counted", () -> runner.health().traffic().troubles().containsKey(Trouble.FOREIGN));
       LinkHealth health = runner.health();
       assertEquals(1L, health.traffic().troubles().get(Trouble.TOO_LONG));
       assertEquals(1L, health.traffic().troubles().get(Trouble.FOREIGN));
